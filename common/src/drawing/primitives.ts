@@ -1,0 +1,106 @@
+/**
+ * A drawing as data: a flat list of primitives in millimetres, origin at the top left, y downwards. It is immutable and
+ * knows neither SVG nor PDF; a renderer walks the list and decides scale, colour and font.
+ */
+
+/** What a line means; the renderer gives each layer its weight and colour, in monochrome by weight and dash alone. */
+export const LAYERS = [
+  'structure', // earthed steel, cross-arm
+  'insulation', // discs, sheds
+  'metal', // caps, pins, fittings, arcing devices
+  'live', // live parts
+  'dimension', // dimension lines and their text
+  'clearance', // clearance arcs and circles
+  'governing', // what governs
+  'note', // words
+] as const;
+export type Layer = (typeof LAYERS)[number];
+
+export interface Point {
+  xMm: number;
+  yMm: number;
+}
+
+interface Drawn {
+  layer: Layer;
+  /** Links a primitive with a figure of the ledger, e.g. "string.sectionLengthMm". */
+  about?: string;
+}
+
+export interface LinePrimitive extends Drawn {
+  kind: 'line';
+  from: Point;
+  to: Point;
+  dashed?: boolean;
+}
+
+export interface PolylinePrimitive extends Drawn {
+  kind: 'polyline';
+  points: Point[];
+  closed: boolean;
+  filled: boolean;
+}
+
+/** A path of lines and cubic curves, closed and filled with the ground where `filled`; `data` is SVG path data in mm. */
+export interface PathPrimitive extends Drawn {
+  kind: 'path';
+  data: string;
+  filled: boolean;
+}
+
+/** Angles in degrees, clockwise from the positive x axis (y points down). */
+export interface ArcPrimitive extends Drawn {
+  kind: 'arc';
+  centre: Point;
+  radiusMm: number;
+  startDeg: number;
+  endDeg: number;
+  dashed: boolean;
+}
+
+export interface CirclePrimitive extends Drawn {
+  kind: 'circle';
+  centre: Point;
+  radiusMm: number;
+  filled: boolean;
+  dashed?: boolean;
+}
+
+/** Text height is a share of the drawing's own size, so that words stay readable at every scale. */
+export interface TextPrimitive extends Drawn {
+  kind: 'text';
+  at: Point;
+  text: string;
+  anchor: 'start' | 'middle' | 'end';
+  /** Turned about `at`, degrees clockwise. */
+  angleDeg: number;
+}
+
+/** A dimension between two points, its line shifted by `offsetMm` to the left of the direction from -> to. */
+export interface DimensionPrimitive extends Drawn {
+  kind: 'dimension';
+  from: Point;
+  to: Point;
+  offsetMm: number;
+  text: string;
+}
+
+export type Primitive =
+  | LinePrimitive
+  | PolylinePrimitive
+  | PathPrimitive
+  | ArcPrimitive
+  | CirclePrimitive
+  | TextPrimitive
+  | DimensionPrimitive;
+
+export interface Drawing {
+  title: string;
+  /** What the drawing says in words, for readers who cannot see it. */
+  description: string;
+  widthMm: number;
+  heightMm: number;
+  /** Height of text in drawing millimetres at the drawing's own scale. */
+  textHeightMm: number;
+  primitives: Primitive[];
+}

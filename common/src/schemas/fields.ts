@@ -1,0 +1,138 @@
+/**
+ * Every input by its path: the words, unit and limits that the form, the sheet and the error messages share.
+ * `quantity` says what the reader's choice of units may convert on screen; `unit` is the unit of the stored figure.
+ */
+export interface Field {
+  label: string;
+  /** Basis of a voltage, shown beside every kV. */
+  basis?: 'line to line' | 'phase to earth';
+  unit?: 'kV rms' | 'kV peak' | 'kV' | 'm' | 'mm' | 'Hz' | 'kA' | 's' | '°' | 'N' | 'N/m' | 'Pa' | '°C' | 'kN';
+  quantity?: 'length-mm' | 'length-m' | 'force-kn' | 'force-n';
+  /** Smallest figure that can be read at all; the method's own limits are the engine's. */
+  above?: number;
+  atLeast?: number;
+  atMost?: number;
+  whole?: boolean;
+}
+
+export const FIELDS = {
+  kind: { label: 'Kind' },
+  basis: { label: 'Basis' },
+  'system.nominalVoltageKv': { label: 'Nominal voltage', basis: 'line to line', unit: 'kV rms', above: 0 },
+  'system.highestVoltageKv': { label: 'Highest voltage', basis: 'line to line', unit: 'kV rms', above: 0 },
+  'system.frequencyHz': { label: 'Frequency', unit: 'Hz', above: 0 },
+  'system.neutralEarthing': { label: 'Neutral earthing' },
+  'system.earthFault': { label: 'Earth fault' },
+  'system.insulationLevel': { label: 'Insulation level' },
+  'system.insulationLevel.lightningKv': { label: 'Lightning impulse withstand', unit: 'kV peak', above: 0 },
+  'system.insulationLevel.switchingKv': { label: 'Switching impulse withstand', basis: 'phase to earth', unit: 'kV peak', above: 0 },
+  'system.insulationLevel.powerFrequencyKv': { label: 'Power-frequency withstand', unit: 'kV rms', above: 0 },
+  'system.insulationLevel.switchingPhaseRatio': { label: 'Switching, between phases over to earth', above: 0 },
+  'system.insulationLevel.levelHoldsToM': { label: 'Level holds up to', unit: 'm', quantity: 'length-m', atLeast: 0 },
+  'system.overvoltages.slowFrontPhaseToEarthKvPeak': { label: 'Slow-front overvoltage', basis: 'phase to earth', unit: 'kV peak', above: 0 },
+  'system.overvoltages.slowFrontPhaseToPhaseKvPeak': { label: 'Slow-front overvoltage between phases', unit: 'kV peak', above: 0 },
+  'system.overvoltages.earthFaultFactor': { label: 'Earth-fault factor', atLeast: 1 },
+  'system.faultCurrentKa': { label: 'Fault current', unit: 'kA', above: 0 },
+  'system.faultDurationS': { label: 'Fault duration', unit: 's', above: 0 },
+  'site.altitudeM': { label: 'Altitude', unit: 'm', quantity: 'length-m', atLeast: -430 },
+  'site.pollution.class': { label: 'Pollution class' },
+  'site.pollution.type': { label: 'Pollution type' },
+  'site.pollution.contamination': { label: 'Contamination level' },
+  'site.pollution.basis': { label: 'How known' },
+  'site.pollution.recheckBy': { label: 'Re-check by' },
+  'string.insulatorCode': { label: 'Insulator unit' },
+  'string.arrangement': { label: 'Arrangement' },
+  'string.parallelStrings': { label: 'Strings in parallel', atLeast: 1, atMost: 4, whole: true },
+  'string.rodsInSeries': { label: 'Rods in series', atLeast: 1, atMost: 10, whole: true },
+  'string.surroundings': { label: 'Surroundings' },
+  'string.spareUnits': { label: 'Extra units in the string', atLeast: 0, atMost: 20, whole: true },
+  'string.arcingDevices': { label: 'Arcing devices' },
+  'string.arcGapMm': { label: 'Gap between devices', unit: 'mm', quantity: 'length-mm', above: 0 },
+  'string.hardwareLengthMm': { label: 'Length of fittings', unit: 'mm', quantity: 'length-mm', atLeast: 0 },
+  'string.vAngleWindwardDeg': { label: 'V leg angle, windward', unit: '°', above: 0, atMost: 89 },
+  'string.vAngleLeewardDeg': { label: 'V leg angle, leeward', unit: '°', above: 0, atMost: 89 },
+  'clearance.method': { label: 'Clearance method' },
+  'clearance.shapePhaseToEarth': { label: 'Shape, phase to earth' },
+  'clearance.shapePhaseToPhase': { label: 'Shape, between phases' },
+  'clearance.fastFrontFrom': { label: 'Fast-front voltage from' },
+  'clearance.enGap': { label: 'Kind of gap' },
+  'clearance.externalClearanceMm': { label: 'External clearance provided', unit: 'mm', quantity: 'length-mm', above: 0 },
+  'clearance.safetySource': { label: 'Safety distances from' },
+} as const satisfies Record<string, Field>;
+
+export type FieldPath = keyof typeof FIELDS;
+
+/** The field of a path, or undefined where the path names none. Widened, so that every property can be asked. */
+export function fieldOf(path: string): Field | undefined {
+  return (FIELDS as Record<string, Field>)[path];
+}
+
+/** The words of every choice, by field name. */
+export const CHOICE_LABELS = {
+  kind: { line: 'Line', bay: 'Substation bay' },
+  basis: { iec: 'IEC', 'north-american': 'North American' },
+  frequencyHz: { '50': '50 Hz', '60': '60 Hz' },
+  neutralEarthing: { effective: 'Effectively earthed', resonant: 'Resonant earthed', isolated: 'Isolated' },
+  earthFault: { cleared: 'Cleared at once', sustained: 'May stand for hours' },
+  pollutionClass: { a: 'a, very light', b: 'b, light', c: 'c, medium', d: 'd, heavy', e: 'e, very heavy' },
+  pollutionType: { A: 'A, solid deposit', B: 'B, conductive fog or spray', AB: 'A and B' },
+  pollutionBasis: { measured: 'Measured', estimated: 'Estimated', assumed: 'Assumed' },
+  contamination: {
+    'very-light': 'Very light',
+    light: 'Light',
+    moderate: 'Moderate',
+    heavy: 'Heavy',
+    'very-heavy': 'Very heavy',
+  },
+  arrangement: { suspension: 'Suspension', 'v-suspension': 'V-suspension', tension: 'Tension' },
+  surroundings: {
+    'cross-arm': 'At the cross-arm',
+    window: 'In the tower window',
+    'lower-structure': 'Structure below',
+    open: 'Not known',
+  },
+  arcingDevices: { none: 'None', horns: 'Horns', rings: 'Rings' },
+  clearanceMethod: {
+    'iec-table': 'IEC 60071 tables',
+    'en-empirical': 'EN 50341 empirical',
+    'en-theoretical': 'EN 50341 theoretical',
+    'north-american': 'North American',
+  },
+  shapePhaseToEarth: { 'rod-structure': 'Rod to structure', 'conductor-structure': 'Conductor to structure' },
+  shapePhaseToPhase: { 'rod-conductor': 'Rod to conductor', 'conductor-conductor': 'Conductor to conductor' },
+  fastFrontFrom: { level: 'Insulation level', string: 'String' },
+  enGap: { window: 'Tower window', structure: 'Tower structure', obstacle: 'Obstacle' },
+  safetySource: { 'rd-337': 'RD 337/2014 ITC-RAT 15', 'iec-61936-1': 'IEC 61936-1' },
+  insulatorKind: {
+    'cap-and-pin': 'Cap and pin',
+    'ceramic-rod': 'Ceramic long rod',
+    'composite-rod': 'Composite long rod',
+    'line-post': 'Line post',
+  },
+  insulatorMaterial: { glass: 'Toughened glass', porcelain: 'Porcelain', ceramic: 'Ceramic', composite: 'Composite' },
+  insulatorProfile: {
+    standard: 'Standard',
+    fog: 'Fog',
+    open: 'Open',
+    alternating: 'Alternating sheds',
+    unknown: 'Not known',
+  },
+  insulatorFamily: { 'iec-60305': 'IEC 60305', 'ansi-c29.2': 'ANSI C29.2', company: 'Company catalogue' },
+  criterion: {
+    pollution: 'Pollution',
+    lightning: 'Lightning',
+    switching: 'Switching',
+    'power-frequency': 'Power frequency, wet',
+    minimum: 'Minimum',
+  },
+  verdict: { met: 'Met', short: 'Short', unknown: 'Unknown' },
+  severity: { info: 'Note', caution: 'Caution', acceptance: 'Acceptance', fail: 'Fail', stop: 'Stop' },
+  status: {
+    seen: 'seen',
+    memory: 'from memory, not verified',
+    practice: 'common practice, no published source',
+    derived: 'derived',
+    confirmed: 'confirmed',
+    disputed: 'disputed',
+  },
+} as const;

@@ -1,0 +1,3 @@
+export * from './fields';
+export * from './parts';
+export * from './specification-input';
