@@ -25,12 +25,26 @@ export const FIELDS = {
   'system.earthFault': { label: 'Earth fault' },
   'system.insulationLevel': { label: 'Insulation level' },
   'system.insulationLevel.lightningKv': { label: 'Lightning impulse withstand', unit: 'kV peak', above: 0 },
-  'system.insulationLevel.switchingKv': { label: 'Switching impulse withstand', basis: 'phase to earth', unit: 'kV peak', above: 0 },
+  'system.insulationLevel.switchingKv': {
+    label: 'Switching impulse withstand',
+    basis: 'phase to earth',
+    unit: 'kV peak',
+    above: 0,
+  },
   'system.insulationLevel.powerFrequencyKv': { label: 'Power-frequency withstand', unit: 'kV rms', above: 0 },
   'system.insulationLevel.switchingPhaseRatio': { label: 'Switching, between phases over to earth', above: 0 },
   'system.insulationLevel.levelHoldsToM': { label: 'Level holds up to', unit: 'm', quantity: 'length-m', atLeast: 0 },
-  'system.overvoltages.slowFrontPhaseToEarthKvPeak': { label: 'Slow-front overvoltage', basis: 'phase to earth', unit: 'kV peak', above: 0 },
-  'system.overvoltages.slowFrontPhaseToPhaseKvPeak': { label: 'Slow-front overvoltage between phases', unit: 'kV peak', above: 0 },
+  'system.overvoltages.slowFrontPhaseToEarthKvPeak': {
+    label: 'Slow-front overvoltage',
+    basis: 'phase to earth',
+    unit: 'kV peak',
+    above: 0,
+  },
+  'system.overvoltages.slowFrontPhaseToPhaseKvPeak': {
+    label: 'Slow-front overvoltage between phases',
+    unit: 'kV peak',
+    above: 0,
+  },
   'system.overvoltages.earthFaultFactor': { label: 'Earth-fault factor', atLeast: 1 },
   'system.faultCurrentKa': { label: 'Fault current', unit: 'kA', above: 0 },
   'system.faultDurationS': { label: 'Fault duration', unit: 's', above: 0 },
@@ -56,7 +70,12 @@ export const FIELDS = {
   'clearance.shapePhaseToPhase': { label: 'Shape, between phases' },
   'clearance.fastFrontFrom': { label: 'Fast-front voltage from' },
   'clearance.enGap': { label: 'Kind of gap' },
-  'clearance.externalClearanceMm': { label: 'External clearance provided', unit: 'mm', quantity: 'length-mm', above: 0 },
+  'clearance.externalClearanceMm': {
+    label: 'External clearance provided',
+    unit: 'mm',
+    quantity: 'length-mm',
+    above: 0,
+  },
   'clearance.safetySource': { label: 'Safety distances from' },
 } as const satisfies Record<string, Field>;
 

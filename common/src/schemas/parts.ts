@@ -36,14 +36,19 @@ export function oneOf<const T extends string>(labelOrPath: string, values: reado
 
 /** Control and direction characters change how a line reads without being seen; they are refused at entry. */
 // eslint-disable-next-line no-control-regex
-const HIDDEN_CHARACTERS = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u200b-\u200f\u202a-\u202e\u2060-\u206f\ufeff]/;
+const HIDDEN_CHARACTERS =
+  /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u200b-\u200f\u202a-\u202e\u2060-\u206f\ufeff]/;
 
 export function plainText(label: string, atMost: number) {
   return yup
     .string()
     .typeError(`${label}: text is needed`)
     .max(atMost, `${label}: at most ${atMost} characters`)
-    .test('no-hidden-characters', `${label}: contains characters that cannot be seen`, (v) => !v || !HIDDEN_CHARACTERS.test(v));
+    .test(
+      'no-hidden-characters',
+      `${label}: contains characters that cannot be seen`,
+      (v) => !v || !HIDDEN_CHARACTERS.test(v),
+    );
 }
 
 export function text(labelOrPath: string, atMost: number) {

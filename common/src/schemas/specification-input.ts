@@ -89,10 +89,14 @@ const string = part({
   surroundings: oneOf('string.surroundings', SURROUNDINGS),
   spareUnits: measureOf('string.spareUnits'),
   arcingDevices: oneOf('string.arcingDevices', ARCING_DEVICES),
-  arcGapMm: measureOf('string.arcGapMm').test('horns-need-a-gap', 'Horns need the gap between them', (gap, { parent }) => {
-    const devices = (parent as { arcingDevices?: string | null }).arcingDevices;
-    return !(devices === 'horns' && typeof gap !== 'number');
-  }),
+  arcGapMm: measureOf('string.arcGapMm').test(
+    'horns-need-a-gap',
+    'Horns need the gap between them',
+    (gap, { parent }) => {
+      const devices = (parent as { arcingDevices?: string | null }).arcingDevices;
+      return !(devices === 'horns' && typeof gap !== 'number');
+    },
+  ),
   hardwareLengthMm: measureOf('string.hardwareLengthMm'),
   vAngleWindwardDeg: measureOf('string.vAngleWindwardDeg'),
   vAngleLeewardDeg: measureOf('string.vAngleLeewardDeg'),

@@ -1,0 +1,383 @@
+import * as yup from 'yup';
+import type { Evaluation, EvaluationContext, InsulatorUnit, SpecificationInput } from '../engine/model';
+import {
+  INSULATOR_FAMILIES,
+  INSULATOR_KINDS,
+  INSULATOR_MATERIALS,
+  INSULATOR_PROFILES,
+  STATUSES,
+} from '../engine/model';
+import { companySettingsSchema } from '../schemas/company-settings';
+import { PAPERS, PROJECT_KINDS, basisRulesSchema } from '../schemas/projects';
+import { overrideSchema } from '../schemas/specifications';
+import { ROLES } from './roles';
+import { REVISION_STATES } from './states';
+
+/** Schemas of answers. Instants are RFC 3339 in UTC, dates YYYY-MM-DD. */
+
+const instant = () => yup.string().required();
+const nullableInstant = () => yup.string().nullable().defined();
+const day = () => yup.string().required();
+const nullableText = () => yup.string().nullable().defined();
+const nullableNumber = () => yup.number().nullable().defined();
+const flag = () => yup.boolean().required();
+const number = () => yup.number().required();
+const words = () => yup.string().defined();
+
+/** A value of a shape that the engine's own types describe. */
+const engineValue = <T>() => yup.mixed<T & object>().required();
+
+export function listOf<S extends yup.AnySchema>(item: S) {
+  return yup
+    .object({ items: yup.array().of(item).required(), next: nullableText(), previous: nullableText() })
+    .noUnknown()
+    .required();
+}
+
+export const grantAnswer = yup
+  .object({
+    id: words(),
+    role: yup
+      .string()
+      .oneOf([...ROLES])
+      .required(),
+    projectCode: nullableText(),
+    checkCategory: nullableNumber(),
+    validFrom: day(),
+    validTo: nullableText(),
+    grantedBy: nullableText(),
+    grantedAt: instant(),
+  })
+  .noUnknown();
+
+/** A signed-in person: what he may do now. */
+export const personAnswer = yup
+  .object({
+    id: words(),
+    email: words(),
+    name: words(),
+    /** Roles held today, in any project. */
+    roles: yup
+      .array()
+      .of(
+        yup
+          .string()
+          .oneOf([...ROLES])
+          .required(),
+      )
+      .required(),
+  })
+  .noUnknown();
+export type Person = yup.InferType<typeof personAnswer>;
+
+export const currentSessionAnswer = yup
+  .object({ user: personAnswer.nullable().defined().default(undefined) })
+  .noUnknown()
+  .required();
+
+export const sessionAnswer = yup
+  .object({
+    id: words(),
+    current: flag(),
+    createdAt: instant(),
+    lastActiveAt: instant(),
+    expiresAt: instant(),
+    address: nullableText(),
+    browser: nullableText(),
+  })
+  .noUnknown();
+
+export const userAnswer = yup
+  .object({
+    id: words(),
+    email: words(),
+    name: words(),
+    active: flag(),
+    /** False until the person has chosen a password. */
+    hasPassword: flag(),
+    createdAt: instant(),
+    grants: yup.array().of(grantAnswer.required()).required(),
+  })
+  .noUnknown();
+export type User = yup.InferType<typeof userAnswer>;
+
+/** A link that is shown once, to be handed to the person. */
+export const invitationAnswer = yup
+  .object({ user: userAnswer.required(), link: words(), expiresAt: instant() })
+  .noUnknown()
+  .required();
+
+export const projectAnswer = yup
+  .object({
+    id: words(),
+    code: words(),
+    title: words(),
+    kind: yup
+      .string()
+      .oneOf([...PROJECT_KINDS])
+      .required(),
+    siteTimeZone: words(),
+    paper: yup
+      .string()
+      .oneOf([...PAPERS])
+      .required(),
+    description: words(),
+    lockVersion: number(),
+    updatedAt: instant(),
+    updatedBy: nullableText(),
+    /** Drafts count only for those who may see drafts. */
+    specificationCount: number(),
+    nominalVoltageKv: nullableNumber(),
+    highestVoltageKv: nullableNumber(),
+    basisNumber: nullableText(),
+    basisRevision: nullableNumber(),
+    /** What the asker may do here. */
+    mayEdit: flag(),
+  })
+  .noUnknown();
+export type Project = yup.InferType<typeof projectAnswer>;
+
+export const designBasisAnswer = yup
+  .object({
+    id: words(),
+    number: words(),
+    revision: number(),
+    basis: yup.string().required(),
+    system: engineValue<NonNullable<SpecificationInput['system']>>(),
+    rules: basisRulesSchema.required(),
+    note: words(),
+    createdAt: instant(),
+    createdBy: nullableText(),
+  })
+  .noUnknown();
+export type DesignBasis = yup.InferType<typeof designBasisAnswer>;
+
+export const designBasisHistoryAnswer = yup
+  .object({
+    current: designBasisAnswer.nullable().defined().default(undefined),
+    earlier: yup.array().of(designBasisAnswer.required()).required(),
+  })
+  .noUnknown()
+  .required();
+
+/** A row of a list of specifications: plain columns written with the evaluation. */
+export const specificationRowAnswer = yup
+  .object({
+    id: words(),
+    projectCode: words(),
+    number: words(),
+    title: words(),
+    kind: words(),
+    label: words(),
+    state: yup
+      .string()
+      .oneOf([...REVISION_STATES])
+      .required(),
+    units: nullableNumber(),
+    insulatorCode: nullableText(),
+    governedBy: nullableText(),
+    highestVoltageKv: nullableNumber(),
+    altitudeM: nullableNumber(),
+    severity: nullableText(),
+    worstMarginPercent: nullableNumber(),
+    /** Worst kind of caution: info, caution, acceptance, fail, stop; null where there is none. */
+    worstCaution: nullableText(),
+    newerBasisRevision: nullableNumber(),
+    draftedBy: nullableText(),
+    savedBy: nullableText(),
+    savedAt: instant(),
+  })
+  .noUnknown();
+export type SpecificationRow = yup.InferType<typeof specificationRowAnswer>;
+
+export const revisionAnswer = yup
+  .object({
+    id: words(),
+    specificationId: words(),
+    projectCode: words(),
+    projectTitle: words(),
+    number: words(),
+    title: words(),
+    label: words(),
+    state: yup
+      .string()
+      .oneOf([...REVISION_STATES])
+      .required(),
+    input: engineValue<SpecificationInput>(),
+    overrides: yup.array().of(overrideSchema.required()).required(),
+    /** The revision of the design basis that this draft is pinned to. */
+    basis: designBasisAnswer.nullable().defined().default(undefined),
+    /** Number of a newer revision of the basis, or null. */
+    newerBasisRevision: nullableNumber(),
+    context: engineValue<EvaluationContext>(),
+    evaluation: engineValue<Evaluation>(),
+    lockVersion: number(),
+    savedAt: instant(),
+    savedBy: nullableText(),
+    drafted: yup.object({ name: words(), on: day() }).noUnknown().nullable().defined().default(undefined),
+    checked: yup.object({ name: words(), on: day() }).noUnknown().nullable().defined().default(undefined),
+    approved: yup.object({ name: words(), on: day() }).noUnknown().nullable().defined().default(undefined),
+    mayEdit: flag(),
+    lastSheet: yup
+      .object({
+        id: words(),
+        drawnAt: instant(),
+        drawnBy: nullableText(),
+        pages: number(),
+        sha256: words(),
+        current: flag(),
+      })
+      .noUnknown()
+      .nullable()
+      .defined()
+      .default(undefined),
+  })
+  .noUnknown()
+  .required();
+export type Revision = yup.InferType<typeof revisionAnswer>;
+
+/** 409 on a save from an older version: what stands now, by whom, since when. */
+export const newerVersionAnswer = yup
+  .object({ current: revisionAnswer, changedBy: nullableText(), changedAt: instant() })
+  .noUnknown();
+
+export const sourceAnswer = yup
+  .object({
+    document: words(),
+    edition: words(),
+    clause: words(),
+    status: yup
+      .string()
+      .oneOf([...STATUSES])
+      .required(),
+  })
+  .noUnknown();
+
+export const insulatorAnswer = yup
+  .object({
+    code: words(),
+    version: number(),
+    family: yup
+      .string()
+      .oneOf([...INSULATOR_FAMILIES])
+      .required(),
+    kind: yup
+      .string()
+      .oneOf([...INSULATOR_KINDS])
+      .required(),
+    material: yup
+      .string()
+      .oneOf([...INSULATOR_MATERIALS, null])
+      .nullable()
+      .defined(),
+    profile: yup
+      .string()
+      .oneOf([...INSULATOR_PROFILES])
+      .required(),
+    failingLoadKn: number(),
+    coupling: nullableText(),
+    spacingMm: number(),
+    diameterMm: nullableNumber(),
+    averageDiameterMm: nullableNumber(),
+    creepageMm: number(),
+    creepageIsNominal: flag(),
+    dryArcMm: nullableNumber(),
+    massKg: nullableNumber(),
+    routineTestLoadKn: nullableNumber(),
+    wetFlashover: yup
+      .array()
+      .of(yup.object({ units: number(), wetKvRms: number() }).noUnknown().required())
+      .nullable()
+      .defined()
+      .default(undefined),
+    note: nullableText(),
+    source: sourceAnswer.required(),
+    withdrawn: flag(),
+  })
+  .noUnknown();
+export type CatalogueUnit = InsulatorUnit;
+
+export const insulationLevelAnswer = yup
+  .object({
+    highestVoltageKv: number(),
+    lightningKv: number(),
+    switchingKv: nullableNumber(),
+    powerFrequencyKv: nullableNumber(),
+    switchingPhaseRatio: nullableNumber(),
+    bracketed: flag(),
+    reason: nullableText(),
+    source: sourceAnswer.required(),
+  })
+  .noUnknown();
+export type InsulationLevelRow = yup.InferType<typeof insulationLevelAnswer>;
+
+export const companySettingsAnswer = yup
+  .object({
+    version: number(),
+    settings: companySettingsSchema.required(),
+    setBy: nullableText(),
+    setAt: instant(),
+    reason: words(),
+  })
+  .noUnknown();
+
+export const conductorAnswer = yup
+  .object({
+    code: words(),
+    description: words(),
+    diameterMm: number(),
+    massKgPerM: number(),
+    ratedStrengthKn: number(),
+    source: words(),
+  })
+  .noUnknown();
+
+export const towerFamilyAnswer = yup
+  .object({
+    code: words(),
+    projectCode: words(),
+    function: words(),
+    layout: words(),
+    phaseSpacingM: number(),
+    verticalGapM: number(),
+    horizontalOffsetM: number(),
+    maximumStringMm: number(),
+    maximumSwingDeg: number(),
+    attachmentKn: number(),
+    coupling: words(),
+  })
+  .noUnknown();
+
+export const evaluationAnswer = engineValue<Evaluation>();
+
+export const healthAnswer = yup
+  .object({
+    status: yup.string().oneOf(['ok', 'unavailable']).required(),
+    database: yup.string().oneOf(['ok', 'unreachable']).required(),
+    version: words(),
+    methodEdition: words(),
+  })
+  .noUnknown()
+  .required();
+
+export const deskAnswer = yup
+  .object({
+    /** Drafts that the asker began or last saved. */
+    drafts: yup.array().of(specificationRowAnswer.required()).required(),
+    /** Drafts whose design basis has a newer revision. */
+    outdated: yup.array().of(specificationRowAnswer.required()).required(),
+  })
+  .noUnknown()
+  .required();
+
+export const sheetAnswer = yup
+  .object({
+    id: words(),
+    drawnAt: instant(),
+    drawnBy: nullableText(),
+    pages: number(),
+    sha256: words(),
+    current: flag(),
+  })
+  .noUnknown()
+  .required();
