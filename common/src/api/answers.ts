@@ -178,7 +178,8 @@ export const specificationRowAnswer = yup
     governedBy: nullableText(),
     highestVoltageKv: nullableNumber(),
     altitudeM: nullableNumber(),
-    severity: nullableText(),
+    /** Pollution class letter or contamination level. */
+    pollutionSeverity: nullableText(),
     worstMarginPercent: nullableNumber(),
     /** Worst kind of caution: info, caution, acceptance, fail, stop; null where there is none. */
     worstCaution: nullableText(),
@@ -265,11 +266,7 @@ export const insulatorAnswer = yup
       .string()
       .oneOf([...INSULATOR_KINDS])
       .required(),
-    material: yup
-      .string()
-      .oneOf([...INSULATOR_MATERIALS, null])
-      .nullable()
-      .defined(),
+    material: yup.string().nullable().oneOf([...INSULATOR_MATERIALS, null]).defined(),
     profile: yup
       .string()
       .oneOf([...INSULATOR_PROFILES])
