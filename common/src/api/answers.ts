@@ -266,7 +266,11 @@ export const insulatorAnswer = yup
       .string()
       .oneOf([...INSULATOR_KINDS])
       .required(),
-    material: yup.string().nullable().oneOf([...INSULATOR_MATERIALS, null]).defined(),
+    material: yup
+      .string()
+      .nullable()
+      .oneOf([...INSULATOR_MATERIALS, null])
+      .defined(),
     profile: yup
       .string()
       .oneOf([...INSULATOR_PROFILES])
