@@ -1,6 +1,6 @@
 import type { Caution, Severity, SourceReference, Status, TableConfirmation, TraceLine } from './model';
 import { unitOf } from './quantities';
-import type { StandardTable } from './standards/table';
+import { rowKeyOf, type StandardTable, type TableRow } from './standards/table';
 
 type Figures = Record<string, number>;
 
@@ -100,18 +100,20 @@ export class Calculation {
   /** Disputed rows and formulas that were used, in order of use. */
   readonly disputed: string[] = [];
   restsOnMemory = false;
-  private readonly confirmations: ReadonlyMap<string, TableConfirmation['outcome']>;
+  /** By key; null where there are none, so that no keys need be made. */
+  private readonly confirmations: ReadonlyMap<string, TableConfirmation['outcome']> | null;
 
   constructor(
     readonly tracing: boolean,
     confirmations: readonly TableConfirmation[] = [],
   ) {
-    this.confirmations = new Map(confirmations.map(({ key, outcome }) => [key, outcome]));
+    this.confirmations =
+      confirmations.length === 0 ? null : new Map(confirmations.map(({ key, outcome }) => [key, outcome]));
   }
 
   /** Status of a figure after what owners of the print have recorded; noted as used. */
   status(key: string, known: Status): Status {
-    const status = this.confirmations.get(key) ?? known;
+    const status = this.confirmations?.get(key) ?? known;
     if (status === 'memory') this.restsOnMemory = true;
     if (status === 'disputed' && !this.disputed.includes(key)) this.disputed.push(key);
     return status;
@@ -134,10 +136,14 @@ export class Calculation {
     return value;
   }
 
-  /** Citation of one row of a table, with the status the row has now; `rowKey` tells the row within its table. */
-  row(table: StandardTable<object>, row: { status: Status }, rowKey: string): SourceReference {
-    const status = this.status(`${table.key}:${rowKey}`, row.status);
-    return { document: table.document, edition: table.edition, clause: table.clause, status };
+  /**
+   * Citation of one row of a table, with the status the row has now. A row may know some of its columns less well than
+   * others; `known` then says how well those are known that were used.
+   */
+  row<Row extends object>(table: StandardTable<Row>, row: TableRow<Row>, known: Status = row.status): SourceReference {
+    const key = this.confirmations || known === 'disputed' ? `${table.key}:${rowKeyOf(table, row)}` : '';
+    const { document, edition, clause } = table;
+    return { document, edition, clause, status: this.status(key, known) };
   }
 
   /** Keeps a line that is no formula: a row that was read or a choice that was made. Built only where it is wanted. */
