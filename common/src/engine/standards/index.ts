@@ -1,0 +1,47 @@
+import { ANSI_C29_2_UNITS } from './ansi-c29-2';
+import { C37_30_ALTITUDE, C37_32_BUS_CLEARANCES } from './c37';
+import { EN_50341_1_ALTITUDE, EN_50341_1_CLEARANCES, EN_50341_1_GAP_FACTORS } from './en-50341-1';
+import { IEC_60071_1_TABLE_A1, IEC_60071_1_TABLE_A2, IEC_60071_1_TABLE_A3 } from './iec-60071-1-clearances';
+import { IEC_60071_1_RANGE_I, IEC_60071_1_RANGE_II } from './iec-60071-1-levels';
+import { IEC_60305_UNITS } from './iec-60305';
+import { IEC_61936_1_CLEARANCES } from './iec-61936-1';
+import { IEC_TS_60815_USCD } from './iec-ts-60815';
+import { RUS_CONTAMINATION, RUS_SUSPENSION_LEVELS } from './rus-1724e-200';
+import { STRING_FLASHOVER_254X146 } from './string-flashover';
+import { TRADE_DISC_COUNTS } from './trade-disc-counts';
+
+export * from './ansi-c29-2';
+export * from './c37';
+export * from './en-50341-1';
+export * from './iec-60071-1-clearances';
+export * from './iec-60071-1-levels';
+export * from './iec-60305';
+export * from './iec-61936-1';
+export * from './iec-ts-60815';
+export * from './look-up';
+export * from './rus-1724e-200';
+export * from './string-flashover';
+export * from './table';
+export * from './trade-disc-counts';
+
+/** Every table the engine holds, in the order the tables screen shows them. */
+export const ALL_TABLES = [
+  IEC_60071_1_RANGE_I,
+  IEC_60071_1_RANGE_II,
+  IEC_60071_1_TABLE_A1,
+  IEC_60071_1_TABLE_A2,
+  IEC_60071_1_TABLE_A3,
+  IEC_TS_60815_USCD,
+  IEC_60305_UNITS,
+  ANSI_C29_2_UNITS,
+  STRING_FLASHOVER_254X146,
+  EN_50341_1_CLEARANCES,
+  EN_50341_1_ALTITUDE,
+  EN_50341_1_GAP_FACTORS,
+  IEC_61936_1_CLEARANCES,
+  C37_30_ALTITUDE,
+  C37_32_BUS_CLEARANCES,
+  RUS_SUSPENSION_LEVELS,
+  RUS_CONTAMINATION,
+  TRADE_DISC_COUNTS,
+] as const;
