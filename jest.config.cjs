@@ -22,11 +22,17 @@ const base = {
   modulePathIgnorePatterns: ['<rootDir>/dist/', '<rootDir>/dist-types/'],
   testMatch: ['**/*.spec.ts', '**/*.spec.tsx', '**/*.e2e-spec.ts'],
 };
+
+/** One PostgreSQL cluster a run, for the projects that ask for it. */
+const withDatabase = {
+  globalSetup: `${__dirname}/database/src/testing/global-setup.ts`,
+  globalTeardown: `${__dirname}/database/src/testing/global-teardown.ts`,
+};
 module.exports = {
   projects: [
     { ...base, displayName: 'common', rootDir: 'common' },
-    { ...base, displayName: 'database', rootDir: 'database' },
-    { ...base, displayName: 'backend', rootDir: 'backend' },
+    { ...base, ...withDatabase, displayName: 'database', rootDir: 'database' },
+    { ...base, ...withDatabase, displayName: 'backend', rootDir: 'backend' },
     {
       ...base,
       displayName: 'frontend',
@@ -43,9 +49,13 @@ module.exports = {
     },
     {
       ...base,
+      ...withDatabase,
       displayName: 'browser',
       rootDir: 'frontend/e2e',
-      moduleNameMapper: { '^@bellgap/common/(.*)$': '<rootDir>/../../common/src/$1' },
+      moduleNameMapper: {
+        '^@bellgap/common/(.*)$': '<rootDir>/../../common/src/$1',
+        '^@bellgap/database$': '<rootDir>/../../database/src',
+      },
     },
   ],
 };
