@@ -56,7 +56,7 @@ export function text(labelOrPath: string, atMost: number) {
 }
 
 export function requiredText(label: string, atMost: number) {
-  return plainText(label, atMost).trim().required(`${label}: is needed`);
+  return plainText(label, atMost).trim(`${label}: must not begin or end with a space`).required(`${label}: is needed`);
 }
 
 export function truth(label: string) {
