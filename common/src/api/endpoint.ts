@@ -31,3 +31,6 @@ export type QueryOf<E extends EndpointDefinition> = E['query'] extends AnySchema
 export type AnswerOf<E extends EndpointDefinition> = E['answer'] extends AnySchema ? InferType<E['answer']> : undefined;
 
 export const API_PREFIX = '/api/v1';
+
+/** Header of requests that nobody asked for by hand (timed saving, polling): they do not keep a session awake. */
+export const PASSIVE_HEADER = 'X-Bellgap-Passive';

@@ -1,0 +1,29 @@
+/** Every address of the product once: the pattern that the router knows and the function that builds it. */
+export const paths = {
+  desk: { pattern: '/', to: () => '/' },
+  projects: { pattern: '/projects', to: () => '/projects' },
+  project: { pattern: '/projects/:code', to: (code: string) => `/projects/${encodeURIComponent(code)}` },
+  designBasis: {
+    pattern: '/projects/:code/basis',
+    to: (code: string) => `/projects/${encodeURIComponent(code)}/basis`,
+  },
+  specification: {
+    pattern: '/projects/:code/specifications/:number',
+    to: (code: string, number: string) =>
+      `/projects/${encodeURIComponent(code)}/specifications/${encodeURIComponent(number)}`,
+  },
+  catalogue: { pattern: '/catalogue', to: () => '/catalogue' },
+  catalogueUnit: { pattern: '/catalogue/:code', to: (code: string) => `/catalogue/${encodeURIComponent(code)}` },
+  administration: { pattern: '/administration', to: () => '/administration' },
+  account: { pattern: '/account', to: () => '/account' },
+  signIn: {
+    pattern: '/sign-in',
+    to: (back?: string) => (back && back !== '/' ? `/sign-in?back=${encodeURIComponent(back)}` : '/sign-in'),
+  },
+  invitation: { pattern: '/invitation', to: () => '/invitation' },
+} as const;
+
+/** An address inside this product to go back to; anything else leads to the desk. */
+export function safeBack(back: string | null): string {
+  return back && /^\/(?![/\\])/.test(back) ? back : paths.desk.to();
+}

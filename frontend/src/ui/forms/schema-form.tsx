@@ -1,0 +1,48 @@
+import { Alert, Button, Form } from 'antd';
+import type { FormikValues } from 'formik';
+import type { ReactNode } from 'react';
+import './forms.css';
+import type { SchemaForm } from './use-schema-form';
+
+interface SchemaFormViewProps<Values extends FormikValues> {
+  form: SchemaForm<Values>;
+  submitLabel: string;
+  /** Further acts beside the one that submits. */
+  acts?: ReactNode;
+  /** What the form is about, where no heading says it. */
+  label?: string;
+  submitDisabled?: boolean;
+  children: ReactNode;
+}
+
+/** The frame of a form: fields, what went wrong as a whole, and the acts at its foot. */
+export function SchemaFormView<Values extends FormikValues>(props: SchemaFormViewProps<Values>) {
+  const { form, submitLabel, acts, label, submitDisabled, children } = props;
+  const { formik } = form;
+  return (
+    <form
+      ref={form.element}
+      noValidate
+      aria-label={label}
+      className="schema-form"
+      onSubmit={(event) => {
+        event.preventDefault();
+        event.stopPropagation();
+        formik.handleSubmit();
+      }}
+    >
+      <Form layout="vertical" component={false} requiredMark={false}>
+        {children}
+      </Form>
+      {form.failure && (
+        <Alert type="error" showIcon title={form.failure} role="alert" className="schema-form-failure" />
+      )}
+      <div className="schema-form-acts">
+        <Button type="primary" htmlType="submit" loading={formik.isSubmitting} disabled={submitDisabled ?? false}>
+          {submitLabel}
+        </Button>
+        {acts}
+      </div>
+    </form>
+  );
+}
