@@ -6,6 +6,7 @@
 /** What a line means; the renderer gives each layer its weight and colour, in monochrome by weight and dash alone. */
 export const LAYERS = [
   'structure', // earthed steel, cross-arm
+  'hatch', // hatching of earthed steel; carries no meaning of its own
   'insulation', // discs, sheds
   'metal', // caps, pins, fittings, arcing devices
   'live', // live parts
@@ -48,7 +49,7 @@ export interface PathPrimitive extends Drawn {
   filled: boolean;
 }
 
-/** Angles in degrees, clockwise from the positive x axis (y points down). */
+/** Angles in degrees, clockwise from the positive x axis (y points down); `startDeg` is below `endDeg`. */
 export interface ArcPrimitive extends Drawn {
   kind: 'arc';
   centre: Point;
@@ -58,15 +59,17 @@ export interface ArcPrimitive extends Drawn {
   dashed: boolean;
 }
 
+/** `filled` takes the ground, `solid` the ink of the layer. */
 export interface CirclePrimitive extends Drawn {
   kind: 'circle';
   centre: Point;
   radiusMm: number;
   filled: boolean;
+  solid?: boolean;
   dashed?: boolean;
 }
 
-/** Text height is a share of the drawing's own size, so that words stay readable at every scale. */
+/** One line of words; its height is the drawing's `textHeightMm`, `at` lies on the baseline. */
 export interface TextPrimitive extends Drawn {
   kind: 'text';
   at: Point;
@@ -76,13 +79,18 @@ export interface TextPrimitive extends Drawn {
   angleDeg: number;
 }
 
-/** A dimension between two points, its line shifted by `offsetMm` to the left of the direction from -> to. */
+/**
+ * A dimension between two points, its line shifted by `offsetMm` to the left of the direction from -> to (with y
+ * downwards: going down the page, left is the positive x side). The words stand along the line on the side away from
+ * the points; `beside` sets them level next to a line that is too short to carry them.
+ */
 export interface DimensionPrimitive extends Drawn {
   kind: 'dimension';
   from: Point;
   to: Point;
   offsetMm: number;
   text: string;
+  beside?: boolean;
 }
 
 export type Primitive =

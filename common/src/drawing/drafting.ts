@@ -1,0 +1,131 @@
+import { layOutDimension } from './dimension';
+import { at, pathData, place, placeAngles, placeSegments, shift, type Segment, type Transform } from './geometry';
+import { textBox } from './text-box';
+import type { Drawing, Layer, PathPrimitive, Point, Primitive, TextPrimitive } from './primitives';
+
+/** A primitive while it is still being placed: paths as pieces, not yet as text. */
+export type Draft = Exclude<Primitive, PathPrimitive> | (Omit<PathPrimitive, 'data'> & { segments: Segment[] });
+
+function moved(t: Transform, draft: Draft): Draft {
+  switch (draft.kind) {
+    case 'line':
+    case 'dimension':
+      return { ...draft, from: place(t, draft.from), to: place(t, draft.to) };
+    case 'polyline':
+      return { ...draft, points: draft.points.map((p) => place(t, p)) };
+    case 'path':
+      return { ...draft, segments: placeSegments(t, draft.segments) };
+    case 'arc':
+      return { ...draft, centre: place(t, draft.centre), ...placeAngles(t, draft.startDeg, draft.endDeg) };
+    case 'circle':
+      return { ...draft, centre: place(t, draft.centre) };
+    case 'text':
+      return { ...draft, at: place(t, draft.at) };
+  }
+}
+
+function reach(draft: Draft, textHeightMm: number): Point[] {
+  switch (draft.kind) {
+    case 'line':
+      return [draft.from, draft.to];
+    case 'polyline':
+      return draft.points;
+    case 'path':
+      return draft.segments.flatMap((s) =>
+        s.to === 'close' ? [] : s.to === 'curve' ? [s.first, s.second, s.point] : [s.point],
+      );
+    case 'arc': {
+      const points: Point[] = [];
+      const steps = 24;
+      for (let i = 0; i <= steps; i += 1) {
+        const angle = ((draft.startDeg + ((draft.endDeg - draft.startDeg) * i) / steps) * Math.PI) / 180;
+        points.push(
+          at(draft.centre.xMm + draft.radiusMm * Math.cos(angle), draft.centre.yMm + draft.radiusMm * Math.sin(angle)),
+        );
+      }
+      return points;
+    }
+    case 'circle':
+      return [
+        at(draft.centre.xMm - draft.radiusMm, draft.centre.yMm - draft.radiusMm),
+        at(draft.centre.xMm + draft.radiusMm, draft.centre.yMm + draft.radiusMm),
+      ];
+    case 'text':
+      return textBox(draft, textHeightMm);
+    case 'dimension': {
+      const { lines, words } = layOutDimension(draft, textHeightMm);
+      return [...lines.flat(), ...textBox(words, textHeightMm)];
+    }
+  }
+}
+
+/** Collects primitives in any place, and hands them over moved to the origin with a margin. */
+export class DraftingTable {
+  private readonly drafts: Draft[] = [];
+
+  constructor(readonly textHeightMm: number) {}
+
+  add(draft: Draft, frame?: Transform): void {
+    this.drafts.push(frame ? moved(frame, draft) : draft);
+  }
+
+  path(layer: Layer, segments: Segment[], options: { filled?: boolean; about?: string; frame?: Transform } = {}): void {
+    const { filled = false, about, frame } = options;
+    if (segments.length > 0) this.add({ kind: 'path', layer, segments, filled, ...(about ? { about } : {}) }, frame);
+  }
+
+  text(layer: Layer, at: Point, text: string, anchor: TextPrimitive['anchor'] = 'start', about?: string): void {
+    this.add({ kind: 'text', layer, at, text, anchor, angleDeg: 0, ...(about ? { about } : {}) });
+  }
+
+  /** A dimension whose line is shifted along the frame's own x; the sign keeps its meaning in a mirrored frame. */
+  dimension(
+    frame: Transform,
+    from: Point,
+    to: Point,
+    shiftXMm: number,
+    text: string,
+    options: { about: string; layer?: Layer; beside?: boolean },
+  ): void {
+    const p = place(frame, from);
+    const q = place(frame, to);
+    const aim = at(frame.a * shiftXMm, frame.b * shiftXMm);
+    const leftward = (q.yMm - p.yMm) * aim.xMm - (q.xMm - p.xMm) * aim.yMm;
+    const offsetMm = leftward < 0 ? -Math.abs(shiftXMm) : Math.abs(shiftXMm);
+    const { about, layer = 'dimension', beside = false } = options;
+    this.add({ kind: 'dimension', layer, from: p, to: q, offsetMm, text, about, ...(beside ? { beside } : {}) });
+  }
+
+  bounds(): { left: number; top: number; right: number; bottom: number } {
+    const box = { left: Infinity, top: Infinity, right: -Infinity, bottom: -Infinity };
+    for (const draft of this.drafts) {
+      for (const { xMm, yMm } of reach(draft, this.textHeightMm)) {
+        box.left = Math.min(box.left, xMm);
+        box.right = Math.max(box.right, xMm);
+        box.top = Math.min(box.top, yMm);
+        box.bottom = Math.max(box.bottom, yMm);
+      }
+    }
+    return box;
+  }
+
+  finish(title: string, description: string): Drawing {
+    const { left, top, right, bottom } = this.bounds();
+    const margin = 0.6 * this.textHeightMm;
+    const home = shift(margin - left, margin - top);
+    const primitives = this.drafts.map((draft): Primitive => {
+      const at = moved(home, draft);
+      if (at.kind !== 'path') return at;
+      const { segments, ...rest } = at;
+      return { ...rest, data: pathData(segments) };
+    });
+    return {
+      title,
+      description,
+      widthMm: right - left + 2 * margin,
+      heightMm: bottom - top + 2 * margin,
+      textHeightMm: this.textHeightMm,
+      primitives,
+    };
+  }
+}

@@ -1,0 +1,202 @@
+import fc from 'fast-check';
+import type { InsulatorUnit } from '../engine/model';
+import { answer, discUnit, drawingCases, lineInput, suspensionCase } from './fixtures';
+import { allWords, boxesOverlap, drawString, outlineOf, textBox, type Drawing, type Primitive } from './index';
+
+const drawn = (drawing: Drawing | null): Drawing => {
+  if (!drawing) throw new Error('nothing was drawn');
+  return drawing;
+};
+
+function numbersOf(value: unknown): number[] {
+  if (typeof value === 'number') return [value];
+  if (Array.isArray(value)) return value.flatMap(numbersOf);
+  if (value !== null && typeof value === 'object') return Object.values(value).flatMap(numbersOf);
+  return [];
+}
+
+const coordinates = (primitive: Primitive): number[] =>
+  primitive.kind === 'path' ? (primitive.data.match(/-?\d+(\.\d+)?/g) ?? []).map(Number) : numbersOf(primitive);
+
+function overlaps(drawing: Drawing): string[] {
+  const words = allWords(drawing);
+  const boxes = words.map((w) => textBox(w, drawing.textHeightMm));
+  const found: string[] = [];
+  words.forEach((word, i) =>
+    words.slice(i + 1).forEach((other, j) => {
+      if (boxesOverlap(boxes[i]!, boxes[i + 1 + j]!)) found.push(`${word.text} | ${other.text}`);
+    }),
+  );
+  return found;
+}
+
+function outside(drawing: Drawing): string[] {
+  return allWords(drawing)
+    .filter((w) =>
+      textBox(w, drawing.textHeightMm).some(
+        (p) => p.xMm < 0 || p.yMm < 0 || p.xMm > drawing.widthMm || p.yMm > drawing.heightMm,
+      ),
+    )
+    .map((w) => w.text);
+}
+
+const heights = (data: string): [number, number] => {
+  const ys = [...data.matchAll(/-?[\d.]+ (-?[\d.]+)/g)].map((m) => Number(m[1]));
+  return [Math.min(...ys), Math.max(...ys)];
+};
+
+describe('the string to scale', () => {
+  const discs = (drawing: Drawing) =>
+    drawing.primitives.flatMap((p) => (p.kind === 'path' && p.about === 'string.units' ? [p.data] : []));
+
+  it('draws each disc once, one spacing below the other', () => {
+    const shells = discs(drawn(drawString(suspensionCase.input, suspensionCase.context, suspensionCase.evaluation)));
+    expect(shells).toHaveLength(17);
+    const tops = shells.map((data) => heights(data)[0]);
+    for (let i = 1; i < tops.length; i += 1) expect(tops[i]! - tops[i - 1]!).toBeCloseTo(170, 1);
+  });
+
+  it('draws the real diameter and the section length of n spacings', () => {
+    const drawing = drawn(drawString(suspensionCase.input, suspensionCase.context, suspensionCase.evaluation));
+    const xs = [...discs(drawing)[0]!.matchAll(/(-?[\d.]+) -?[\d.]+/g)].map((m) => Number(m[1]));
+    expect(Math.max(...xs) - Math.min(...xs)).toBeCloseTo(280, 1);
+    const section = drawing.primitives.find((p) => p.about === 'string.sectionLengthMm');
+    expect(section?.kind).toBe('dimension');
+    if (section?.kind === 'dimension') {
+      expect(section.to.yMm - section.from.yMm).toBeCloseTo(17 * 170, 6);
+      expect(section.text).toBe('17 × 170 = 2,890');
+    }
+  });
+
+  it('draws the clearance from the surface of the live part', () => {
+    const drawing = drawn(drawString(suspensionCase.input, suspensionCase.context, suspensionCase.evaluation));
+    const arc = drawing.primitives.find((p) => p.kind === 'arc' && p.layer === 'clearance');
+    const clamp = drawing.primitives.find((p) => p.kind === 'circle' && p.layer === 'live');
+    expect(arc?.kind === 'arc' && clamp?.kind === 'circle' && arc.radiusMm - clamp.radiusMm).toBeCloseTo(1900, 6);
+  });
+
+  it('lays a tension string level', () => {
+    const tension = drawingCases.find((c) => c.input.string?.arrangement === 'tension')!;
+    const drawing = drawn(drawString(tension.input, tension.context, tension.evaluation));
+    const section = drawing.primitives.find((p) => p.about === 'string.sectionLengthMm');
+    if (section?.kind !== 'dimension') throw new Error('no section length');
+    expect(section.to.xMm - section.from.xMm).toBeCloseTo(18 * 170, 6);
+    expect(section.to.yMm).toBeCloseTo(section.from.yMm, 6);
+    expect(discs(drawing)).toHaveLength(36);
+    expect(allWords(drawing).map((w) => w.text)).toContain('1 extra');
+  });
+
+  it('turns the legs of a V by their angles', () => {
+    const v = drawingCases.find((c) => c.input.string?.arrangement === 'v-suspension')!;
+    const drawing = drawn(drawString(v.input, v.context, v.evaluation));
+    const section = drawing.primitives.find((p) => p.about === 'string.sectionLengthMm');
+    if (section?.kind !== 'dimension') throw new Error('no section length');
+    const dx = section.to.xMm - section.from.xMm;
+    const dy = section.to.yMm - section.from.yMm;
+    expect(Math.hypot(dx, dy)).toBeCloseTo(2890, 6);
+    expect((Math.atan2(dx, dy) * 180) / Math.PI).toBeCloseTo(50, 6);
+    expect(discs(drawing)).toHaveLength(34);
+  });
+
+  it('draws nothing without a unit or a count', () => {
+    expect(drawString(suspensionCase.input, { insulator: null }, suspensionCase.evaluation)).toBeNull();
+    expect(
+      drawString(suspensionCase.input, suspensionCase.context, answer(discUnit(), 17, { units: null })),
+    ).toBeNull();
+    expect(
+      drawString(suspensionCase.input, suspensionCase.context, { ...suspensionCase.evaluation, string: null }),
+    ).toBeNull();
+  });
+
+  it.each(drawingCases)('keeps its words apart and inside: $name', ({ input, context, evaluation }) => {
+    for (const textScale of [1, 1.35]) {
+      const drawing = drawn(drawString(input, context, evaluation, { textScale }));
+      expect(overlaps(drawing)).toEqual([]);
+      expect(outside(drawing)).toEqual([]);
+    }
+  });
+
+  it.each([1, 2, 3, 5, 8, 12, 17, 24, 32, 40])('keeps its words apart for %i discs', (units) => {
+    for (const spacingMm of [110, 127, 146, 170, 195, 240]) {
+      const unit = discUnit({ spacingMm, diameterMm: Math.round(1.7 * spacingMm) });
+      for (const arrangement of ['suspension', 'tension', 'v-suspension'] as const) {
+        const drawing = drawn(
+          drawString(
+            lineInput({ arrangement }),
+            { insulator: unit },
+            answer(unit, units, { extraUnits: Math.min(2, units) }),
+          ),
+        );
+        expect({ spacingMm, arrangement, overlaps: overlaps(drawing) }).toEqual({
+          spacingMm,
+          arrangement,
+          overlaps: [],
+        });
+      }
+    }
+  });
+
+  it('stays finite and whole for any answer', () => {
+    const unit: fc.Arbitrary<InsulatorUnit> = fc
+      .record({
+        kind: fc.constantFrom(
+          'cap-and-pin' as const,
+          'ceramic-rod' as const,
+          'composite-rod' as const,
+          'line-post' as const,
+        ),
+        profile: fc.constantFrom(
+          'standard' as const,
+          'fog' as const,
+          'open' as const,
+          'alternating' as const,
+          'unknown' as const,
+        ),
+        spacingMm: fc.double({ min: 50, max: 8000, noNaN: true }),
+        diameterMm: fc.option(fc.double({ min: 20, max: 600, noNaN: true })),
+        dryArcMm: fc.option(fc.double({ min: 1, max: 9000, noNaN: true })),
+      })
+      .map((over) => discUnit(over));
+    const chosen = fc.record({
+      arrangement: fc.constantFrom('suspension' as const, 'v-suspension' as const, 'tension' as const, null),
+      surroundings: fc.constantFrom(
+        'cross-arm' as const,
+        'window' as const,
+        'lower-structure' as const,
+        'open' as const,
+        null,
+      ),
+      arcingDevices: fc.constantFrom('none' as const, 'horns' as const, 'rings' as const, null),
+      arcGapMm: fc.option(fc.double({ min: 1, max: 9000, noNaN: true })),
+      hardwareLengthMm: fc.option(fc.double({ min: 0, max: 3000, noNaN: true })),
+      parallelStrings: fc.option(fc.integer({ min: 1, max: 4 })),
+      vAngleWindwardDeg: fc.option(fc.double({ min: 1, max: 89, noNaN: true })),
+      vAngleLeewardDeg: fc.option(fc.double({ min: 1, max: 89, noNaN: true })),
+    });
+    const result = fc.record({
+      units: fc.option(fc.integer({ min: 1, max: 60 })),
+      extraUnits: fc.option(fc.integer({ min: 0, max: 20 })),
+      stringLengthWithFittingsMinMm: fc.option(fc.double({ min: 1, max: 20000, noNaN: true })),
+    });
+    const clearance = fc.option(fc.double({ min: 10, max: 15000, noNaN: true }));
+    fc.assert(
+      fc.property(unit, chosen, result, clearance, (insulator, string, over, phaseToEarthMm) => {
+        const base = answer(insulator, over.units ?? 1, over);
+        const evaluation = { ...base, clearances: base.clearances && { ...base.clearances, phaseToEarthMm } };
+        const drawing = drawString(lineInput(string), { insulator }, evaluation);
+        if (!drawing) return insulator.kind === 'cap-and-pin' ? over.units === null : (over.units ?? 0) > 20;
+        const numbers = [
+          drawing.widthMm,
+          drawing.heightMm,
+          drawing.textHeightMm,
+          ...drawing.primitives.flatMap(coordinates),
+        ];
+        expect(numbers.every(Number.isFinite)).toBe(true);
+        const data = drawing.primitives.map((p) => outlineOf(p, drawing.textHeightMm)?.data ?? '').join('');
+        expect(data).not.toMatch(/NaN|Infinity|e[+-]/);
+        return drawing.widthMm > 0 && drawing.heightMm > 0;
+      }),
+      { numRuns: 100 },
+    );
+  });
+});

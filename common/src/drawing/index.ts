@@ -1,0 +1,5 @@
+export * from './figures';
+export * from './path';
+export * from './primitives';
+export * from './string';
+export * from './text-box';
