@@ -1,0 +1,4 @@
+export * from './distance';
+export * from './dry-arc';
+export * from './gap-factors';
+export * from './strength';
