@@ -1,0 +1,16 @@
+import { Module, type DynamicModule } from '@nestjs/common';
+import { AuditModule } from './audit/audit.module';
+import { AuthModule } from './auth/auth.module';
+import { HealthModule } from './health/health.module';
+import { OpenApiModule } from './openapi/openapi.module';
+import { PlatformModule, type PlatformOptions } from './platform/platform.module';
+
+@Module({})
+export class AppModule {
+  static with(options: PlatformOptions): DynamicModule {
+    return {
+      module: AppModule,
+      imports: [PlatformModule.with(options), AuditModule, AuthModule, HealthModule, OpenApiModule],
+    };
+  }
+}

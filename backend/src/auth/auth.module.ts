@@ -1,0 +1,37 @@
+import { Module } from '@nestjs/common';
+import { APP_GUARD } from '@nestjs/core';
+import { JwtModule } from '@nestjs/jwt';
+import { CONFIG, type Config } from '../platform/config';
+import { AccessGuard } from './access-guard';
+import { AccountsRepository } from './accounts.repository';
+import { AuthController } from './auth.controller';
+import { AuthService } from './auth.service';
+import { HousekeepingService } from './housekeeping.service';
+import { InvitationsService } from './invitations.service';
+import { Passwords } from './passwords';
+import { SessionsRepository } from './sessions.repository';
+import { SessionsService } from './sessions.service';
+import { ThrottleService } from './throttle.service';
+
+@Module({
+  imports: [
+    JwtModule.registerAsync({
+      inject: [CONFIG],
+      useFactory: ({ sessionSecret }: Config) => ({ secret: sessionSecret, signOptions: { algorithm: 'HS256' } }),
+    }),
+  ],
+  controllers: [AuthController],
+  providers: [
+    AccountsRepository,
+    AuthService,
+    HousekeepingService,
+    InvitationsService,
+    Passwords,
+    SessionsRepository,
+    SessionsService,
+    ThrottleService,
+    { provide: APP_GUARD, useClass: AccessGuard },
+  ],
+  exports: [InvitationsService, SessionsService],
+})
+export class AuthModule {}

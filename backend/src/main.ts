@@ -1,0 +1,22 @@
+import { NestFactory } from '@nestjs/core';
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import { AppModule } from './app.module';
+import { loadConfig } from './platform/config';
+import { ConfigError } from './platform/config-values';
+import { configureApp } from './platform/configure-app';
+
+async function main(): Promise<void> {
+  const config = loadConfig(process.env);
+  const app = await NestFactory.create<NestExpressApplication>(AppModule.with({ config }), {
+    bodyParser: false,
+    logger: ['error', 'warn'],
+  });
+  configureApp(app, config);
+  await app.listen(config.port, config.host);
+  console.log(`Bellgap listens on ${await app.getUrl()}, its address is ${config.publicUrl.origin}`);
+}
+
+main().catch((error: unknown) => {
+  console.error(error instanceof ConfigError ? error.message : error);
+  process.exit(1);
+});

@@ -1,0 +1,5 @@
+import { Module } from '@nestjs/common';
+import { OpenApiController } from './openapi.controller';
+
+@Module({ controllers: [OpenApiController] })
+export class OpenApiModule {}
