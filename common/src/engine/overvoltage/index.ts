@@ -1,0 +1,2 @@
+export { insulationLevelsFor, switchingBetweenPhases, type InsulationLevelRow } from './levels';
+export { assessInsulationLevel, matchInsulationLevel, type LevelChoice, type LevelMatch } from './level-choice';
