@@ -20,7 +20,7 @@ interface DemoProject {
   lightningKv: number;
   powerFrequencyKv: number;
   faultCurrentKa: number;
-  rules: Record<string, number>;
+  rules: { unitsOutForLiveWork: number | null; maximumStringKinds: number | null };
   bases: DemoBasis[];
 }
 
@@ -39,13 +39,7 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     lightningKv: 1050,
     powerFrequencyKv: 460,
     faultCurrentKa: 31.5,
-    rules: {
-      tensionExtraUnits: 1,
-      altitudeStepM: 100,
-      maximumStringKinds: 6,
-      unitsOutToMeetCreepage: 2,
-      spareSharePercent: 3,
-    },
+    rules: { unitsOutForLiveWork: 2, maximumStringKinds: 6 },
     bases: [
       { highestVoltageKv: 220, note: 'First issue', day: '2025-06-02', state: 'superseded' },
       {
@@ -66,13 +60,7 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     lightningKv: 650,
     powerFrequencyKv: 275,
     faultCurrentKa: 31.5,
-    rules: {
-      tensionExtraUnits: 1,
-      altitudeStepM: 100,
-      maximumStringKinds: 5,
-      unitsOutToMeetCreepage: 1,
-      spareSharePercent: 3,
-    },
+    rules: { unitsOutForLiveWork: 1, maximumStringKinds: 5 },
     bases: [{ highestVoltageKv: 145, note: 'First issue', day: '2025-07-14', state: 'issued' }],
   },
   {
@@ -85,7 +73,7 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     lightningKv: 1050,
     powerFrequencyKv: 460,
     faultCurrentKa: 40,
-    rules: { tensionExtraUnits: 1, altitudeStepM: 100, sparePostsPerKind: 2 },
+    rules: { unitsOutForLiveWork: null, maximumStringKinds: null },
     bases: [{ highestVoltageKv: 245, note: 'First issue', day: '2025-08-04', state: 'issued' }],
   },
   {
@@ -98,7 +86,7 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     lightningKv: 650,
     powerFrequencyKv: 275,
     faultCurrentKa: 31.5,
-    rules: { tensionExtraUnits: 1, altitudeStepM: 100, sparePostsPerKind: 2 },
+    rules: { unitsOutForLiveWork: null, maximumStringKinds: null },
     bases: [{ highestVoltageKv: 145, note: 'First issue', day: '2025-08-04', state: 'issued' }],
   },
 ];
