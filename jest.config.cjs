@@ -19,7 +19,7 @@ const base = {
     '^@bellgap/common/(.*)$': '<rootDir>/../common/src/$1',
     '^@bellgap/database$': '<rootDir>/../database/src',
   },
-  modulePathIgnorePatterns: ['<rootDir>/dist/', '<rootDir>/dist-types/'],
+  modulePathIgnorePatterns: ['<rootDir>/dist/', '<rootDir>/dist-[a-z]+/'],
   testMatch: ['**/*.spec.ts', '**/*.spec.tsx', '**/*.e2e-spec.ts'],
 };
 

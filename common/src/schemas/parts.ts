@@ -35,8 +35,8 @@ export function oneOf<const T extends string>(labelOrPath: string, values: reado
 }
 
 /** Control and direction characters change how a line reads without being seen; they are refused at entry. */
-// eslint-disable-next-line no-control-regex
 const HIDDEN_CHARACTERS =
+  // eslint-disable-next-line no-control-regex
   /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u200b-\u200f\u202a-\u202e\u2060-\u206f\ufeff]/;
 
 export function plainText(label: string, atMost: number) {
