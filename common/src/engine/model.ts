@@ -391,7 +391,10 @@ export interface StringResult {
   uscdProvidedMmPerKv: number | null;
   scd1986RequiredMmPerKvUm: number | null;
   scd1986ProvidedMmPerKvUm: number | null;
+  /** Required on the North American basis, inches per kV of the voltage that the creepage is counted on. */
   leakageInPerKvLineToGround: number | null;
+  /** The same, of the string as it is. */
+  leakageProvidedInPerKvLineToGround?: number | null;
   sectionLengthMm: number | null;
   dryArcMm: number | null;
   dryArcRequiredMm: number | null;
@@ -482,8 +485,12 @@ export interface Evaluation {
   notAssessed: { part: string; why: string }[];
   string: StringResult | null;
   clearances: ClearancesResult | null;
-  ruleOfThumb: { rows: RuleOfThumbRow[]; bridge: { cause: string; units: number }[] | null; bridgeWhyNot: string | null };
+  ruleOfThumb: {
+    rows: RuleOfThumbRow[];
+    bridge: { cause: string; units: number }[] | null;
+    bridgeWhyNot: string | null;
+  };
   cautions: Caution[];
-  /** Absent where the asker wanted no trace. */
+  /** Empty where the asker wanted no trace. */
   trace: TraceLine[];
 }

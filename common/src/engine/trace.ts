@@ -136,6 +136,11 @@ export class Calculation {
     return value;
   }
 
+  /** Status of one row as it stands now, without noting that the answer rests on it. */
+  statusOf<Row extends object>(table: StandardTable<Row>, row: TableRow<Row>): Status {
+    return this.confirmations?.get(`${table.key}:${rowKeyOf(table, row)}`) ?? row.status;
+  }
+
   /**
    * Citation of one row of a table, with the status the row has now. A row may know some of its columns less well than
    * others; `known` then says how well those are known that were used.

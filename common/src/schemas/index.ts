@@ -5,3 +5,4 @@ export * from './company-settings';
 export * from './people';
 export * from './projects';
 export * from './specifications';
+export * from './standing-cautions';

@@ -1,0 +1,120 @@
+import { assessClearances } from './clearances';
+import { assessString } from './insulator-string';
+import { METHOD_EDITION } from './method-edition';
+import type {
+  Evaluation,
+  EvaluationContext,
+  PollutionClass,
+  SpecificationInput,
+  StringInput,
+  StringResult,
+} from './model';
+import { assessInsulationLevel, type InsulationLevelRow } from './overvoltage';
+import { isKnown } from './quantities';
+import { ruleOfThumb } from './rule-of-thumb';
+import { readSituation, type Situation } from './situation';
+import { Calculation } from './trace';
+
+const NOT_COVERED = 'Not covered by this method edition.';
+const NOT_FILLED_IN = 'Not filled in.';
+
+/** The level as a row of the tables, where the voltage lies within the method. */
+function readLevel(
+  input: SpecificationInput,
+  situation: Situation,
+  context: EvaluationContext,
+  calculation: Calculation,
+): { situation: Situation; level: InsulationLevelRow | null } {
+  if (situation.highestVoltageKv === null) return { situation, level: null };
+  const level = assessInsulationLevel(
+    {
+      highestVoltageKv: input.system?.highestVoltageKv,
+      basis: situation.basis,
+      level: input.system?.insulationLevel,
+      companyLevels: context.settings.insulationLevels,
+    },
+    calculation,
+  );
+  const refused = calculation.cautions.some(({ code }) => code === 'level-no-row');
+  return { situation: refused ? { ...situation, level: null, stopped: true } : situation, level };
+}
+
+function stringOf(
+  input: SpecificationInput,
+  string: StringInput,
+  situation: Situation,
+  context: EvaluationContext,
+  calculation: Calculation,
+): StringResult | null {
+  const unit = context.insulator;
+  if (unit === null) {
+    calculation.missing('string', 'No insulator unit is chosen.');
+    return null;
+  }
+  const rods = unit.kind === 'ceramic-rod' ? (string.rodsInSeries ?? 1) : 1;
+  const devices = { kind: string.arcingDevices ?? null, gapMm: string.arcGapMm ?? null };
+  calculation.missing('string.voltageSharing', NOT_COVERED);
+  return assessString({ input, string, situation, context, unit, rods, devices }, calculation).result;
+}
+
+/** Parts that this edition does not compute: said so where given, and where a line or a bay would need them. */
+function uncoveredParts(input: SpecificationInput, calculation: Calculation): void {
+  const line = input.kind !== 'bay';
+  const parts = [
+    ['mechanical', line],
+    ['towerHead', line],
+    ['midSpan', line],
+    ['bay', input.kind === 'bay'],
+  ] as const;
+  for (const [part, needed] of parts) {
+    if (isKnown(input[part])) calculation.missing(part, NOT_COVERED);
+    else if (needed) calculation.missing(part, NOT_FILLED_IN);
+  }
+  if (isKnown(input.system?.overvoltages)) calculation.missing('system.overvoltages', NOT_COVERED);
+  if (isKnown(input.clearance?.safetySource)) calculation.missing('clearance.safetySource', NOT_COVERED);
+}
+
+function cautionStatuses(calculation: Calculation): void {
+  if (calculation.restsOnMemory) {
+    const text = 'Some figures of this sheet are from memory, not verified; the calculation names each.';
+    calculation.caution('rests-on-memory', 'info', text);
+  }
+  for (const key of calculation.disputed) {
+    const text = `An owner of the print found that it differs from what is used here: ${key}.`;
+    calculation.caution('figure-disputed', 'acceptance', text);
+  }
+}
+
+/**
+ * One input and context in, one evaluation out. Pure: the same input, context and method edition give the same answer.
+ * Without a trace no calculation line is built.
+ */
+export function evaluate(
+  input: SpecificationInput,
+  context: EvaluationContext,
+  { trace = true }: { trace?: boolean } = {},
+): Evaluation {
+  const calculation = new Calculation(trace, context.confirmations);
+  const { situation, level } = readLevel(input, readSituation(input, calculation), context, calculation);
+  const given = input.string;
+  const string = isKnown(given) ? stringOf(input, given, situation, context, calculation) : null;
+  if (!isKnown(given) && input.kind !== 'bay') calculation.missing('string', NOT_FILLED_IN);
+  const clearances = assessClearances({ situation, level, clearance: input.clearance }, calculation);
+  const pollution = input.site?.pollution;
+  const pollutionClass: PollutionClass | null = isKnown(pollution) && 'class' in pollution ? pollution.class : null;
+  uncoveredParts(input, calculation);
+  const cards = ruleOfThumb(
+    { situation, pollutionClass, unit: context.insulator, string, clearances, settings: context.settings },
+    calculation,
+  );
+  cautionStatuses(calculation);
+  return {
+    methodEdition: METHOD_EDITION,
+    notAssessed: calculation.notAssessed,
+    string,
+    clearances,
+    ruleOfThumb: cards,
+    cautions: calculation.cautions,
+    trace: calculation.lines,
+  };
+}

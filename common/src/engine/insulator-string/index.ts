@@ -1,0 +1,1 @@
+export { assessString, type StringAssessment } from './assess';
