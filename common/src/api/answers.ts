@@ -181,7 +181,7 @@ export const specificationRowAnswer = yup
     /** Pollution class letter or contamination level. */
     pollutionSeverity: nullableText(),
     worstMarginPercent: nullableNumber(),
-    /** Worst kind of caution: info, caution, acceptance, fail, stop; null where there is none. */
+    /** Worst kind of caution: caution, acceptance, fail, stop; null where there is nothing but notes. */
     worstCaution: nullableText(),
     newerBasisRevision: nullableNumber(),
     draftedBy: nullableText(),
@@ -325,11 +325,15 @@ export const companySettingsAnswer = yup
 export const conductorAnswer = yup
   .object({
     code: words(),
-    description: words(),
+    version: number(),
+    title: words(),
+    kind: words(),
+    areaMm2: number(),
     diameterMm: number(),
-    massKgPerM: number(),
+    weightNPerM: number(),
     ratedStrengthKn: number(),
-    source: words(),
+    note: nullableText(),
+    withdrawn: flag(),
   })
   .noUnknown();
 

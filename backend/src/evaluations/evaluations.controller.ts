@@ -1,0 +1,20 @@
+import { Body, Controller } from '@nestjs/common';
+import type { BodyOf, SpecificationInput } from '@bellgap/common/api';
+import { contract } from '@bellgap/common/api';
+import { Route } from '../platform/route';
+import { EvaluationsService } from './evaluations.service';
+
+@Controller()
+export class EvaluationsController {
+  constructor(private readonly evaluations: EvaluationsService) {}
+
+  @Route(contract.evaluate)
+  evaluate(@Body() { input, trace = true }: BodyOf<typeof contract.evaluate>) {
+    return this.evaluations.evaluate(input as SpecificationInput, { trace });
+  }
+
+  @Route(contract.evaluateBatch)
+  evaluateBatch(@Body() { inputs, trace = true }: BodyOf<typeof contract.evaluateBatch>) {
+    return this.evaluations.evaluateAll(inputs as SpecificationInput[], { trace });
+  }
+}

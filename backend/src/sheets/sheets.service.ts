@@ -1,0 +1,88 @@
+import { Inject, Injectable } from '@nestjs/common';
+import type { AnswerOf, contract } from '@bellgap/common/api';
+import { AuditService } from '../audit/audit.service';
+import { Clock } from '../platform/clock';
+import { notFound } from '../platform/domain-error';
+import { KNEX, type Database } from '../platform/knex';
+import type { SignedIn } from '../platform/person';
+import type { RevisionAddress } from '../specifications/revisions.repository';
+import { SpecificationsService } from '../specifications/specifications.service';
+import { contentCodeOf, sha256Of } from './content-code';
+import { renderSheet } from './document';
+import { sheetContentOf } from './sheet-content';
+import { SheetsRepository } from './sheets.repository';
+
+export type Sheet = AnswerOf<typeof contract.drawSheet>;
+
+export interface SheetFile {
+  name: string;
+  bytes: Buffer;
+}
+
+@Injectable()
+export class SheetsService {
+  constructor(
+    @Inject(KNEX) private readonly knex: Database,
+    private readonly clock: Clock,
+    private readonly audit: AuditService,
+    private readonly specifications: SpecificationsService,
+    private readonly sheets: SheetsRepository,
+  ) {}
+
+  /** Draws the draft as it is stored. The same content gives the same bytes, and then the sheet that is kept stays. */
+  async draw(person: SignedIn, address: RevisionAddress): Promise<Sheet> {
+    // Taken first: a save that comes while the sheet is being drawn is then younger than the sheet.
+    const drawnAt = this.clock.now();
+    const revision = await this.specifications.stored(person, address);
+    const { bytes, pages } = await renderSheet(sheetContentOf(revision));
+    const sha256 = sha256Of(bytes);
+    const { lastSheet } = revision;
+    if (lastSheet?.sha256 === sha256 && lastSheet.drawnAt >= revision.savedAt) {
+      return { ...lastSheet, drawnAt: lastSheet.drawnAt.toISOString(), current: true };
+    }
+    const { input, context, evaluation } = revision;
+    const id = await this.knex.transaction(async (db) => {
+      const { methodEdition } = evaluation;
+      const sheet = {
+        revisionId: revision.id,
+        drawnAt,
+        drawnBy: person.id,
+        input,
+        context,
+        evaluation,
+        contentCode: contentCodeOf({ input, context, evaluation, methodEdition }),
+        sha256,
+        pages,
+        bytes,
+      };
+      const sheetId = await this.sheets.replaceDraft(sheet, db);
+      await this.audit.record(db, {
+        actorId: person.id,
+        action: 'sheet.drawn',
+        entity: 'sheet',
+        entityId: sheetId,
+        projectId: revision.projectId,
+        changes: { sha256: { from: lastSheet?.sha256 ?? null, to: sha256 } },
+      });
+      return sheetId;
+    });
+    return {
+      id,
+      drawnAt: drawnAt.toISOString(),
+      drawnBy: person.name,
+      pages,
+      sha256,
+      current: drawnAt >= revision.savedAt,
+    };
+  }
+
+  /** The last sheet drawn, from store, held against its hash. */
+  async file(person: SignedIn, address: RevisionAddress): Promise<SheetFile> {
+    const { number, label, state, lastSheet } = await this.specifications.stored(person, address);
+    const bytes = lastSheet && (await this.sheets.bytes(lastSheet.id));
+    if (!lastSheet || !bytes) throw notFound('sheet; draw it first');
+    if (sha256Of(bytes) !== lastSheet.sha256)
+      throw new Error(`The stored bytes of sheet ${lastSheet.id} do not match their hash`);
+    return { name: `${number}_${label}${state === 'draft' ? '_draft' : ''}.pdf`, bytes };
+  }
+}

@@ -1,0 +1,134 @@
+import { Inject, Injectable } from '@nestjs/common';
+import type { Evaluation, EvaluationContext, SpecificationInput } from '@bellgap/common/api';
+import { KNEX, type Database } from '../platform/knex';
+import type { Override } from './inheritance';
+import { listColumnsOf } from './list-columns';
+import { revisionColumns, toStoredRevision, type RevisionRow, type StoredRevision } from './revision-row';
+
+/** Where a revision is found: the label "latest" names the newest. */
+export interface RevisionAddress {
+  projectCode: string;
+  number: string;
+  label: string;
+}
+
+export interface NewSpecification {
+  projectId: string;
+  number: string;
+  title: string;
+  kind: 'line' | 'bay';
+  by: string;
+  at: Date;
+}
+
+/** What a save writes of a revision: the answer always together with what it was made from. */
+export interface RevisionContent {
+  input: SpecificationInput;
+  overrides: readonly Override[];
+  basisId: string | null;
+  context: EvaluationContext;
+  evaluation: Evaluation;
+}
+
+@Injectable()
+export class RevisionsRepository {
+  constructor(@Inject(KNEX) private readonly knex: Database) {}
+
+  async find(
+    { projectCode, number, label }: RevisionAddress,
+    { db = this.knex, forUpdate = false }: { db?: Database; forUpdate?: boolean } = {},
+  ): Promise<StoredRevision | null> {
+    const query = db('revisions as r')
+      .join('specifications as s', 's.id', 'r.specification_id')
+      .join('projects as p', 'p.id', 's.project_id')
+      .leftJoin('design_bases as b', 'b.id', 'r.basis_revision_id')
+      .leftJoin('users as saver', 'saver.id', 'r.saved_by')
+      .leftJoin('users as drafter', 'drafter.id', 'r.drafted_by')
+      .leftJoin('users as basis_author', 'basis_author.id', 'b.created_by')
+      .leftJoin('sheets as sheet', (on) => void on.on('sheet.revision_id', 'r.id').onVal('sheet.kind', 'draft'))
+      .leftJoin('users as sheet_author', 'sheet_author.id', 'sheet.drawn_by')
+      .where({ 'p.code': projectCode, 's.number': number })
+      .orderBy('r.created_at', 'desc')
+      .first<RevisionRow | undefined>(revisionColumns(db));
+    if (label !== 'latest') void query.where('r.label', label);
+    if (forUpdate) void query.forUpdate('r');
+    const row = await query;
+    return row ? toStoredRevision(row) : null;
+  }
+
+  async insertSpecification(specification: NewSpecification, db: Database): Promise<string> {
+    const [row] = await db('specifications')
+      .insert({
+        project_id: specification.projectId,
+        number: specification.number,
+        title: specification.title,
+        kind: specification.kind,
+        created_by: specification.by,
+        created_at: specification.at,
+      })
+      .returning<{ id: string }[]>('id');
+    return row!.id;
+  }
+
+  async insertRevision(
+    {
+      specificationId,
+      label,
+      by,
+      at,
+      ...content
+    }: RevisionContent & { specificationId: string; label: string; by: string; at: Date },
+    db: Database,
+  ): Promise<string> {
+    const [row] = await db('revisions')
+      .insert({
+        specification_id: specificationId,
+        label,
+        drafted_by: by,
+        created_at: at,
+        saved_by: by,
+        saved_at: at,
+        ...contentColumns(content),
+      })
+      .returning<{ id: string }[]>('id');
+    return row!.id;
+  }
+
+  async update(
+    id: string,
+    { by, at, ...content }: RevisionContent & { by: string; at: Date },
+    db: Database,
+  ): Promise<void> {
+    await db('revisions as r')
+      .where('r.id', id)
+      .update({ ...contentColumns(content), saved_by: by, saved_at: at, lock_version: db.raw('lock_version + 1') });
+  }
+
+  async rename(specificationId: string, title: string, db: Database): Promise<void> {
+    await db('specifications as s').where('s.id', specificationId).update({ title });
+  }
+}
+
+function contentColumns({ input, overrides, basisId, context, evaluation }: RevisionContent) {
+  const columns = listColumnsOf(input, context, evaluation);
+  return {
+    input: JSON.stringify(input),
+    overrides: JSON.stringify(Object.fromEntries(overrides.map(({ path, reason }) => [path, reason]))),
+    basis_revision_id: basisId,
+    context: JSON.stringify(context),
+    evaluation: JSON.stringify(evaluation),
+    method_edition: evaluation.methodEdition,
+    insulator_code: columns.insulatorCode,
+    insulator_version: columns.insulatorVersion,
+    units: columns.units,
+    governed_by: columns.governedBy,
+    highest_voltage_kv: columns.highestVoltageKv,
+    altitude_m: columns.altitudeM,
+    severity: columns.severity,
+    worst_margin_percent: columns.worstMarginPercent,
+    cautions_count: columns.cautionsCount,
+    acceptances_count: columns.acceptancesCount,
+    fails_count: columns.failsCount,
+    stops_count: columns.stopsCount,
+  };
+}

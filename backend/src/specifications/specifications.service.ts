@@ -1,0 +1,202 @@
+import { Inject, Injectable } from '@nestjs/common';
+import type { BodyOf, Evaluation, QueryOf, Revision, SpecificationInput, SpecificationRow } from '@bellgap/common/api';
+import { DRAFT_READERS, type contract } from '@bellgap/common/api';
+import { AuditService } from '../audit/audit.service';
+import { EvaluationsService } from '../evaluations/evaluations.service';
+import { Clock } from '../platform/clock';
+import { forbidden, invalid, invalidAt, newerVersion, notFound, wrongState } from '../platform/domain-error';
+import { KNEX, type Database } from '../platform/knex';
+import type { Page } from '../platform/list';
+import { mayReadDrafts, mayWriteDrafts, requireDraftReader, type SignedIn } from '../platform/person';
+import { ProjectsService } from '../projects/projects.service';
+import { inheritanceFaults, inputFromBasis, overrideCautions, takeBasisOver, type Override } from './inheritance';
+import { revisionAnswer } from './revision-answer';
+import type { StoredRevision } from './revision-row';
+import { RevisionsRepository, type RevisionAddress, type RevisionContent } from './revisions.repository';
+import { SpecificationsListQuery } from './specifications.list-query';
+import { changesBetween, sameValue } from './values';
+
+const FIRST_LABEL = 'A';
+
+type Create = BodyOf<typeof contract.createSpecification>;
+type Save = Omit<BodyOf<typeof contract.saveRevision>, 'input'> & { input: SpecificationInput };
+
+/** Specifications and their revisions: begun from the design basis, saved whole, evaluated at each save. */
+@Injectable()
+export class SpecificationsService {
+  constructor(
+    @Inject(KNEX) private readonly knex: Database,
+    private readonly clock: Clock,
+    private readonly audit: AuditService,
+    private readonly projects: ProjectsService,
+    private readonly evaluations: EvaluationsService,
+    private readonly revisions: RevisionsRepository,
+    private readonly lists: SpecificationsListQuery,
+  ) {}
+
+  async list(
+    person: SignedIn,
+    projectCode: string,
+    asked: QueryOf<typeof contract.specifications>,
+  ): Promise<Page<SpecificationRow>> {
+    const project = await this.projects.known(person, projectCode);
+    return this.lists.ofProject(project.id, asked, { drafts: mayReadDrafts(person, project.id) });
+  }
+
+  ownDrafts(person: SignedIn): Promise<SpecificationRow[]> {
+    return this.lists.draftsOf(person.id, draftProjects(person));
+  }
+
+  outdatedDrafts(person: SignedIn): Promise<SpecificationRow[]> {
+    return this.lists.outdatedDrafts(draftProjects(person));
+  }
+
+  /** What is stored of a revision, for features that build on it; 404 to who may not see it. */
+  async stored(person: SignedIn, address: RevisionAddress): Promise<StoredRevision> {
+    return this.find(person, address);
+  }
+
+  async get(person: SignedIn, address: RevisionAddress): Promise<Revision> {
+    return revisionAnswer(await this.find(person, address), person);
+  }
+
+  async create(person: SignedIn, projectCode: string, { number, title, kind }: Create): Promise<Revision> {
+    const project = await this.projects.known(person, projectCode);
+    if (!mayWriteDrafts(person, project.id)) throw forbidden();
+    await this.knex.transaction(async (db) => {
+      const basis = await this.projects.newestBasis(project.id, db);
+      if (!basis) {
+        throw invalidAt('projectCode', `${project.code} has no design basis yet; enter its voltages and level first`);
+      }
+      const at = this.clock.now();
+      const content = await this.evaluated(inputFromBasis(kind, basis), [], basis.id, db);
+      const specificationId = await this.revisions.insertSpecification(
+        { projectId: project.id, number, title, kind, by: person.id, at },
+        db,
+      );
+      const revisionId = await this.revisions.insertRevision(
+        { specificationId, label: FIRST_LABEL, by: person.id, at, ...content },
+        db,
+      );
+      await this.audit.record(db, {
+        actorId: person.id,
+        action: 'specification.created',
+        entity: 'revision',
+        entityId: revisionId,
+        projectId: project.id,
+        changes: changesBetween({}, { number, title, kind, label: FIRST_LABEL, basisRevision: basis.revision }),
+      });
+    });
+    return this.get(person, { projectCode, number, label: FIRST_LABEL });
+  }
+
+  /** Saves a draft whole. A save that changes nothing makes no new version. */
+  async save(
+    person: SignedIn,
+    address: RevisionAddress,
+    version: number,
+    { title, input, overrides }: Save,
+  ): Promise<Revision> {
+    await this.change(person, address, version, async (before, db) => {
+      if (input.kind !== before.kind)
+        throw invalidAt('input.kind', 'Kind: is chosen when a specification is begun, and stays');
+      const faults = inheritanceFaults(input, before.basis, overrides);
+      if (faults.length > 0) throw invalid(faults);
+      return { title, ...(await this.evaluated(input, overrides, before.basis?.id ?? null, db)) };
+    });
+    return this.get(person, address);
+  }
+
+  /** Pins the newest revision of the design basis and takes its values, save those that are overridden. */
+  async takeBasis(person: SignedIn, address: RevisionAddress, version: number): Promise<Revision> {
+    await this.change(person, address, version, async ({ projectId, title, input, overrides, projectCode }, db) => {
+      const basis = await this.projects.newestBasis(projectId, db);
+      if (!basis) throw wrongState(`${projectCode} has no design basis.`);
+      return { title, ...(await this.evaluated(takeBasisOver(input, basis, overrides), overrides, basis.id, db)) };
+    });
+    return this.get(person, address);
+  }
+
+  private async change(
+    person: SignedIn,
+    address: RevisionAddress,
+    version: number,
+    make: (before: StoredRevision, db: Database) => Promise<RevisionContent & { title: string }>,
+  ): Promise<void> {
+    await this.knex.transaction(async (db) => {
+      const before = await this.find(person, address, { db, forUpdate: true });
+      if (!mayWriteDrafts(person, before.projectId)) throw forbidden();
+      if (before.state !== 'draft') throw wrongState('Only a draft can be changed.');
+      if (before.lockVersion !== version) throw this.saved(before, person);
+      const { title, ...after } = await make(before, db);
+      const content = contentOf(before);
+      const isSame = title === before.title && sameValue(content, { ...after, overrides: sorted(after.overrides) });
+      if (isSame) return;
+      await this.revisions.update(before.id, { ...after, by: person.id, at: this.clock.now() }, db);
+      if (title !== before.title) await this.revisions.rename(before.specificationId, title, db);
+      await this.audit.record(db, {
+        actorId: person.id,
+        action: 'revision.saved',
+        entity: 'revision',
+        entityId: before.id,
+        projectId: before.projectId,
+        changes: changesBetween(trailOf(before.title, content), trailOf(title, after)),
+      });
+    });
+  }
+
+  private saved(standing: StoredRevision, person: SignedIn) {
+    return newerVersion({
+      current: revisionAnswer(standing, person),
+      changedBy: standing.savedBy,
+      changedAt: standing.savedAt.toISOString(),
+    });
+  }
+
+  private async find(
+    person: SignedIn,
+    address: RevisionAddress,
+    options?: { db: Database; forUpdate: boolean },
+  ): Promise<StoredRevision> {
+    const stored = await this.revisions.find(address, options);
+    if (!stored) throw notFound('specification');
+    requireDraftReader(person, stored.projectId, 'specification');
+    return stored;
+  }
+
+  private async evaluated(
+    input: SpecificationInput,
+    overrides: readonly Override[],
+    basisId: string | null,
+    db: Database,
+  ): Promise<RevisionContent> {
+    const { context, evaluation } = await this.evaluations.evaluateForStore(input, db);
+    const cautions = [...evaluation.cautions, ...overrideCautions(overrides)];
+    return { input, overrides, basisId, context, evaluation: { ...evaluation, cautions } satisfies Evaluation };
+  }
+}
+
+/** Projects of whose drafts a person may know. */
+function draftProjects({ grants }: SignedIn): 'all' | string[] {
+  const ids = grants.filter(({ role }) => DRAFT_READERS.includes(role)).map(({ projectId }) => projectId);
+  return ids.includes(null) ? 'all' : ids.filter((id) => id !== null);
+}
+
+function contentOf({ input, overrides, basis, context, evaluation }: StoredRevision): RevisionContent {
+  return { input, overrides: sorted(overrides), basisId: basis?.id ?? null, context, evaluation };
+}
+
+/** What the trail tells of a save: what a person changed, and what came out in one line. */
+function trailOf(title: string, { input, overrides, basisId, evaluation }: RevisionContent) {
+  return {
+    title,
+    input,
+    overrides: Object.fromEntries(overrides.map(({ path, reason }) => [path, reason || '(no reason)'])),
+    basisId,
+    units: evaluation.string?.units ?? null,
+  };
+}
+
+function sorted(overrides: readonly Override[]): Override[] {
+  return [...overrides].sort((one, other) => (one.path < other.path ? -1 : 1));
+}
