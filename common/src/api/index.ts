@@ -4,5 +4,4 @@ export * from './endpoint';
 export * from './errors';
 export * from './roles';
 export * from './states';
-export { METHOD_EDITION } from '../engine/method-edition';
 export type * from '../engine/model';
