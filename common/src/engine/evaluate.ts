@@ -99,7 +99,10 @@ export function evaluate(
   const given = input.string;
   const string = isKnown(given) ? stringOf(input, given, situation, context, calculation) : null;
   if (!isKnown(given) && input.kind !== 'bay') calculation.missing('string', NOT_FILLED_IN);
-  const clearances = assessClearances({ situation, level, clearance: input.clearance }, calculation);
+  const clearances = assessClearances(
+    { situation, level, clearance: input.clearance, givenHighestVoltageKv: input.system?.highestVoltageKv },
+    calculation,
+  );
   const pollution = input.site?.pollution;
   const pollutionClass: PollutionClass | null = isKnown(pollution) && 'class' in pollution ? pollution.class : null;
   uncoveredParts(input, calculation);

@@ -37,6 +37,9 @@ const KV_PER_M_BAND_RATIO = 0.1;
 /** Accepted difference of a rod's specific creepage, share of the estimate; discs may differ by one unit. */
 const CREEPAGE_BAND_RATIO = 0.1;
 
+/** Accepted difference from the suspension levels, which assume other lightning levels than IEC systems have. */
+const SUSPENSION_BAND_UNITS = 2;
+
 const ONLY_DISCS = 'The rule counts discs; the string is made of rods.';
 const NO_VOLTAGE = 'The nominal voltage is not filled in.';
 
@@ -137,7 +140,7 @@ function suspensionLevel(checked: Checked, calculation: Calculation): RuleOfThum
     estimate: why === null && outside === null ? (row?.units ?? null) : null,
     given: string?.units ?? null,
     unit: 'units',
-    band: 1,
+    band: SUSPENSION_BAND_UNITS,
     why: why ?? outside,
     source: cite(
       RUS_1724E_200,

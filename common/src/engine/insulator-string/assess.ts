@@ -66,11 +66,11 @@ function siteFactors({ situation }: StringCase, calculation: Calculation): SiteF
   const factor = (stress: 'lightning' | 'switching-phase-to-earth' | 'power-frequency', use: string): number =>
     levelAltitudeCorrection({ altitudeM, holdsToM, stress, use }, calculation);
   return {
-    lightning: level.lightningKv === null ? null : factor('lightning', 'string lightning'),
+    lightning: level.lightningKv === null ? null : factor('lightning', 'string-lightning'),
     switching:
-      level.switchingKv === null || range !== 2 ? null : factor('switching-phase-to-earth', 'string switching'),
+      level.switchingKv === null || range !== 2 ? null : factor('switching-phase-to-earth', 'string-switching'),
     powerFrequency:
-      level.powerFrequencyKv === null || range !== 1 ? null : factor('power-frequency', 'string power frequency'),
+      level.powerFrequencyKv === null || range !== 1 ? null : factor('power-frequency', 'string-power-frequency'),
   };
 }
 

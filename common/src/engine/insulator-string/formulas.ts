@@ -103,3 +103,36 @@ export const unitsInThinAir = formula({
   result: 'quotientRatio',
   compute: ({ rowUnits: n, dielectricFactor: f }: { rowUnits: number; dielectricFactor: number }) => n / f,
 });
+
+/** Creepage that a string provides. Source: definition. */
+export const providedCreepage = formula({
+  id: 'string.creepage-provided',
+  heading: 'Creepage provided',
+  source: cite(DEFINITION, 'equal units in series', 'derived'),
+  expression: 'Lp = n * c',
+  symbols: { n: 'units', c: 'creepageMm' },
+  result: 'creepageProvidedMm',
+  compute: ({ units: n, creepageMm: c }: { units: number; creepageMm: number }) => n * c,
+});
+
+/** Length of the insulating section between its fittings. Source: definition. Example: 14 discs of 146 mm, 2044 mm. */
+export const sectionLength = formula({
+  id: 'string.section-length',
+  heading: 'Section length',
+  source: cite(DEFINITION, 'equal units in series', 'derived'),
+  expression: 'Ls = n * P',
+  symbols: { n: 'units', P: 'spacingMm' },
+  result: 'sectionLengthMm',
+  compute: ({ units: n, spacingMm: P }: { units: number; spacingMm: number }) => n * P,
+});
+
+/** Specific creepage: on the voltage across the insulator, or on Um in the convention of 1986. Source: definition. */
+export const specificCreepage = formula({
+  id: 'string.specific-creepage',
+  heading: 'Specific creepage',
+  source: cite(DEFINITION, 'creepage per kV of the voltage named', 'derived'),
+  expression: 's = L / U',
+  symbols: { L: 'creepageMm', U: 'voltageKvRms' },
+  result: 'specificCreepageMmPerKv',
+  compute: ({ creepageMm: L, voltageKvRms: U }: { creepageMm: number; voltageKvRms: number }) => L / U,
+});

@@ -1,6 +1,7 @@
 import type { Criterion, CriterionResult, StringResult } from '../model';
 import { inFromMm } from '../quantities';
 import type { CreepageRequirement } from '../pollution';
+import { cite, DEFINITION } from '../sources';
 import type { Calculation } from '../trace';
 import type { StringCase } from './assess';
 import { coordination } from './coordination';
@@ -8,6 +9,7 @@ import { cautionString } from './cautions';
 import { criterionResult } from './criterion-result';
 import type { Demand } from './demand';
 import { extraUnits } from './extra-units';
+import { providedCreepage, sectionLength, specificCreepage } from './formulas';
 import { lengthLimits } from './length-limits';
 import { isDisc, stringDryArcMm } from './unit';
 import { unitsOut } from './units-out';
@@ -48,8 +50,45 @@ function leastMargin(assessed: readonly CriterionResult[]): CriterionResult[] {
   return assessed.filter((one) => one.marginPercent === least);
 }
 
-const overOrNull = (value: number | null, divisor: number | null): number | null =>
-  value === null || divisor === null ? null : value / divisor;
+function noteCount(
+  demands: readonly Demand[],
+  { before, extra, units }: { before: number | null; extra: number | null; units: number | null },
+  calculation: Calculation,
+): void {
+  if (before === null || extra === null || units === null) return;
+  calculation.note(() => {
+    const counts = demands.flatMap(({ criterion, requiredUnits }) =>
+      requiredUnits === null ? [] : [`${requiredUnits} (${criterion})`],
+    );
+    return {
+      id: 'string.units',
+      heading: 'Units in the string: the largest count, then extra units',
+      formula: counts.length === 0 ? 'n = rods in series' : 'n = max(counts) + extra',
+      substitution: counts.length === 0 ? `n = ${before}` : `n = max(${counts.join(', ')}) + ${extra}`,
+      result: units,
+      unit: 'units',
+      source: cite(DEFINITION, 'the largest count governs', 'derived'),
+    };
+  });
+}
+
+const CONVENTIONS = {
+  uscd: 'on the voltage across the insulator',
+  scd1986: 'convention of 1986, on the highest voltage line to line',
+} as const;
+
+/** Specific creepage of a length in one convention; null where either figure is not known. */
+function specific(
+  creepageMm: number | null,
+  voltageKvRms: number | null,
+  convention: keyof typeof CONVENTIONS,
+  of: 'required' | 'provided',
+  calculation: Calculation,
+): number | null {
+  if (creepageMm === null || voltageKvRms === null) return null;
+  const heading = `Specific creepage ${of}, ${CONVENTIONS[convention]}`;
+  return calculation.run(specificCreepage, { creepageMm, voltageKvRms }, { as: `${convention}-${of}`, heading });
+}
 
 /** The string and what it provides. */
 export function putTogether(given: StringCase, parts: Parts, calculation: Calculation): StringResult {
@@ -63,11 +102,14 @@ export function putTogether(given: StringCase, parts: Parts, calculation: Calcul
   const byCriterion = (criterion: Criterion): number | null =>
     demands.find((one) => one.criterion === criterion)?.requiredValue ?? null;
   const arcs = [byCriterion('lightning'), byCriterion('switching')].filter((one) => one !== null);
-  const creepageProvidedMm = units === null ? null : units * unit.creepageMm;
+  noteCount(demands, { before: unitsBeforeExtra, extra, units }, calculation);
+  const creepageProvidedMm =
+    units === null ? null : calculation.run(providedCreepage, { units, creepageMm: unit.creepageMm });
   const dryArcMm = units === null ? null : stringDryArcMm(unit, units);
   const withGap = devices.kind !== null && devices.kind !== 'none' && devices.gapMm !== null;
-  const uscdRequired = overOrNull(creepage.requiredMm, creepage.voltageKv);
-  const uscdProvided = overOrNull(creepageProvidedMm, creepage.voltageKv);
+  const uscdRequired = specific(creepage.requiredMm, creepage.voltageKv, 'uscd', 'required', calculation);
+  const uscdProvided = specific(creepageProvidedMm, creepage.voltageKv, 'uscd', 'provided', calculation);
+  const { highestVoltageKv } = situation;
   const northAmerican = situation.basis === 'north-american';
   const massKg = units === null || unit.massKg === null ? null : units * unit.massKg;
   const { parallelStrings = null, arrangement } = string;
@@ -84,11 +126,11 @@ export function putTogether(given: StringCase, parts: Parts, calculation: Calcul
     creepageVoltageBasis: creepage.voltageBasis,
     uscdRequiredMmPerKv: uscdRequired,
     uscdProvidedMmPerKv: uscdProvided,
-    scd1986RequiredMmPerKvUm: overOrNull(creepage.requiredMm, situation.highestVoltageKv),
-    scd1986ProvidedMmPerKvUm: overOrNull(creepageProvidedMm, situation.highestVoltageKv),
+    scd1986RequiredMmPerKvUm: specific(creepage.requiredMm, highestVoltageKv, 'scd1986', 'required', calculation),
+    scd1986ProvidedMmPerKvUm: specific(creepageProvidedMm, highestVoltageKv, 'scd1986', 'provided', calculation),
     leakageInPerKvLineToGround: northAmerican && uscdRequired !== null ? inFromMm(uscdRequired) : null,
     leakageProvidedInPerKvLineToGround: northAmerican && uscdProvided !== null ? inFromMm(uscdProvided) : null,
-    sectionLengthMm: units === null ? null : units * unit.spacingMm,
+    sectionLengthMm: units === null ? null : calculation.run(sectionLength, { units, spacingMm: unit.spacingMm }),
     dryArcMm,
     dryArcRequiredMm: arcs.length === 0 ? null : Math.max(...arcs),
     dryArcWithDevicesMm: withGap && dryArcMm !== null ? Math.min(devices.gapMm ?? dryArcMm, dryArcMm) : null,
