@@ -1,11 +1,16 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
+import { CatalogueModule } from './catalogue/catalogue.module';
 import { CompanySettingsModule } from './company-settings/company-settings.module';
+import { DeskModule } from './desk/desk.module';
+import { EvaluationsModule } from './evaluations/evaluations.module';
 import { HealthModule } from './health/health.module';
 import { OpenApiModule } from './openapi/openapi.module';
 import { PlatformModule, type PlatformOptions } from './platform/platform.module';
 import { ProjectsModule } from './projects/projects.module';
+import { ReferenceModule } from './reference/reference.module';
+import { SpecificationsModule } from './specifications/specifications.module';
 import { UsersModule } from './users/users.module';
 
 @Module({})
@@ -20,6 +25,11 @@ export class AppModule {
         UsersModule,
         CompanySettingsModule,
         ProjectsModule,
+        ReferenceModule,
+        CatalogueModule,
+        EvaluationsModule,
+        SpecificationsModule,
+        DeskModule,
         HealthModule,
         OpenApiModule,
       ],
