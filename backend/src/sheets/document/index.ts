@@ -1,0 +1,3 @@
+export * from './content';
+export * from './render-sheet';
+export { MissingGlyphError } from './fonts/faces';

@@ -1,0 +1,125 @@
+import { allWords, drawString, type Drawing } from '@bellgap/common/drawing';
+import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { paragraph, type Block } from '../blocks';
+import type { SheetContent } from '../content';
+import { conditions } from '../sections/conditions';
+import { notices } from '../sections/cautions';
+import { governing, requiredValues } from '../sections/required-values';
+import { runsOf } from '../fonts/faces';
+import { answerWords, plain } from '../words';
+import { Flow, type Paper, type Region } from './flow';
+import { element } from './marks';
+import { layOutTitleBlock } from './title-block';
+import type { PageGeometry } from './page';
+
+const PT_PER_MM = 72 / 25.4;
+/** Usual scales of drawings, one to so many. */
+const SCALES = [1, 2, 5, 10, 15, 20, 25, 30, 40, 50, 75, 100, 150, 200, 500] as const;
+const TEXT_PT = 6.8;
+const GUTTER = 14;
+
+interface Fitted {
+  drawing: Drawing;
+  scale: number;
+}
+
+/** The largest usual scale at which the drawing, with its words at a readable size, fits into a box. */
+export function fitDrawing(content: SheetContent, widthPt: number, heightPt: number): Fitted | null {
+  const draw = (textScale: number): Drawing | null =>
+    drawString(content.input, content.context, content.evaluation, { textScale });
+  const plainDrawing = draw(1);
+  if (!plainDrawing) return null;
+  const [widthMm, heightMm] = [widthPt / PT_PER_MM, heightPt / PT_PER_MM];
+  const least = Math.max((0.7 * plainDrawing.widthMm) / widthMm, (0.7 * plainDrawing.heightMm) / heightMm);
+  for (const scale of SCALES) {
+    if (scale < least) continue;
+    const textScale = ((TEXT_PT / PT_PER_MM) * scale) / plainDrawing.textHeightMm;
+    const drawing = draw(textScale);
+    if (drawing && drawing.widthMm <= scale * widthMm && drawing.heightMm <= scale * heightMm)
+      return { drawing, scale };
+  }
+  return null;
+}
+
+/** Head, drawing beside or above the values, title block; gives back the blocks that found no room. */
+export function layOutFirstPage(paper: Paper, geometry: PageGeometry, content: SheetContent, body: Region): Block[] {
+  const blockTop = geometry.frame.y + geometry.frame.height - geometry.footHeight - geometry.titleBlockHeight;
+  const region = { ...body, bottom: blockTop - 6 };
+  const flow = new Flow(paper, region, 0, null);
+  flow.place(headBlocks(content));
+
+  const values = requiredValues(content);
+  const circumstances = conditions(content);
+  const wide = isWide(content);
+  const half = (region.width - GUTTER) / 2;
+  const rest: Block[] = [];
+  let scale = '–';
+  if (wide) {
+    const fitted = fitDrawing(content, region.width, 0.42 * flow.room);
+    if (fitted) scale = placeDrawing(paper, fitted, region.x, flow.y, region.width, false);
+    const drawn = fitted ? (fitted.drawing.heightMm / fitted.scale) * PT_PER_MM : 0;
+    const top = flow.y + drawn + 6;
+    const left = new Flow(paper, { x: region.x, width: half, top, bottom: region.bottom }, 0, null);
+    rest.push(...left.place(values));
+    const right = new Flow(paper, { x: region.x + half + GUTTER, width: half, top, bottom: region.bottom }, 0, null);
+    rest.push(...right.place(circumstances));
+  } else {
+    const drawingWidth = 0.5 * region.width;
+    const fitted = fitDrawing(content, drawingWidth, flow.room);
+    if (fitted) scale = placeDrawing(paper, fitted, region.x, flow.y, drawingWidth, true);
+    const x = fitted ? region.x + drawingWidth + GUTTER : region.x;
+    const width = region.x + region.width - x;
+    const column = new Flow(paper, { x, width, top: flow.y, bottom: region.bottom }, 0, null);
+    rest.push(...column.place([...values, ...circumstances]));
+  }
+  layOutTitleBlock(paper, geometry, content, scale);
+  return rest;
+}
+
+function headBlocks(content: SheetContent): Block[] {
+  const { input, context, evaluation } = content;
+  const unit = context.insulator;
+  const blocks: Block[] = [
+    paragraph(answerWords(input, evaluation, unit?.code ?? null), { face: 'semibold', size: 18 }),
+  ];
+  if (unit && input.string) {
+    const { arrangement, parallelStrings } = input.string;
+    const strings = parallelStrings && parallelStrings > 1 ? `${parallelStrings} strings in parallel` : 'single string';
+    blocks.push(
+      paragraph(
+        [
+          arrangement ? CHOICE_LABELS.arrangement[arrangement] : 'Arrangement not stated',
+          strings,
+          `${plain(unit.failingLoadKn)} kN`,
+          unit.coupling ? `coupling ${unit.coupling}` : 'coupling not stated',
+        ].join(', '),
+        { tone: 'soft' },
+      ),
+    );
+  }
+  blocks.push(...governing(content));
+  const items = notices(content);
+  if (items.length > 0) blocks.push({ kind: 'notice', items });
+  return blocks;
+}
+
+function isWide({ input, context, evaluation }: SheetContent): boolean {
+  const drawing = drawString(input, context, evaluation);
+  return drawing !== null && drawing.widthMm > 1.15 * drawing.heightMm;
+}
+
+function placeDrawing(
+  paper: Paper,
+  { drawing, scale }: Fitted,
+  x: number,
+  y: number,
+  width: number,
+  atLeft: boolean,
+): string {
+  for (const { text } of allWords(drawing)) runsOf(text, 'mono');
+  const pointsPerMm = PT_PER_MM / scale;
+  const shift = atLeft ? 0 : (width - drawing.widthMm * pointsPerMm) / 2;
+  const figure = element('Figure', 0, [{ kind: 'drawing', x: x + shift, y, pointsPerMm, drawing }]);
+  paper.elements.push({ ...figure, alt: `${drawing.title}. ${drawing.description}`, title: drawing.title });
+  return `1 : ${scale}`;
+}

@@ -1,0 +1,258 @@
+import type { Block, Heading, List, Notice, Pairs, Paragraph } from '../blocks';
+import { widthOf } from '../fonts/faces';
+import { wrap } from '../fonts/wrap';
+import { COLOURS, element, type Element, type Mark } from './marks';
+import { layOutTable } from './table';
+import { LEADING, textMarks } from './text';
+
+/** A column of a page that blocks run down. */
+export interface Region {
+  x: number;
+  width: number;
+  top: number;
+  bottom: number;
+}
+
+export interface Paper {
+  artifacts: { behind: Mark[]; before: Mark[] }[];
+  elements: Element[];
+}
+
+const BODY_SIZE = 8.5;
+const NOTE_SIZE = 7;
+const HEADING = { 1: { size: 12.5, before: 16, after: 5 }, 2: { size: 9, before: 9, after: 3 } } as const;
+/** A heading stands with at least this much of what it heads. */
+const KEEP_PT = 46;
+
+/** Runs blocks down a region and, where allowed, over as many pages as they need. */
+export class Flow {
+  y: number;
+  page: number;
+
+  constructor(
+    readonly paper: Paper,
+    readonly region: Region,
+    page: number,
+    /** Region of each following page; none where the blocks must stay on theirs. */
+    private readonly following: Region | null,
+  ) {
+    this.y = region.top;
+    this.page = page;
+    this.here = region;
+  }
+
+  here: Region;
+
+  get room(): number {
+    return this.here.bottom - this.y;
+  }
+
+  /** Makes room for a height; false where it does not fit and no page may follow. */
+  reserve(height: number): boolean {
+    if (height <= this.room) return true;
+    if (!this.following) return false;
+    if (this.y <= this.here.top) return true;
+    this.page += 1;
+    while (this.paper.artifacts.length <= this.page) this.paper.artifacts.push({ behind: [], before: [] });
+    this.here = this.following;
+    this.y = this.following.top;
+    return true;
+  }
+
+  add(item: Element): void {
+    this.paper.elements.push(item);
+  }
+
+  artifact(mark: Mark, where: 'behind' | 'before' = 'before'): void {
+    this.paper.artifacts[this.page]?.[where].push(mark);
+  }
+
+  /** Places the blocks in order; those that found no room are given back. */
+  place(blocks: Block[]): Block[] {
+    for (let i = 0; i < blocks.length; i += 1) {
+      const block = blocks[i]!;
+      const rest = this.placeOne(block, blocks[i + 1]);
+      if (rest) return [rest, ...blocks.slice(i + 1)];
+    }
+    return [];
+  }
+
+  /** Null where the whole block is placed, else what is left of it. */
+  private placeOne(block: Block, next: Block | undefined): Block | null {
+    switch (block.kind) {
+      case 'heading':
+        return this.heading(block, next);
+      case 'paragraph':
+        return this.paragraph(block);
+      case 'pairs':
+        return this.pairs(block);
+      case 'list':
+        return this.list(block);
+      case 'notice':
+        return this.notice(block);
+      case 'table':
+        return layOutTable(this, block);
+    }
+  }
+
+  private heading(block: Heading, next: Block | undefined): Block | null {
+    const { size, before, after } = HEADING[block.level];
+    const lines = wrap(block.text, 'semibold', size, this.here.width);
+    const height = before + lines.length * size * LEADING + after;
+    if (!this.reserve(height + (next ? KEEP_PT : 0))) return block;
+    if (this.y > this.here.top) this.y += before;
+    const marks: Mark[] = [];
+    const top = this.y;
+    for (const text of lines) {
+      marks.push(...textMarks(text, this.here.x, this.y, this.here.width, { face: 'semibold', size }));
+      this.y += size * LEADING;
+    }
+    this.y += after;
+    const placed = element(block.level === 1 ? 'H1' : 'H2', this.page, marks);
+    this.add(block.level === 1 ? { ...placed, bookmark: { title: block.text, y: top - 6 } } : placed);
+    return null;
+  }
+
+  private paragraph(block: Paragraph): Block | null {
+    const size = block.size ?? BODY_SIZE;
+    const face = block.face ?? 'sans';
+    const lines = wrap(block.text, face, size, this.here.width);
+    if (!this.reserve(Math.min(3, lines.length) * size * LEADING)) return block;
+    let marks: Mark[] = [];
+    for (const text of lines) {
+      const page = this.page;
+      this.reserve(size * LEADING);
+      if (this.page !== page && marks.length > 0) {
+        this.add(element('P', page, marks));
+        marks = [];
+      }
+      marks.push(...textMarks(text, this.here.x, this.y, this.here.width, { face, size, tone: block.tone ?? 'ink' }));
+      this.y += size * LEADING;
+    }
+    this.add(element('P', this.page, marks));
+    this.y += 3;
+    return null;
+  }
+
+  private pairs(block: Pairs): Block | null {
+    const size = BODY_SIZE;
+    const table = element('Table', this.page);
+    table.title = 'Labels and values';
+    this.add(table);
+    for (let i = 0; i < block.rows.length; i += 1) {
+      const row = block.rows[i]!;
+      const labelWidth = this.here.width * (block.labelShare ?? 0.4) - 6;
+      const valueWidth = this.here.width - labelWidth - 6;
+      const labels = wrap(row.label, row.strong ? 'semibold' : 'sans', size, labelWidth);
+      const mono = /^[−\d]/.test(row.value);
+      const face = mono ? 'mono' : row.strong ? 'semibold' : 'sans';
+      const values = wrap(row.value, face, size, valueWidth);
+      const lastWidth = widthOf(values[values.length - 1] ?? '', face) * size;
+      const noteWidth = row.note ? widthOf(row.note, 'sans') * NOTE_SIZE : 0;
+      const beside = row.note !== undefined && lastWidth + 5 + noteWidth <= valueWidth;
+      const notes = row.note && !beside ? wrap(row.note, 'sans', NOTE_SIZE, valueWidth) : [];
+      const lines = Math.max(labels.length, values.length);
+      const height = lines * size * LEADING + notes.length * NOTE_SIZE * LEADING + 2.6;
+      if (!this.reserve(height)) return { ...block, rows: block.rows.slice(i) };
+      const x = this.here.x;
+      const top = this.y + 1;
+      const label = labels.flatMap((text, line) =>
+        textMarks(text, x, top + line * size * LEADING, labelWidth, {
+          face: row.strong ? 'semibold' : 'sans',
+          size,
+          tone: row.strong ? 'ink' : 'soft',
+        }),
+      );
+      const valueX = x + labelWidth + 6;
+      const value = values.flatMap((text, line) =>
+        textMarks(text, valueX, top + line * size * LEADING, valueWidth, { face, size }),
+      );
+      if (row.note && beside) {
+        const noteTop = top + (values.length - 1) * size * LEADING + (size - NOTE_SIZE);
+        value.push(
+          ...textMarks(row.note, valueX + lastWidth + 5, noteTop, noteWidth, {
+            face: 'sans',
+            size: NOTE_SIZE,
+            tone: 'soft',
+          }),
+        );
+      }
+      notes.forEach((text, line) => {
+        const noteTop = top + values.length * size * LEADING + line * NOTE_SIZE * LEADING;
+        value.push(...textMarks(text, valueX, noteTop, valueWidth, { face: 'sans', size: NOTE_SIZE, tone: 'soft' }));
+      });
+      table.children.push(
+        element('TR', this.page, [], [element('TH', this.page, label), element('TD', this.page, value)]),
+      );
+      this.y += height;
+      this.artifact({
+        kind: 'rule',
+        x,
+        y: this.y,
+        toX: x + this.here.width,
+        toY: this.y,
+        weight: 0.35,
+        colour: COLOURS.hair,
+      });
+    }
+    this.y += 3;
+    return null;
+  }
+
+  private list(block: List): Block | null {
+    const size = BODY_SIZE;
+    const indent = 16;
+    const list = element('L', this.page);
+    this.add(list);
+    for (let i = 0; i < block.items.length; i += 1) {
+      const item = block.items[i]!;
+      const lines = wrap(item.text, item.face ?? 'sans', size, this.here.width - indent);
+      const height = lines.length * size * LEADING + 2.5;
+      if (!this.reserve(height)) return { ...block, items: block.items.slice(i) };
+      const marks = textMarks(String(i + 1), this.here.x, this.y, indent - 5, {
+        face: 'mono',
+        size: size - 1,
+        tone: 'soft',
+        align: 'right',
+      });
+      lines.forEach((text, line) => {
+        const top = this.y + line * size * LEADING;
+        marks.push(...textMarks(text, this.here.x + indent, top, this.here.width, { face: item.face ?? 'sans', size }));
+      });
+      list.children.push(element('LI', this.page, [], [element('LBody', this.page, marks)]));
+      this.y += height;
+    }
+    return null;
+  }
+
+  private notice(block: Notice): Block | null {
+    const size = BODY_SIZE;
+    const inset = 6;
+    const width = this.here.width - 2 * inset;
+    const markWidth = Math.max(0, ...block.items.map(({ mark }) => widthOf(mark, 'semibold') * size)) + 8;
+    const rows = block.items.map(({ mark, text }) => ({ mark, lines: wrap(text, 'sans', size, width - markWidth) }));
+    const height = rows.reduce((sum, { lines }) => sum + lines.length * size * LEADING, 0) + 2 * inset - 2;
+    if (!this.reserve(height)) return block;
+    const box: Mark = {
+      kind: 'box',
+      x: this.here.x,
+      y: this.y,
+      width: this.here.width,
+      height,
+      weight: 0.8,
+      stroke: COLOURS.ink,
+    };
+    this.artifact(box);
+    let top = this.y + inset - 1;
+    for (const { mark, lines } of rows) {
+      const marks = textMarks(mark, this.here.x + inset, top, markWidth, { face: 'semibold', size });
+      for (const text of lines) {
+        marks.push(...textMarks(text, this.here.x + inset + markWidth, top, width, { face: 'sans', size }));
+        top += size * LEADING;
+      }
+      this.add(element('P', this.page, marks));
+    }
+    this.y += height + 6;
+    return null;
+  }
+}

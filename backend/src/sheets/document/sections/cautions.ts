@@ -1,0 +1,61 @@
+import type { Severity } from '@bellgap/common/api';
+import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
+import { cell, heading, paragraph, type Block } from '../blocks';
+import type { SheetContent } from '../content';
+
+const ORDER: Severity[] = ['stop', 'fail', 'acceptance', 'caution', 'info'];
+
+const MEANING: Partial<Record<Severity, string>> = {
+  stop: 'outside the method: no figure',
+  fail: 'a requirement is not met',
+  acceptance: 'to be accepted by the approver, with a reason',
+};
+
+/** Cautions of this sheet, the heaviest first. */
+export function cautions({ evaluation }: SheetContent): Block[] {
+  const head = heading(1, 'Cautions, acceptances, stops');
+  if (evaluation.cautions.length === 0) return [head, paragraph('None.', { tone: 'soft' })];
+  const rows = [...evaluation.cautions].sort(
+    (one, other) => ORDER.indexOf(one.severity) - ORDER.indexOf(other.severity),
+  );
+  return [
+    head,
+    {
+      kind: 'table',
+      summary: 'Cautions, acceptances and stops of this sheet',
+      columns: [
+        { head: 'kind', share: 1.1 },
+        { head: 'what', share: 5.4 },
+        { head: 'concerns', share: 1.7 },
+      ],
+      rows: rows.map((row) => ({
+        cells: [
+          { lines: [{ text: CHOICE_LABELS.severity[row.severity], face: 'semibold' as const }] },
+          cell(row.text),
+          cell(row.field ? (fieldOf(row.field)?.label ?? '–') : '–', { tone: 'soft' }),
+        ],
+      })),
+    },
+  ];
+}
+
+/** What stands at the head of the sheet, in words. */
+export function notices({ evaluation, state }: SheetContent): { mark: string; text: string }[] {
+  const items: { mark: string; text: string }[] = [];
+  for (const severity of ['stop', 'fail', 'acceptance'] as const) {
+    const found = evaluation.cautions.filter((caution) => caution.severity === severity);
+    if (found.length > 0)
+      items.push({
+        mark: `${found.length} ${CHOICE_LABELS.severity[severity].toLowerCase()}`,
+        text: MEANING[severity] ?? '',
+      });
+  }
+  const memory = evaluation.trace.filter(({ source }) => source.status === 'memory').length;
+  if (memory > 0)
+    items.push({
+      mark: 'memory',
+      text: `${memory} of ${evaluation.trace.length} lines of the calculation rest on figures from memory, not verified`,
+    });
+  if (state === 'draft') items.push({ mark: 'draft', text: 'not for ordering, not for construction' });
+  return items;
+}

@@ -1,0 +1,86 @@
+import type { ClearanceRow } from '@bellgap/common/api';
+import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { cell, figures, heading, paragraph, type Block, type Row } from '../blocks';
+import type { SheetContent } from '../content';
+import { citation, DISTANCE_WORDS, near, plain, SHAPE_WORDS, statusWords, STRESS_WORDS, up, withUnit } from '../words';
+
+const KINDS: ClearanceRow['distance'][] = ['phase-to-earth', 'phase-to-phase', 'section', 'safety'];
+
+/** Distances by kind, each kind a block of its own: none is ever used for another. */
+export function clearances({ evaluation }: SheetContent): Block[] {
+  const answer = evaluation.clearances;
+  const blocks: Block[] = [heading(1, 'Clearances')];
+  if (!answer) return [...blocks, paragraph('Not assessed.', { tone: 'soft' })];
+  blocks.push(
+    paragraph(
+      `Method: ${answer.method ? CHOICE_LABELS.clearanceMethod[answer.method] : 'not chosen'}. ` +
+        'Distances to earth, between phases, to ground and for people are different things: none is used for another.',
+      { tone: 'soft' },
+    ),
+  );
+  for (const kind of KINDS) {
+    const rows = answer.rows.filter((row) => row.distance === kind);
+    if (rows.length === 0) {
+      if (kind === 'safety')
+        blocks.push(heading(2, DISTANCE_WORDS.safety), paragraph('Not covered by this sheet: the local rule decides.'));
+      continue;
+    }
+    blocks.push(heading(2, DISTANCE_WORDS[kind]), {
+      kind: 'table',
+      summary: DISTANCE_WORDS[kind],
+      columns: [
+        { head: 'method', share: 2 },
+        { head: 'stress', share: 1.3 },
+        { head: 'shape', share: 1.7 },
+        { head: 'withstand, kV', share: 1.2, align: 'right' },
+        { head: 'altitude factor', share: 1.2, align: 'right' },
+        { head: 'needed', share: 1.2, align: 'right' },
+        { head: 'source', share: 3 },
+      ],
+      rows: rows.map(clearanceRow),
+    });
+  }
+  return [...blocks, ...coordination(evaluation.string?.coordination)];
+}
+
+function clearanceRow(row: ClearanceRow): Row {
+  const value = row.withinSource ? withUnit(up(row.valueMm), 'mm') : 'outside source';
+  const method = CHOICE_LABELS.clearanceMethod[row.method];
+  return {
+    governs: row.governs,
+    cells: [
+      cell(row.governs ? `${method}, governs` : method),
+      cell(STRESS_WORDS[row.stress] ?? row.stress),
+      cell(row.shape === null ? '–' : (SHAPE_WORDS[row.shape] ?? row.shape)),
+      figures(plain(row.withstandKv)),
+      figures(near(row.altitudeFactor, 3)),
+      figures(value),
+      cell(`${citation(row.source)}; ${statusWords(row.source)}${row.interpolated ? '; interpolated' : ''}`, {
+        tone: 'soft',
+      }),
+    ],
+  };
+}
+
+function coordination(answer: NonNullable<SheetContent['evaluation']['string']>['coordination'] | undefined): Block[] {
+  if (!answer) return [];
+  return [
+    heading(2, 'String against its surroundings'),
+    {
+      kind: 'pairs',
+      labelShare: 0.4,
+      rows: [
+        { label: 'Shortest arc of the string', value: withUnit(near(answer.shortestArcMm), 'mm') },
+        {
+          label: 'External clearance needed, 1.1 times that arc',
+          value: withUnit(up(answer.requiredExternalMm), 'mm'),
+        },
+        {
+          label: 'External clearance provided',
+          value: answer.providedExternalMm === null ? 'not stated' : `${plain(answer.providedExternalMm)} mm`,
+          note: CHOICE_LABELS.verdict[answer.verdict].toLowerCase(),
+        },
+      ],
+    },
+  ];
+}

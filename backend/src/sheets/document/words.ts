@@ -1,0 +1,103 @@
+import type { ClearanceRow, Evaluation, SourceReference, SpecificationInput } from '@bellgap/common/api';
+import { figure } from '@bellgap/common/drawing';
+import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
+
+export const NOT_STATED = 'not stated';
+export const UNKNOWN = '–';
+
+/** Binary dust would push an exact figure over the edge of the digit it is rounded at. */
+const withoutDust = (value: number): number => Math.round(value * 1e9) / 1e9;
+const rounded = (value: number, decimals: number, turn: (value: number) => number): string => {
+  const power = 10 ** decimals;
+  return figure(turn(withoutDust(value * power)) / power, decimals);
+};
+
+/** Requirements go up, what is provided and margins go down. */
+export const up = (value: number | null | undefined, decimals = 0): string =>
+  value === null || value === undefined ? UNKNOWN : rounded(value, decimals, Math.ceil);
+export const down = (value: number | null | undefined, decimals = 0): string =>
+  value === null || value === undefined ? UNKNOWN : rounded(value, decimals, Math.floor);
+export const near = (value: number | null | undefined, decimals = 0): string =>
+  value === null || value === undefined ? UNKNOWN : rounded(value, decimals, Math.round);
+
+/** A figure as it was entered or printed in a table: no digit more, none less. */
+export function plain(value: number | null | undefined): string {
+  if (value === null || value === undefined) return UNKNOWN;
+  const text = String(Number(Math.abs(value).toPrecision(10)));
+  const decimals = /^\d+\.(\d+)$/.exec(text)?.[1]?.length ?? 0;
+  return /^\d+(\.\d+)?$/.test(text) ? figure(value, decimals) : String(value);
+}
+
+/** A figure with its unit, or the words for a missing one. */
+export const withUnit = (text: string, unit: string): string =>
+  text === UNKNOWN || unit === '' ? text : `${text} ${unit}`;
+
+export function citation({ document, edition, clause }: SourceReference): string {
+  const named = edition && edition !== '-' ? `${document}:${edition}` : document;
+  return clause && clause !== '-' ? `${named}, ${clause}` : named;
+}
+
+export const statusWords = ({ status }: SourceReference): string => CHOICE_LABELS.status[status];
+
+/** Label of a choice; null is said, never left blank. */
+export function choice(list: Record<string, string>, value: string | number | null | undefined): string {
+  return value === null || value === undefined ? NOT_STATED : (list[String(value)] ?? String(value));
+}
+
+export function valueAt(root: unknown, path: string): unknown {
+  return path
+    .split('.')
+    .reduce<unknown>(
+      (value, key) =>
+        typeof value === 'object' && value !== null ? (value as Record<string, unknown>)[key] : undefined,
+      root,
+    );
+}
+
+const CHOICES = CHOICE_LABELS as Record<string, Record<string, string>>;
+
+/** Any input as words with its unit: numbers, choices, and an insulation level as one row. */
+export function inputWords(path: string, value: unknown): string {
+  if (value === null || value === undefined) return NOT_STATED;
+  if (typeof value === 'number') return withUnit(plain(value), fieldOf(path)?.unit ?? '');
+  if (typeof value === 'object') {
+    return Object.entries(value)
+      .filter(([, part]) => part !== null && part !== undefined)
+      .map(([key, part]) => {
+        const field = `${path}.${key}`;
+        return `${fieldOf(field)?.label ?? key}: ${inputWords(field, part)}`;
+      })
+      .join('; ');
+  }
+  const name = path.split('.').pop() ?? path;
+  return CHOICES[name]?.[String(value)] ?? String(value);
+}
+
+export const DISTANCE_WORDS: Record<ClearanceRow['distance'], string> = {
+  'phase-to-earth': 'Distance from phase to earth',
+  'phase-to-phase': 'Distance between phases',
+  section: 'Section distance',
+  safety: 'Safety distance for people',
+};
+
+export const STRESS_WORDS: Record<string, string> = {
+  lightning: 'lightning',
+  switching: 'switching',
+  'power-frequency': 'power frequency',
+};
+
+export const SHAPE_WORDS: Record<string, string> = {
+  'rod-structure': 'rod to structure',
+  'conductor-structure': 'conductor to structure',
+  'rod-conductor': 'rod to conductor',
+  'conductor-conductor': 'conductor to conductor',
+};
+
+/** "17 units G160-S"; words where no count is known. */
+export function answerWords(input: SpecificationInput, evaluation: Evaluation, code: string | null): string {
+  const units = evaluation.string?.units;
+  if (input.kind === 'bay') return 'Substation bay';
+  if (!code) return 'No insulator unit chosen';
+  if (units === null || units === undefined) return `${code}: no count`;
+  return `${units} ${units === 1 ? 'unit' : 'units'} ${code}`;
+}
