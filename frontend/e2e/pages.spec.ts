@@ -1,0 +1,50 @@
+import path from 'node:path';
+import type { Browser } from 'playwright-core';
+import { ROLES, type Role } from '@bellgap/common/api';
+import { startProduct, type ProductProcess } from '../../backend/test/support/product-process';
+import { paths } from '../src/app/paths';
+import { DESKTOP, PHONE, launchBrowser, type Viewport } from './support/browser';
+import { SIGNED_IN_STOPS, SIGNED_OUT_STOPS } from './support/routes';
+import { walk } from './support/walk';
+
+/** SHOTS=all walks everything and keeps the pictures; the ordinary run walks one role in one theme. */
+const EVERYTHING = process.env.SHOTS === 'all';
+const FOLDER = EVERYTHING ? path.join(__dirname, '../../shots') : null;
+
+const VIEWPORTS: readonly Viewport[] = [DESKTOP, PHONE];
+const THEMES: readonly ('light' | 'dark')[] = EVERYTHING ? ['light', 'dark'] : ['light'];
+const WALKERS: readonly (Role | null)[] = EVERYTHING ? [null, ...ROLES] : [null, 'engineer'];
+
+describe('pages', () => {
+  let product: ProductProcess;
+  let browser: Browser;
+
+  beforeAll(async () => {
+    product = await startProduct();
+    browser = await launchBrowser();
+  }, 120_000);
+
+  afterAll(async () => {
+    await browser?.close();
+    await product?.stop();
+  });
+
+  it('are all on the list that is walked', () => {
+    const walked = new Set([...SIGNED_IN_STOPS, ...SIGNED_OUT_STOPS].map(({ route }) => route));
+    expect(Object.keys(paths).filter((route) => !walked.has(route as keyof typeof paths))).toEqual([]);
+  });
+
+  for (const role of WALKERS) {
+    for (const viewport of VIEWPORTS) {
+      for (const theme of THEMES) {
+        it(
+          `of ${role ?? 'a stranger'} at ${viewport.widthPx} px, ${theme}: no complaint, no sideways scroll, accessible`,
+          async () => {
+            expect(await walk(browser, { url: product.url, role, viewport, theme, folder: FOLDER })).toEqual([]);
+          },
+          300_000,
+        );
+      }
+    }
+  }
+});
