@@ -39,8 +39,8 @@ clean: stop
 
 node:
 	@command -v node >/dev/null || { echo 'Node.js is missing: version 20.19 or newer is needed.' >&2; exit 1; }
-	@node -e 'const [a, b] = process.versions.node.split(".").map(Number); \
-	  if (a < 20 || (a === 20 && b < 19)) { console.error(`Node.js 20.19 or newer is needed, this is $${process.version}.`); process.exit(1); }'
+	@node -e 'const [a, b] = process.versions.node.split("."); process.exit(a > 20 || (a == 20 && b >= 19) ? 0 : 1)' || \
+	  { echo "Node.js 20.19 or newer is needed; this is $$(node -v)." >&2; exit 1; }
 
 postgresql: node
 	@database/scripts/debian.sh postgresql
@@ -53,7 +53,7 @@ packages: node
 
 build: packages
 	@node_modules/.bin/tsc -b backend
-	@$(MAKE) frontend/dist/index.html
+	@$(MAKE) -s frontend/dist/index.html
 
 # Folders are among the sources, so that a file taken out is noticed too. The old build is served until the new one stands.
 frontend/dist/index.html: $(shell find frontend/src frontend/public common/src -not -name '*.spec.ts*' 2>/dev/null) \
