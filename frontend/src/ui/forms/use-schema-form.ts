@@ -10,6 +10,8 @@ interface SchemaFormOptions<Values extends FormikValues> {
   toBody?: (values: Values) => unknown;
   /** Sends the body that the schema has read; an ApiError goes to its fields or to the foot of the form. */
   submit: (body: never, values: Values) => Promise<unknown>;
+  /** Fetches what somebody else saved meanwhile, so that the next attempt is made from it. */
+  newerVersion?: () => Promise<unknown>;
 }
 
 interface ServerFault {
@@ -22,7 +24,7 @@ export type SchemaForm<Values extends FormikValues> = ReturnType<typeof useSchem
 
 /** A form over one of the shared schemas: the same rules as on the server, errors beside their fields, nothing lost. */
 export function useSchemaForm<Values extends FormikValues>(options: SchemaFormOptions<Values>) {
-  const { schema, initialValues, toBody = (values: Values) => values, submit } = options;
+  const { schema, initialValues, toBody = (values: Values) => values, submit, newerVersion } = options;
   const [serverFaults, setServerFaults] = useState<Record<string, ServerFault>>({});
   const [failure, setFailure] = useState<string | null>(null);
   const element = useRef<HTMLFormElement>(null);
@@ -62,6 +64,9 @@ export function useSchemaForm<Values extends FormikValues>(options: SchemaFormOp
               ),
             );
           setAttempt((count) => count + 1);
+        } else if (error instanceof ApiError && error.code === 'newer-version' && newerVersion) {
+          await newerVersion();
+          setFailure(newerVersionText(error));
         } else {
           setFailure(failureText(error));
         }
@@ -109,6 +114,11 @@ function faultsByPath<Values extends FormikValues>(error: ValidationError): Form
 function failureWithFields(error: ApiError, shownPaths: string[]): string {
   const others = error.fields.filter(({ path }) => !shownPaths.includes(path)).map(({ message }) => message);
   return others.join('. ') || failureText(error);
+}
+
+function newerVersionText({ problem }: ApiError): string {
+  const by = typeof problem?.changedBy === 'string' ? problem.changedBy : 'Somebody else';
+  return `${by} saved a newer version meanwhile. What you typed is kept; look at the newer version, then save again to set yours in its place.`;
 }
 
 export function idOf(path: string): string {

@@ -1,0 +1,113 @@
+import { contract, type CatalogueUnit } from '@bellgap/common/api';
+import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { useQuery } from '@tanstack/react-query';
+import { Link, useParams } from 'react-router-dom';
+import { queryOf } from '../../api/queries';
+import { paths } from '../../app/paths';
+import type { Column } from '../../ui/data-table/columns';
+import { DataTable, figureText } from '../../ui/data-table/data-table';
+import { useListState } from '../../ui/data-table/use-list-state';
+import { Facts } from '../../ui/facts';
+import { Ledger } from '../../ui/ledger';
+import { Page } from '../../ui/page/page';
+import { Sheet } from '../../ui/page/sheet';
+import { EmptyState } from '../../ui/states/empty-state';
+import { QueryState } from '../../ui/states/query-state';
+import { familyText, kindText, materialText, profileText, sourceText } from '../model';
+
+type Flashover = NonNullable<CatalogueUnit['wetFlashover']>[number];
+
+const FLASHOVER_COLUMNS: Column<Flashover>[] = [
+  { key: 'units', title: 'Units in the string', value: (row) => row.units, figure: true, sortable: true },
+  { key: 'wetKvRms', title: 'Wet flashover, kV rms', value: (row) => row.wetKvRms, figure: true, sortable: true },
+];
+
+function FlashoverTable({ code, rows }: { code: string; rows: Flashover[] }) {
+  const list = useListState({ defaultSort: 'units', prefix: 'flashover-' });
+  return (
+    <DataTable
+      label="Wet flashover of complete strings"
+      name={`wet-flashover-${code}`}
+      columns={FLASHOVER_COLUMNS}
+      rows={rows}
+      rowKey={(row) => String(row.units)}
+      list={list}
+    />
+  );
+}
+
+const measure = (value: number | null, unit: string) => (value === null ? null : `${figureText(value)} ${unit}`);
+
+function dimensionsOf(unit: CatalogueUnit): (readonly [string, string | null])[] {
+  const disc = unit.kind === 'cap-and-pin';
+  return [
+    [disc ? 'Spacing' : 'Length between fittings', measure(unit.spacingMm, 'mm')],
+    ['Diameter', measure(unit.diameterMm, 'mm')],
+    ...(disc ? [] : ([['Average diameter', measure(unit.averageDiameterMm, 'mm')]] as const)),
+    [`Creepage, ${unit.creepageIsNominal ? 'nominal' : 'minimum'}`, measure(unit.creepageMm, 'mm')],
+    ['Dry arc', measure(unit.dryArcMm, 'mm')],
+    ['Mass', measure(unit.massKg, 'kg')],
+    ['Failing load', measure(unit.failingLoadKn, 'kN')],
+    ...(unit.routineTestLoadKn === null
+      ? []
+      : ([['Routine test load', measure(unit.routineTestLoadKn, 'kN')]] as const)),
+    ['Coupling', unit.coupling],
+  ];
+}
+
+function UnitView({ unit }: { unit: CatalogueUnit }) {
+  return (
+    <Page
+      title={unit.code}
+      crumbs={[{ label: 'Catalogue', to: paths.catalogue.to() }]}
+      lead={unit.withdrawn ? 'Withdrawn: not for new specifications' : (unit.note ?? undefined)}
+    >
+      <Facts
+        facts={[
+          ['Family', familyText(unit)],
+          ['Kind', kindText(unit)],
+          ['Material', materialText(unit) ?? 'not known'],
+          ['Profile', profileText(unit)],
+          ['Version', <span className="num">{unit.version}</span>],
+        ]}
+      />
+      <Sheet title="Dimensions and strength">
+        <Ledger rows={dimensionsOf(unit)} />
+        {unit.withdrawn && unit.note && <p className="soft">{unit.note}</p>}
+      </Sheet>
+      <Sheet title="Source">
+        <Ledger
+          rows={[
+            ['Document', unit.source.document],
+            ['Edition', unit.source.edition],
+            ['Clause', unit.source.clause],
+            ['Status', CHOICE_LABELS.status[unit.source.status]],
+          ]}
+        />
+      </Sheet>
+      {unit.wetFlashover && unit.wetFlashover.length > 0 && (
+        <Sheet title="Wet flashover of complete strings" note={`Power frequency; ${sourceText(unit.source)}`} flush>
+          <FlashoverTable code={unit.code} rows={unit.wetFlashover} />
+        </Sheet>
+      )}
+    </Page>
+  );
+}
+
+export function CatalogueUnitPage() {
+  const { code = '' } = useParams();
+  const unit = useQuery(queryOf(contract.insulator, { params: { code } }));
+  return (
+    <QueryState
+      query={unit}
+      what="The unit"
+      missing={
+        <EmptyState title={`There is no unit ${code}`} level={1}>
+          Look for it in the <Link to={paths.catalogue.to()}>catalogue</Link>.
+        </EmptyState>
+      }
+    >
+      {(found) => <UnitView unit={found as CatalogueUnit} />}
+    </QueryState>
+  );
+}

@@ -1,0 +1,97 @@
+import { Button, Table, type TableColumnType } from 'antd';
+import { useMemo, type ReactNode } from 'react';
+import { searchRows, sortRows, type Column } from './columns';
+import './data-table.css';
+import { TableActs } from './table-acts';
+import { TableFilters, type TableFilter } from './table-filters';
+import type { ListState } from './use-list-state';
+
+interface DataTableProps<Row> {
+  /** What the table shows, for those who cannot see it. */
+  label: string;
+  /** Name of the exported file, without its ending. */
+  name: string;
+  columns: Column<Row>[];
+  rows: readonly Row[];
+  rowKey: (row: Row) => string;
+  list: ListState;
+  /** Sorted and searched by the server, page by page; otherwise the rows are all there and the browser does both. */
+  pages?: { next: string | null; previous: string | null; allRows: () => Promise<readonly Row[]> };
+  searchLabel?: string;
+  filters?: TableFilter[];
+  loading?: boolean;
+  /** Shown where there are no rows and nothing narrows the list. */
+  empty?: ReactNode;
+}
+
+function tableColumns<Row>(columns: Column<Row>[], list: ListState): TableColumnType<Row>[] {
+  return columns.map(({ key, title, value, render, figure, sortable, wraps }) => ({
+    key,
+    dataIndex: key,
+    title,
+    align: figure ? 'right' : 'left',
+    className: [figure ? 'num' : '', wraps ? 'cell-wraps' : ''].join(' ').trim(),
+    sorter: sortable ?? false,
+    sortOrder: list.sort === key ? 'ascend' : list.sort === `-${key}` ? 'descend' : null,
+    render: (_: unknown, row: Row) => {
+      if (render) return render(row);
+      const cell = value(row);
+      if (cell === null || cell === undefined || cell === '') return <span className="soft">—</span>;
+      return typeof cell === 'number' ? figureText(cell) : String(cell);
+    },
+  }));
+}
+
+const FIGURE = new Intl.NumberFormat('en-GB', { maximumFractionDigits: 3 });
+
+export function figureText(value: number): string {
+  return FIGURE.format(value).replace('-', '−');
+}
+
+/** The one table: sorts, filters, pages by cursor, copies and exports; wide ones scroll inside themselves. */
+export function DataTable<Row extends object>(props: DataTableProps<Row>) {
+  const { label, name, columns, rows, rowKey, list, pages, searchLabel, filters = [], loading, empty } = props;
+  const shown = useMemo(
+    () => (pages ? rows : sortRows(searchRows(rows, columns, list.search), columns, list.sort)),
+    [pages, rows, columns, list.search, list.sort],
+  );
+  const shownColumns = useMemo(() => tableColumns(columns, list), [columns, list]);
+
+  if (shown.length === 0 && !list.narrowed && !list.cursor && !loading && empty) return <>{empty}</>;
+  return (
+    <div className="data-table">
+      <div className="table-bar">
+        <TableFilters list={list} searchLabel={searchLabel} filters={filters} />
+        <TableActs name={name} columns={columns} allRows={pages ? pages.allRows : () => shown} />
+      </div>
+      <div className="table-scroll" role="region" aria-label={label} tabIndex={0} aria-busy={loading ?? false}>
+        <Table<Row>
+          size="small"
+          columns={shownColumns}
+          dataSource={shown as Row[]}
+          rowKey={rowKey}
+          pagination={false}
+          showSorterTooltip={false}
+          locale={{
+            emptyText: list.narrowed ? 'Nothing matches; show all, or look for something else.' : 'Nothing here yet.',
+          }}
+          onChange={(_pagination, _filters, sorter) => {
+            if (Array.isArray(sorter)) return;
+            const key = String(sorter.columnKey ?? '');
+            list.change({ sort: sorter.order ? (sorter.order === 'descend' ? `-${key}` : key) : undefined });
+          }}
+        />
+      </div>
+      {pages && (pages.next || pages.previous) && (
+        <nav className="table-pages" aria-label={`Pages of ${label}`}>
+          <Button size="small" disabled={!pages.previous} onClick={() => pages.previous && list.turnTo(pages.previous)}>
+            Previous
+          </Button>
+          <Button size="small" disabled={!pages.next} onClick={() => pages.next && list.turnTo(pages.next)}>
+            Next
+          </Button>
+        </nav>
+      )}
+    </div>
+  );
+}

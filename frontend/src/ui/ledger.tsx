@@ -1,0 +1,16 @@
+import type { ReactNode } from 'react';
+import './ledger.css';
+
+/** Named values under each other with hairlines between, figures at the right. */
+export function Ledger({ rows }: { rows: readonly (readonly [label: string, value: ReactNode])[] }) {
+  return (
+    <dl className="ledger">
+      {rows.map(([label, value]) => (
+        <div key={label}>
+          <dt>{label}</dt>
+          <dd className="num">{value ?? <span className="soft">not known</span>}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}
