@@ -14,6 +14,8 @@ export const projectCodeSchema = requiredText('Code', 20).matches(/^[A-Z0-9][A-Z
 
 function isTimeZone(zone: string | undefined): boolean {
   if (!zone) return true;
+  // Not every run time reads a bare offset; a name means the same everywhere.
+  if (/^[+-]/.test(zone)) return false;
   try {
     new Intl.DateTimeFormat('en', { timeZone: zone });
     return true;
@@ -28,10 +30,10 @@ const projectShape = {
     .string()
     .oneOf([...PROJECT_KINDS], 'Kind: line or yard')
     .required('Kind: is needed'),
-  /** IANA zone or offset such as +04:00; dates on signatures follow it. */
+  /** IANA zone such as Etc/GMT-4; dates on signatures follow it. */
   siteTimeZone: requiredText('Site time zone', 60).test(
     'known',
-    'Site time zone: not known; give an offset such as +04:00 or a zone name',
+    'Site time zone: not known; give the name of a zone, such as Etc/GMT-4 for UTC+04:00',
     isTimeZone,
   ),
   paper: yup
