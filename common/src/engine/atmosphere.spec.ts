@@ -76,6 +76,7 @@ describe('the factor on the strength of a line gap', () => {
     [1550, 0.978],
     [343, 0.946],
     [594, 0.959],
+    [(245 * Math.SQRT2) / Math.sqrt(3), 0.938],
   ])('at 1000 m and %d kV is %d (EN 50341-1:2001 Annex F)', (gapKvPeak, printed) => {
     expect(lineAltitudeFactor({ altitudeM: 1000, gapKvPeak, use: 'test' }, working()).factor).toBe(printed);
   });

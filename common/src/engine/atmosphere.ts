@@ -135,7 +135,11 @@ export function dielectricFactor(altitudeM: number, calculation: Calculation): F
   return { factor: row?.dielectricFactor ?? null, interpolated: false, source };
 }
 
-/** Upper ends of the columns of EN 50341-1 Table E.4, kV peak withstood by the gap; the last column has none. */
+/**
+ * Upper ends of the columns of EN 50341-1 Table E.4, kV peak withstood by the gap; the last column has none. The print
+ * bounds them in whole kilovolts (up to 200, 201 to 400, ...), so the voltage is taken to the kilovolt: 245 kV to earth,
+ * 200.04 kV peak, falls in the first column, which gives the printed D50Hz of 0.43 m.
+ */
 const LINE_COLUMNS: readonly (readonly [upToKv: number, factorOf: (row: TableRow<LineAltitudeRow>) => number])[] = [
   [200, (row) => row.upTo200KvFactor],
   [400, (row) => row.upTo400KvFactor],
@@ -153,7 +157,9 @@ export function lineAltitudeFactor(
   { altitudeM, gapKvPeak, use }: { altitudeM: number; gapKvPeak: number; use: string },
   calculation: Calculation,
 ): FactorReading {
-  const [upToKv, factorOf] = LINE_COLUMNS.find(([upTo]) => gapKvPeak <= upTo) as (typeof LINE_COLUMNS)[number];
+  const [upToKv, factorOf] = LINE_COLUMNS.find(
+    ([upTo]) => Math.round(gapKvPeak) <= upTo,
+  ) as (typeof LINE_COLUMNS)[number];
   const reading = linearBetweenRows(EN_50341_1_ALTITUDE, {
     by: (row) => row.altitudeM,
     at: Math.max(0, altitudeM),

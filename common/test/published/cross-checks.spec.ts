@@ -9,6 +9,7 @@ import { lineAltitudeFactor } from '../../src/engine/atmosphere';
 import {
   ANSI_C29_2_UNITS,
   C37_30_ALTITUDE,
+  C37_32_BUS_CLEARANCES,
   EN_50341_1_CLEARANCES,
   IEC_60071_1_RANGE_I,
   IEC_60071_1_RANGE_II,
@@ -132,10 +133,13 @@ describe('cross-check: power-frequency distances of EN 50341-1, table against th
 
   it('covers twelve voltages', () => expect(rows).toHaveLength(12));
 
-  it.each(rows.map((row) => [row.highestVoltageKv, row] as const))('%d kV agrees within 0.01 m', (voltageKv, row) => {
-    expect(Math.abs(byFormulaM(voltageKv, 'structure') - (row.d50HzPhaseToEarthM as number))).toBeLessThan(0.01);
-    expect(Math.abs(byFormulaM(voltageKv, 'phase-to-phase') - (row.d50HzPhaseToPhaseM as number))).toBeLessThan(0.01);
-  });
+  it.each(rows.map((row) => [row.highestVoltageKv, row] as const))(
+    '%d kV gives the tabulated figures, rounded to 0.01 m',
+    (voltageKv, row) => {
+      expect(byFormulaM(voltageKv, 'structure').toFixed(2)).toBe((row.d50HzPhaseToEarthM as number).toFixed(2));
+      expect(byFormulaM(voltageKv, 'phase-to-phase').toFixed(2)).toBe((row.d50HzPhaseToPhaseM as number).toFixed(2));
+    },
+  );
 });
 
 describe('cross-check: creepage, 1986 against 2008', () => {
@@ -148,6 +152,33 @@ describe('cross-check: creepage, 1986 against 2008', () => {
 });
 
 describe('cross-check: North American tables', () => {
+  /** ANSI C37.32-1996 Table 5, read a second time in print. */
+  it.each([
+    [72.5, 350, [31, 25, 29, 60]],
+    [362, 1300, [110, 104, 106, 174]],
+  ] as const)('%d kV with %d kV BIL is as ANSI C37.32-1996 Table 5 prints it', (voltageKv, bilKv, printedIn) => {
+    const row = one(
+      C37_32_BUS_CLEARANCES.rows,
+      (candidate) => candidate.ratedMaximumVoltageKv === voltageKv && candidate.bilKv === bilKv,
+    );
+    expect([row.metalToMetalIn, row.groundMinimumIn, row.groundRecommendedIn, row.phaseSpacingIn]).toEqual(printedIn);
+  });
+
+  it('the millimetres of ANSI C37.32-1996 Table 5 are its inches, within 1 mm', () => {
+    for (const row of C37_32_BUS_CLEARANCES.rows) {
+      const pairs = [
+        [row.metalToMetalIn, row.metalToMetalMm],
+        [row.groundMinimumIn, row.groundMinimumMm],
+        [row.groundRecommendedIn, row.groundRecommendedMm],
+        [row.phaseSpacingIn, row.phaseSpacingMm],
+      ];
+      for (const [inches, mm] of pairs) {
+        if (inches === null || mm === null) expect(inches).toBe(mm);
+        else expect(Math.abs((inches as number) * 25.4 - (mm as number))).toBeLessThan(1);
+      }
+    }
+  });
+
   it('each suspension level is the multi-unit flashover of its units, with 11.5 in of leakage a unit', () => {
     for (const row of RUS_SUSPENSION_LEVELS.rows) {
       const string = one(STRING_FLASHOVER_254X146.rows, ({ units }) => units === row.units);

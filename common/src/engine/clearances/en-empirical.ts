@@ -126,12 +126,13 @@ function readRow(wanted: Wanted, voltageKv: number, site: Site, calculation: Cal
   const { document, edition, clause } = EN_50341_1_CLEARANCES;
   const printed = { document, edition, clause, status: leastKnown(statuses, interpolated) };
   const as = `${wanted.distance}:${wanted.stress}`;
-  const shown = reading.rows.map((row) => `${row.highestVoltageKv} kV: ${wanted.valueM(row)} m`).join('; ');
+  const shown = (): string =>
+    reading.rows.map((row) => `${row.highestVoltageKv} kV: ${wanted.valueM(row)} m`).join('; ');
   calculation.note(() => ({
     id: `clearances.empirical:${as}`,
     heading: `${clause}, ${wanted.stress}`,
     formula: interpolated ? 'D(Us), linear between rows' : 'D(Us), row as printed',
-    substitution: `D(${figureText(voltageKv)} kV); ${shown}`,
+    substitution: `D(${figureText(voltageKv)} kV); ${shown()}`,
     result: reading.value,
     unit: 'm',
     source: printed,

@@ -105,7 +105,7 @@ function readRow<Row extends object>(
     clause,
     status: leastKnown(levelStatus === undefined ? statuses : [...statuses, levelStatus], interpolated),
   };
-  const shown = reading.rows.map((row) => `${voltageKv(row)} kV: ${distanceMm(row)} mm`).join('; ');
+  const shown = (): string => reading.rows.map((row) => `${voltageKv(row)} kV: ${distanceMm(row)} mm`).join('; ');
   calculation.note(() => ({
     id: `clearances.table:${as}`,
     heading: `${clause}, ${words}`,
@@ -117,7 +117,7 @@ function readRow<Row extends object>(
     substitution:
       reading.value === null
         ? `D(${figureText(correctedKv)} kV), outside the table`
-        : `D(${figureText(correctedKv)} kV); ${shown}`,
+        : `D(${figureText(correctedKv)} kV); ${shown()}`,
     result: reading.value,
     unit: 'mm',
     source,

@@ -61,5 +61,20 @@ export function rounded(
     unit: 'mm',
     source: row.source,
   }));
-  return { ...row, valueMm, governs: false };
+  // Written out: a spread here costs a third of the time of an evaluation.
+  return {
+    method: row.method,
+    distance: row.distance,
+    stress: row.stress,
+    shape: row.shape,
+    withstandKv: row.withstandKv,
+    altitudeFactor: row.altitudeFactor,
+    h0M: row.h0M,
+    exponent: row.exponent,
+    valueMm,
+    interpolated: row.interpolated,
+    withinSource: row.withinSource,
+    governs: false,
+    source: row.source,
+  };
 }
