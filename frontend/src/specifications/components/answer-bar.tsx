@@ -1,0 +1,264 @@
+import type { Caution, Criterion, Evaluation, InsulatorUnit, SpecificationInput } from '@bellgap/common/api';
+import { memo, useEffect, useState } from 'react';
+import { Figure, formatNumber } from '../../ui/figure';
+import { TraceArea } from '../../ui/trace';
+import type { Answer, AnswerState } from '../hooks/use-live-evaluation';
+import { criterionWords, governingWords, stringWords, whyNot } from '../model/words';
+import { SeverityShape } from './caution-mark';
+
+interface Properties {
+  answer: Answer;
+  state: AnswerState;
+  message: string | null;
+  unit: InsulatorUnit | null;
+}
+
+const STATE_WORDS: Record<Exclude<AnswerState, 'current'>, string> = {
+  waiting: 'working it out…',
+  faulty: 'answer from before: a field cannot be read yet',
+  unreachable: 'answer from before: no connection, trying again',
+  'signed-out': 'answer from before: signed out',
+  failed: 'answer from before',
+};
+
+/** The answer on top, in words and figures: how many of what, how much creepage, how long, and what governs. */
+export const AnswerBar = memo(function AnswerBar({ answer, state, message, unit }: Properties) {
+  const { evaluation, input } = answer;
+  const sentence = sentenceOf(evaluation, unit);
+  return (
+    <div className={`answer is-${state}`} data-testid="answer" data-state={state}>
+      <TraceArea className="answer-figures">
+        <Count evaluation={evaluation} input={input} unit={unit} />
+        {evaluation.string && <Creepage evaluation={evaluation} />}
+        {evaluation.string && <Length evaluation={evaluation} input={input} />}
+        {input.kind === 'bay' && <BayDistances evaluation={evaluation} />}
+        <Governing evaluation={evaluation} unit={unit} />
+      </TraceArea>
+      {state !== 'current' && (
+        <p className="answer-state">
+          <span className="answer-state-mark" aria-hidden="true" />
+          {STATE_WORDS[state]}
+          {state === 'failed' && message && `: ${message}`}
+        </p>
+      )}
+      <Spoken sentence={sentence} isCurrent={state === 'current'} />
+      <div className="answer-pinned" aria-hidden="true">
+        <b>{shortCount(evaluation, unit)}</b>
+        <span>{shortGoverning(evaluation)}</span>
+        <Gravest cautions={evaluation.cautions} />
+      </div>
+    </div>
+  );
+});
+
+function noCountWhy(evaluation: Evaluation): string {
+  const stop = evaluation.cautions.find(({ severity }) => severity === 'stop');
+  return stop?.text ?? whyNot(evaluation, 'string') ?? 'more has to be filled in';
+}
+
+const unitsWord = (units: number, isRod: boolean): string =>
+  isRod ? (units === 1 ? 'rod' : 'rods') : units === 1 ? 'unit' : 'units';
+const isRod = (unit: InsulatorUnit | null): boolean => unit !== null && unit.kind !== 'cap-and-pin';
+
+function Count({
+  evaluation,
+  input,
+  unit,
+}: {
+  evaluation: Evaluation;
+  input: SpecificationInput;
+  unit: InsulatorUnit | null;
+}) {
+  const units = evaluation.string?.units ?? null;
+  if (input.kind === 'bay') {
+    return (
+      <div className="answer-main">
+        <span className="answer-big">Substation bay</span>
+        <small>clearances by stress, shape and altitude</small>
+      </div>
+    );
+  }
+  if (units === null) {
+    return (
+      <div className="answer-main">
+        <span className="answer-big">No count yet</span>
+        <small className="answer-why">{noCountWhy(evaluation)}</small>
+      </div>
+    );
+  }
+  return (
+    <div className="answer-main">
+      <span className="answer-big">
+        <Figure value={units} name="string.units" label="Number of units" /> {unitsWord(units, isRod(unit))}
+        {unit && ` ${unit.code}`}
+      </span>
+      {unit && <small>{stringWords(input, unit)}</small>}
+    </div>
+  );
+}
+
+function Creepage({ evaluation }: { evaluation: Evaluation }) {
+  const { string } = evaluation;
+  if (!string) return null;
+  const basis = string.creepageVoltageBasis === 'line-to-line' ? 'line to line' : 'phase to earth';
+  return (
+    <div>
+      <span className="answer-figure">
+        <Figure value={string.creepageProvidedMm} round="down" name="string.creepageProvidedMm" label="Creepage" /> mm
+        creepage
+      </span>
+      <small>
+        {string.creepageRequiredMm === null ? (
+          `needed: not known${whyNot(evaluation, 'string.pollution') ? `, ${whyNot(evaluation, 'string.pollution')}` : ''}`
+        ) : (
+          <>
+            {`needed ${formatNumber(string.creepageRequiredMm, { round: 'up' })} mm`}
+            {string.creepageVoltageKv !== null && string.uscdRequiredMmPerKv !== null && (
+              <>
+                {' '}
+                · {formatNumber(string.uscdRequiredMmPerKv, { decimals: 1, round: 'up' })} mm/kV on{' '}
+                {formatNumber(string.creepageVoltageKv, { decimals: 1 })} kV {basis}
+              </>
+            )}
+            {string.scd1986RequiredMmPerKvUm !== null && (
+              <>
+                {' '}
+                · {formatNumber(string.scd1986RequiredMmPerKvUm, { decimals: 1, round: 'up' })} mm/kV on Um line to line
+              </>
+            )}
+          </>
+        )}
+      </small>
+    </div>
+  );
+}
+
+function Length({ evaluation, input }: { evaluation: Evaluation; input: SpecificationInput }) {
+  const { string } = evaluation;
+  if (!string) return null;
+  const devices = input.string?.arcingDevices;
+  const arc = string.dryArcWithDevicesMm ?? string.dryArcMm;
+  return (
+    <div>
+      <span className="answer-figure">
+        <Figure value={string.sectionLengthMm} round="down" /> mm section length
+      </span>
+      <small>
+        {arc === null ? 'dry arc not known' : `dry arc ${formatNumber(arc, { round: 'down' })} mm`}
+        {devices === 'none'
+          ? ', no arcing devices'
+          : devices === 'horns'
+            ? ', with horns'
+            : devices === 'rings'
+              ? ', with rings'
+              : ''}
+      </small>
+    </div>
+  );
+}
+
+function BayDistances({ evaluation: { clearances } }: { evaluation: Evaluation }) {
+  return (
+    <>
+      <div>
+        <span className="answer-figure">
+          <Figure value={clearances?.phaseToEarthMm} round="up" /> mm to earth
+        </span>
+        <small>needed, metal to metal</small>
+      </div>
+      <div>
+        <span className="answer-figure">
+          <Figure value={clearances?.phaseToPhaseMm} round="up" /> mm between phases
+        </span>
+        <small>needed, metal to metal</small>
+      </div>
+    </>
+  );
+}
+
+function marginOf({ string }: Evaluation, criterion: Criterion | null): number | null {
+  return string?.criteria.find((one) => one.criterion === criterion)?.marginPercent ?? null;
+}
+
+function Governing({ evaluation, unit }: { evaluation: Evaluation; unit: InsulatorUnit | null }) {
+  const { string } = evaluation;
+  if (!string) return null;
+  const words = governingWords(string);
+  const margin = marginOf(evaluation, string.governedBy);
+  const parts: string[] = [];
+  if (margin !== null) parts.push(`margin ${formatNumber(margin, { decimals: 1, round: 'down' })} %`);
+  for (const { criterion, requiredUnits } of string.criteria) {
+    if (isRod(unit) || requiredUnits === null || criterion === string.governedBy || string.tiedWith.includes(criterion))
+      continue;
+    parts.push(`${criterionWords(criterion).toLowerCase()} needs ${requiredUnits}`);
+  }
+  const open = string.criteria
+    .filter(({ state }) => state === 'not-assessed')
+    .map(({ criterion }) => criterionWords(criterion).toLowerCase());
+  if (open.length > 0) parts.push(`${open.join(' and ')} not assessed`);
+  return (
+    <div>
+      <span className="answer-governs">{words ?? 'Nothing governs yet'}</span>
+      <small>{parts.join(' · ') || 'no criterion has a figure'}</small>
+      <Gravest cautions={evaluation.cautions} />
+    </div>
+  );
+}
+
+function Gravest({ cautions }: { cautions: readonly Caution[] }) {
+  const stops = cautions.filter(({ severity }) => severity === 'stop').length;
+  const fails = cautions.filter(({ severity }) => severity === 'fail').length;
+  if (stops + fails === 0) return null;
+  return (
+    <span className="answer-gravest">
+      {stops > 0 && (
+        <b className="is-stop">
+          <SeverityShape severity="stop" /> {stops} stop
+        </b>
+      )}
+      {fails > 0 && (
+        <b className="is-fail">
+          <SeverityShape severity="fail" /> {fails} fail
+        </b>
+      )}
+    </span>
+  );
+}
+
+function shortCount({ string, clearances }: Evaluation, unit: InsulatorUnit | null): string {
+  if (string?.units !== null && string?.units !== undefined)
+    return `${string.units} ${unitsWord(string.units, isRod(unit))}${unit ? ` ${unit.code}` : ''}`;
+  if (!string && clearances?.phaseToEarthMm) return `${formatNumber(clearances.phaseToEarthMm)} mm to earth`;
+  return 'No count yet';
+}
+
+function shortGoverning(evaluation: Evaluation): string {
+  const words = evaluation.string ? governingWords(evaluation.string) : null;
+  if (!words) return '';
+  const margin = marginOf(evaluation, evaluation.string?.governedBy ?? null);
+  return margin === null ? words : `${words}, ${formatNumber(margin, { decimals: 1, round: 'down' })} %`;
+}
+
+function sentenceOf(evaluation: Evaluation, unit: InsulatorUnit | null): string {
+  const { string } = evaluation;
+  if (string?.units === null || string?.units === undefined) return `No count: ${noCountWhy(evaluation)}`;
+  const governing = governingWords(string);
+  return `${shortCount(evaluation, unit)}.${governing ? ` ${governing}.` : ''}`;
+}
+
+/** Long enough that a screen reader hears the answer, not each key. */
+const QUIET_MS = 1200;
+
+function Spoken({ sentence, isCurrent }: { sentence: string; isCurrent: boolean }) {
+  const [spoken, setSpoken] = useState('');
+  useEffect(() => {
+    if (!isCurrent) return undefined;
+    const timer = setTimeout(() => setSpoken(sentence), QUIET_MS);
+    return () => clearTimeout(timer);
+  }, [sentence, isCurrent]);
+  return (
+    <p className="visually-hidden" role="status" aria-live="polite">
+      {spoken}
+    </p>
+  );
+}

@@ -1,0 +1,144 @@
+import type { ClearanceRow, Evaluation } from '@bellgap/common/api';
+import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { Figure } from '../../ui/figure';
+import { SourceWords, TraceArea } from '../../ui/trace';
+import { useLit } from '../hooks/highlight';
+import { whyNot } from '../model/words';
+import { lowerFirst } from './criteria-block';
+import { LedgerBlock } from './ledger-rows';
+
+const BLOCKS = [
+  { distance: 'phase-to-earth', title: 'Distance to earth', missing: ['clearances.phaseToEarthMm', 'clearances'] },
+  {
+    distance: 'phase-to-phase',
+    title: 'Distance between phases',
+    missing: ['clearances.phaseToPhaseMm', 'clearances'],
+  },
+  { distance: 'section', title: 'Section clearance', missing: ['clearances.section'] },
+  { distance: 'safety', title: 'Distance for people', missing: ['clearances.safety', 'clearance.safetySource'] },
+] as const;
+
+const STRESSES: Record<string, string> = {
+  lightning: 'lightning',
+  'fast-front': 'fast front',
+  switching: 'switching',
+  'slow-front': 'slow front',
+  'power-frequency': 'power frequency',
+};
+
+/** Four different distances in four blocks; none of them is worked out from another. */
+export function ClearanceBlocks({ evaluation }: { evaluation: Evaluation }) {
+  const rows = evaluation.clearances?.rows ?? [];
+  return BLOCKS.map(({ distance, title, missing }) => (
+    <ClearanceBlock
+      key={distance}
+      title={title}
+      rows={rows.filter((row) => row.distance === distance)}
+      headlineMm={headlineOf(evaluation, distance)}
+      why={whyNot(evaluation, ...missing)}
+      isForPeople={distance === 'safety'}
+    />
+  ));
+}
+
+function headlineOf({ clearances }: Evaluation, distance: ClearanceRow['distance']): number | null {
+  if (distance === 'phase-to-earth') return clearances?.phaseToEarthMm ?? null;
+  if (distance === 'phase-to-phase') return clearances?.phaseToPhaseMm ?? null;
+  return null;
+}
+
+interface Properties {
+  title: string;
+  rows: ClearanceRow[];
+  headlineMm: number | null;
+  why: string | undefined;
+  isForPeople: boolean;
+}
+
+function ClearanceBlock({ title, rows, headlineMm, why, isForPeople }: Properties) {
+  const aside =
+    headlineMm === null ? undefined : (
+      <>
+        needed <Figure value={headlineMm} unit="mm" round="up" />
+      </>
+    );
+  return (
+    <LedgerBlock title={title} aside={aside}>
+      {rows.length === 0 ? (
+        <p className="zone-note">
+          {isForPeople && !why
+            ? 'not covered by this sheet: the local rule for work and access applies'
+            : `not assessed${why ? `: ${lowerFirst(why)}` : ''}`}
+        </p>
+      ) : (
+        <TraceArea>
+          <table className="ledger-table">
+            <thead>
+              <tr>
+                <th scope="col">stress and shape</th>
+                <th scope="col">withstand</th>
+                <th scope="col">altitude</th>
+                <th scope="col">needed</th>
+              </tr>
+            </thead>
+            <tbody>
+              {rows.map((row, index) => (
+                <Row key={`${row.method} ${row.stress} ${row.shape} ${index}`} row={row} />
+              ))}
+            </tbody>
+          </table>
+        </TraceArea>
+      )}
+    </LedgerBlock>
+  );
+}
+
+function shapeWords(shape: string | null): string | null {
+  if (shape === null) return null;
+  const known: Record<string, string> = {
+    ...CHOICE_LABELS.shapePhaseToEarth,
+    ...CHOICE_LABELS.shapePhaseToPhase,
+    ...CHOICE_LABELS.enGap,
+  };
+  return (known[shape] ?? shape.replaceAll('-', ' ')).toLowerCase();
+}
+
+function Row({ row }: { row: ClearanceRow }) {
+  const lit = useLit(row.distance === 'phase-to-earth' ? 'clearances.phaseToEarthMm' : undefined);
+  const shape = shapeWords(row.shape);
+  const stress = STRESSES[row.stress] ?? row.stress.replaceAll('-', ' ');
+  const remarks = [
+    CHOICE_LABELS.clearanceMethod[row.method],
+    ...(row.interpolated ? ['interpolated'] : []),
+    ...(row.withinSource ? [] : ['outside of the source']),
+  ];
+  const unit = row.stress === 'power-frequency' ? 'kV' : 'kV peak';
+  return (
+    <tr className={row.governs ? 'is-governing' : undefined} {...lit}>
+      <th scope="row">
+        {stress}
+        {shape && `, ${shape}`}
+        {row.governs && <small className="governs-word"> governs</small>}
+        <small className="row-source">
+          {remarks.join(', ')} — <SourceWords source={row.source} />
+        </small>
+      </th>
+      <td>
+        <Figure value={row.withstandKv} unit={unit} />
+      </td>
+      <td>
+        <Figure value={row.altitudeFactor} decimals={3} />
+        {row.h0M !== null && row.altitudeFactor !== null && <small> above {row.h0M} m</small>}
+      </td>
+      <td>
+        <Figure
+          value={row.valueMm}
+          unit="mm"
+          round="up"
+          name={`clearances.${row.method}.${row.distance}.${row.stress}`}
+          label={`${stress}, needed`}
+        />
+      </td>
+    </tr>
+  );
+}

@@ -1,0 +1,87 @@
+import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
+import type { Criterion, Evaluation, InsulatorUnit, SpecificationInput } from '@bellgap/common/api';
+import { levelWords } from './levels';
+import type { InsulationLevelInput } from '@bellgap/common/api';
+
+const CHOICES: Record<string, Record<string, string>> = {
+  kind: CHOICE_LABELS.kind,
+  basis: CHOICE_LABELS.basis,
+  'system.neutralEarthing': CHOICE_LABELS.neutralEarthing,
+  'system.earthFault': CHOICE_LABELS.earthFault,
+  'site.pollution.class': CHOICE_LABELS.pollutionClass,
+  'site.pollution.type': CHOICE_LABELS.pollutionType,
+  'site.pollution.contamination': CHOICE_LABELS.contamination,
+  'site.pollution.basis': CHOICE_LABELS.pollutionBasis,
+  'string.arrangement': CHOICE_LABELS.arrangement,
+  'string.surroundings': CHOICE_LABELS.surroundings,
+  'string.arcingDevices': CHOICE_LABELS.arcingDevices,
+  'clearance.method': CHOICE_LABELS.clearanceMethod,
+  'clearance.shapePhaseToEarth': CHOICE_LABELS.shapePhaseToEarth,
+  'clearance.shapePhaseToPhase': CHOICE_LABELS.shapePhaseToPhase,
+  'clearance.fastFrontFrom': CHOICE_LABELS.fastFrontFrom,
+  'clearance.enGap': CHOICE_LABELS.enGap,
+  'clearance.safetySource': CHOICE_LABELS.safetySource,
+};
+
+/** The choices of a field in the order and words in which they are offered. */
+export function choicesOf(path: string): { value: string; label: string }[] {
+  return Object.entries(CHOICES[path] ?? {}).map(([value, label]) => ({ value, label }));
+}
+
+/** A value of the input as it is read, with its unit. */
+export function valueWords(path: string, value: unknown): string {
+  if (value === null || value === undefined || value === '') return 'not known';
+  if (path === 'system.insulationLevel') return levelWords(value as InsulationLevelInput) || 'not known';
+  if (typeof value !== 'string' && typeof value !== 'number') return JSON.stringify(value);
+  const choice = CHOICES[path]?.[value];
+  if (choice !== undefined) return choice;
+  const unit = fieldOf(path)?.unit;
+  return unit === undefined ? String(value) : `${value} ${unit}`;
+}
+
+/** Kind of string in words: "single suspension string, 160 kN, coupling 20". */
+export function stringWords(input: SpecificationInput, unit: InsulatorUnit): string {
+  const string = input.string;
+  const words: string[] = [];
+  if (string?.arrangement) {
+    const many = string.parallelStrings;
+    const count = many === 1 ? 'single ' : many === 2 ? 'double ' : many === null ? '' : `${many}-fold `;
+    words.push(`${count}${CHOICE_LABELS.arrangement[string.arrangement].toLowerCase()} string`);
+  }
+  words.push(`${unit.failingLoadKn} kN`);
+  if (unit.coupling) words.push(`coupling ${unit.coupling}`);
+  return words.join(', ');
+}
+
+export function unitWords(unit: InsulatorUnit): string {
+  const words: string[] = [];
+  if (unit.material) words.push(CHOICE_LABELS.insulatorMaterial[unit.material].toLowerCase());
+  words.push(`${CHOICE_LABELS.insulatorProfile[unit.profile].toLowerCase()} profile`);
+  words.push(
+    unit.diameterMm === null ? `length ${unit.spacingMm} mm` : `${unit.diameterMm} × ${unit.spacingMm} mm`,
+    `${unit.creepageMm} mm creepage`,
+    `${unit.failingLoadKn} kN`,
+  );
+  return words.join(', ');
+}
+
+export function criterionWords(criterion: Criterion): string {
+  return CHOICE_LABELS.criterion[criterion];
+}
+
+/** "Pollution governs", "Pollution and lightning govern alike". */
+export function governingWords({
+  governedBy,
+  tiedWith,
+}: Pick<NonNullable<Evaluation['string']>, 'governedBy' | 'tiedWith'>) {
+  if (governedBy === null) return null;
+  const [first = '', ...others] = [governedBy, ...tiedWith.filter((one) => one !== governedBy)].map(criterionWords);
+  if (others.length === 0) return `${first} governs`;
+  const low = others.map((other) => other.toLowerCase());
+  return `${[first, ...low.slice(0, -1)].join(', ')} and ${low.at(-1)} govern alike`;
+}
+
+/** Why a part of the answer has no figure. */
+export function whyNot({ notAssessed }: Evaluation, ...parts: string[]): string | undefined {
+  return notAssessed.find(({ part }) => parts.some((name) => part === name || part.startsWith(`${name}.`)))?.why;
+}

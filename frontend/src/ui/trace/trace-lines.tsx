@@ -1,0 +1,49 @@
+import type { SourceReference, TraceLine } from '@bellgap/common/api';
+import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { formatFull } from '../figure/format-number';
+import type { TraceSource } from './trace-source';
+import './trace.css';
+
+/** A citation in words, with how well the figure is known. */
+export function SourceWords({ source }: { source: SourceReference }) {
+  const where = [source.document, source.edition].filter(Boolean).join(':');
+  return (
+    <span className={`bg-source is-${source.status}`}>
+      {[where, source.clause].filter(Boolean).join(', ')} · {CHOICE_LABELS.status[source.status]}
+    </span>
+  );
+}
+
+function resultText({ result, unit }: TraceLine): string | null {
+  if (result === null) return null;
+  const figure = typeof result === 'number' ? formatFull(result) : result;
+  return unit ? `${figure} ${unit}` : figure;
+}
+
+function Line({ line }: { line: TraceLine }) {
+  const result = resultText(line);
+  return (
+    <div className="bg-trace-line">
+      <div className="bg-trace-heading">{line.heading}</div>
+      {line.formula && <div className="bg-num bg-trace-formula">{line.formula}</div>}
+      {line.substitution && line.substitution !== line.formula && <div className="bg-num">{line.substitution}</div>}
+      <div className="bg-num bg-trace-result">{result === null ? 'no figure' : `= ${result}`}</div>
+      <SourceWords source={line.source} />
+    </div>
+  );
+}
+
+/** Formula, figures put in, unrounded result and source of one figure. */
+export function TraceLines({ source, name }: { source: TraceSource; name: string }) {
+  if (source.failure !== null) return <p className="bg-field-error">{source.failure}</p>;
+  if (source.lines === null) return <p className="bg-trace-wait">Fetching the working…</p>;
+  const lines = source.linesOf(name, source.lines);
+  if (lines.length === 0) return <p className="bg-trace-wait">This figure has no working in the present answer.</p>;
+  return (
+    <>
+      {lines.map((line) => (
+        <Line key={line.id} line={line} />
+      ))}
+    </>
+  );
+}
