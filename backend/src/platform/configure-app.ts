@@ -4,7 +4,7 @@ import cookieParser from 'cookie-parser';
 import express from 'express';
 import helmet from 'helmet';
 import type { Config } from './config';
-import { refuseForeignRequests } from './request-guards';
+import { refuseForeignRequests, refuseUnreadableAddresses } from './request-guards';
 import { requestLog } from './request-log';
 import { staticPages } from './static-pages';
 
@@ -20,6 +20,7 @@ export function configureApp(app: NestExpressApplication, config: Config): void 
   app.use(requestLog(config.requestLog ? (line) => process.stdout.write(line) : null));
   app.use(headers(config));
   app.use(compression({ threshold: 1024 }));
+  app.use(refuseUnreadableAddresses);
   app.use(staticPages(config.frontendFolder));
   app.use(refuseForeignRequests);
   app.use(cookieParser());

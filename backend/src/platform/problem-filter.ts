@@ -65,7 +65,6 @@ function toDomainError(exception: unknown, request: Request): DomainError {
   if (status === 404) return new DomainError('not-found', `There is nothing at ${request.method} ${request.path}.`);
   if (status === 413) return new DomainError('too-large', 'The request is larger than this address takes.');
   if (status === 415) return new DomainError('unsupported-media-type', 'The encoding of the request is not supported.');
-  if (exception instanceof URIError) return new DomainError('not-found', 'The address cannot be read.');
   if (status !== null && status >= 400 && status < 500) return invalidAt('', 'The request cannot be read as JSON.');
   if (isConnectionFault(exception))
     return new DomainError('unavailable', 'The database does not answer. Try again shortly.');
@@ -85,7 +84,8 @@ function isConnectionFault(exception: unknown): boolean {
   const { code, name } = (exception ?? {}) as { code?: unknown; name?: unknown };
   return (
     name === 'KnexTimeoutError' ||
-    (typeof code === 'string' && (['ECONNREFUSED', 'ECONNRESET', 'EPIPE'].includes(code) || /^(08|57P)/.test(code)))
+    (typeof code === 'string' &&
+      (['ECONNREFUSED', 'ECONNRESET', 'EPIPE'].includes(code) || /^(08|28|3D|53|57P)/.test(code)))
   );
 }
 

@@ -1,6 +1,16 @@
 import type { NextFunction, Request, Response } from 'express';
 import { DomainError, forbidden } from './domain-error';
 
+/** An address whose escapes cannot be read names nothing. */
+export function refuseUnreadableAddresses(request: Request, _: Response, next: NextFunction): void {
+  try {
+    decodeURIComponent(request.path);
+    next();
+  } catch {
+    next(new DomainError('not-found', 'The address cannot be read.'));
+  }
+}
+
 const READING = new Set(['GET', 'HEAD', 'OPTIONS']);
 
 /**
