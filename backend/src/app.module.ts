@@ -10,6 +10,7 @@ import { OpenApiModule } from './openapi/openapi.module';
 import { PlatformModule, type PlatformOptions } from './platform/platform.module';
 import { ProjectsModule } from './projects/projects.module';
 import { ReferenceModule } from './reference/reference.module';
+import { SheetsModule } from './sheets/sheets.module';
 import { SpecificationsModule } from './specifications/specifications.module';
 import { UsersModule } from './users/users.module';
 
@@ -29,6 +30,7 @@ export class AppModule {
         CatalogueModule,
         EvaluationsModule,
         SpecificationsModule,
+        SheetsModule,
         DeskModule,
         HealthModule,
         OpenApiModule,

@@ -1,0 +1,38 @@
+import { NestFactory } from '@nestjs/core';
+import { AppModule } from '../app.module';
+import { loadConfig } from '../platform/config';
+import { KNEX, type Database } from '../platform/knex';
+import { DesignBasesService } from '../projects/design-bases.service';
+import { SheetsService } from '../sheets/sheets.service';
+import { SpecificationsService } from '../specifications/specifications.service';
+import { readAuthor } from './people';
+import { StoryClock } from './story-clock';
+import { tellStory } from './tell-story';
+
+/** Makes the documents of the demonstration through the product's services. May run again without harm. */
+async function main(): Promise<void> {
+  const config = loadConfig(process.env);
+  if (config.production) throw new Error('The demonstration is never loaded in production.');
+  const clock = new StoryClock();
+  const app = await NestFactory.createApplicationContext(AppModule.with({ config, clock }), {
+    logger: ['error', 'warn'],
+  });
+  try {
+    const knex = app.get<Database>(KNEX);
+    const made = await tellStory({
+      clock,
+      bases: app.get(DesignBasesService),
+      specifications: app.get(SpecificationsService),
+      sheets: app.get(SheetsService),
+      author: (author) => readAuthor(author, knex),
+    });
+    console.log(made.length > 0 ? `Demonstration: made ${made.join(', ')}` : 'Demonstration: all documents are there');
+  } finally {
+    await app.close();
+  }
+}
+
+main().catch((error: unknown) => {
+  console.error(error instanceof Error ? error.message : error);
+  process.exit(1);
+});
