@@ -67,7 +67,10 @@ export default typescript.config(
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true, allowBoolean: true }],
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', ignoreRestSiblings: true }],
       // A query builder of Knex is awaitable, and its callbacks return it.
-      '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { attributes: false, arguments: false } }],
+      '@typescript-eslint/no-misused-promises': [
+        'error',
+        { checksVoidReturn: { attributes: false, arguments: false } },
+      ],
       // Rows of a query are given their type where they are read.
       '@typescript-eslint/no-unnecessary-type-assertion': 'off',
       '@typescript-eslint/no-extraneous-class': 'off',
