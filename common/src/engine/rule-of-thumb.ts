@@ -34,13 +34,14 @@ const KV_PER_M = 500;
 const KV_PER_M_RANGE_KV = { least: 325, most: 1050 } as const;
 /** Accepted difference of the rule of 500 kV/m, share of the estimate. */
 const KV_PER_M_BAND_RATIO = 0.1;
-/** Accepted difference of a rod's specific creepage, share of the estimate; discs may differ by one unit. */
+/** Accepted difference of the specific creepage required, share of the estimate. */
 const CREEPAGE_BAND_RATIO = 0.1;
 
 /** Accepted difference from the suspension levels, which assume other lightning levels than IEC systems have. */
 const SUSPENSION_BAND_UNITS = 2;
 
 const ONLY_DISCS = 'The rule counts discs; the string is made of rods.';
+const OUTSIDE = 'The input lies outside the method.';
 const NO_VOLTAGE = 'The nominal voltage is not filled in.';
 
 const roundHalfUp = (value: number): number => Math.floor(Math.round(value * 1e9) / 1e9 + 0.5);
@@ -60,8 +61,8 @@ function complete(card: Card): RuleOfThumbRow {
 
 function discReason({ situation, unit }: Checked): string | null {
   if (unit !== null && !isDisc(unit)) return ONLY_DISCS;
-  if (situation.highestVoltageWhyNot !== null) return situation.highestVoltageWhyNot;
-  return situation.nominalVoltageKv === null ? NO_VOLTAGE : null;
+  if (situation.nominalVoltageKv === null) return NO_VOLTAGE;
+  return situation.stopped ? (situation.highestVoltageWhyNot ?? situation.altitudeWhyNot ?? OUTSIDE) : null;
 }
 
 function kvPerDisc(checked: Checked): RuleOfThumbRow[] {
@@ -150,28 +151,23 @@ function suspensionLevel(checked: Checked, calculation: Calculation): RuleOfThum
   });
 }
 
-function specificCreepage(
-  { situation, pollutionClass, unit, string }: Checked,
-  calculation: Calculation,
-): RuleOfThumbRow {
+function specificCreepage({ situation, pollutionClass, string }: Checked, calculation: Calculation): RuleOfThumbRow {
   const row = IEC_TS_60815_USCD.rows.find((one) => one.pollutionClass === pollutionClass);
-  const why =
-    situation.highestVoltageWhyNot ??
-    (situation.basis !== 'iec' || row === undefined
+  const noLevel =
+    situation.basis !== 'iec' || row === undefined
       ? 'The rule needs a pollution class.'
       : row.level1986 === null
         ? 'The edition of 1986 has no level for very light pollution.'
-        : null);
+        : null;
+  const why = situation.highestVoltageWhyNot ?? situation.altitudeWhyNot ?? noLevel;
   const estimate = why === null ? (row?.scd1986MmPerKvUm ?? null) : null;
-  const perUnit = unit !== null && isDisc(unit) && situation.highestVoltageKv !== null;
-  const share = estimate === null ? null : estimate * CREEPAGE_BAND_RATIO;
   return complete({
     id: 'specific-creepage-1986',
     rule: 'Specific creepage of 16, 20, 25 or 31 mm per kV of the highest voltage',
     estimate,
-    given: string?.scd1986ProvidedMmPerKvUm ?? null,
+    given: string?.scd1986RequiredMmPerKvUm ?? null,
     unit: 'mm/kV',
-    band: perUnit ? unit.creepageMm / (situation.highestVoltageKv ?? 1) : share,
+    band: estimate === null ? null : estimate * CREEPAGE_BAND_RATIO,
     why,
     source: cite(IEC_60815, 'Table II', row === undefined ? 'seen' : calculation.statusOf(IEC_TS_60815_USCD, row)),
   });

@@ -24,10 +24,11 @@ function cautionNotAssessed({ demands, testLevels }: Parts, units: number | null
     'power-frequency': testLevels.powerFrequencyWetKvRms !== null,
     minimum: false,
   };
+  const anyAssessed = demands.some(isAssessed);
   for (const { criterion, applies, whyNot } of demands) {
     if (!applies || whyNot === null) continue;
     calculation.missing(`string.${criterion}`, whyNot);
-    if (units === null) continue;
+    if (units === null || !anyAssessed) continue;
     const proved = tested[criterion];
     const text = `${NAMES[criterion]} was not assessed. ${whyNot}${
       proved ? ' The supplier has to prove this withstand of the complete string.' : ''

@@ -12,23 +12,33 @@ function verdictOf(one: Demand, disc: boolean, units: number, providedValue: num
   return disc || providedValue !== null ? 'met' : 'unknown';
 }
 
+/** What a string of so many units provides for one criterion that was assessed. */
+export function providedFor(
+  one: Demand,
+  disc: boolean,
+  units: number,
+): Pick<CriterionResult, 'providedValue' | 'marginPercent' | 'verdict'> {
+  const along = one.provided(units);
+  const providedValue = one.providedUnknown ? null : along;
+  const margin =
+    providedValue === null || one.requiredValue === null ? null : marginPercent(providedValue, one.requiredValue);
+  return { providedValue, marginPercent: margin, verdict: verdictOf(one, disc, units, along) };
+}
+
 /** One criterion as it is answered, for a string of so many units. */
 export function criterionResult(one: Demand, disc: boolean, units: number | null): CriterionResult {
   const { criterion, applies, unit, requiredUnits, requiredValue } = one;
-  const assessed = isAssessed(one);
-  const state = !applies ? 'not-applicable' : assessed ? 'assessed' : 'not-assessed';
-  const common = { criterion, applies, state, requiredUnits, requiredValue, unit } as const;
-  if (!assessed || units === null) {
-    return { ...common, providedValue: null, marginPercent: null, marginUnits: null, verdict: 'unknown' };
-  }
-  const along = one.provided(units);
-  const providedValue = one.providedUnknown ? null : along;
+  const provided = units === null || !isAssessed(one) ? null : providedFor(one, disc, units);
   return {
-    ...common,
-    providedValue,
-    marginPercent:
-      providedValue === null || requiredValue === null ? null : marginPercent(providedValue, requiredValue),
-    marginUnits: disc && requiredUnits !== null ? units - requiredUnits : null,
-    verdict: verdictOf(one, disc, units, along),
+    criterion,
+    applies,
+    state: !applies ? 'not-applicable' : one.whyNot === null ? 'assessed' : 'not-assessed',
+    requiredUnits,
+    requiredValue,
+    providedValue: provided === null ? null : provided.providedValue,
+    unit,
+    marginPercent: provided === null ? null : provided.marginPercent,
+    marginUnits: provided !== null && disc && units !== null && requiredUnits !== null ? units - requiredUnits : null,
+    verdict: provided === null ? 'unknown' : provided.verdict,
   };
 }

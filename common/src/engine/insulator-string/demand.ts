@@ -23,19 +23,22 @@ export interface Demand {
   providedUnknown: boolean;
 }
 
-const EMPTY: Omit<Demand, 'criterion' | 'unit'> = {
-  applies: true,
-  whyNot: null,
-  stopped: false,
-  requiredUnits: null,
-  requiredValue: null,
-  roundedRequirement: null,
-  provided: () => null,
-  gapReaches: null,
-  providedUnknown: false,
-};
+const nothing = (): null => null;
 
-export const demand = (given: Partial<Demand> & Pick<Demand, 'criterion' | 'unit'>): Demand => ({ ...EMPTY, ...given });
+/** Named one by one instead of spread: every demand has one shape, which is what makes thousands a second cheap. */
+export const demand = (given: Partial<Demand> & Pick<Demand, 'criterion' | 'unit'>): Demand => ({
+  criterion: given.criterion,
+  applies: given.applies ?? true,
+  whyNot: given.whyNot ?? null,
+  stopped: given.stopped ?? false,
+  requiredUnits: given.requiredUnits ?? null,
+  requiredValue: given.requiredValue ?? null,
+  roundedRequirement: given.roundedRequirement ?? null,
+  unit: given.unit,
+  provided: given.provided ?? nothing,
+  gapReaches: given.gapReaches ?? null,
+  providedUnknown: given.providedUnknown ?? false,
+});
 
 export const notAssessed = (criterion: Criterion, unit: string, whyNot: string, stopped = false): Demand =>
   demand({ criterion, unit, whyNot, stopped });

@@ -1,5 +1,5 @@
 import type { UnitsOutResult } from '../model';
-import { criterionResult } from './criterion-result';
+import { providedFor } from './criterion-result';
 import { isAssessed, type Demand } from './demand';
 
 const UNITS_OUT = [1, 2] as const;
@@ -9,8 +9,8 @@ export function unitsOut(demands: readonly Demand[], units: number): UnitsOutRes
   const electrical = demands.filter((one) => isAssessed(one) && one.criterion !== 'minimum');
   return UNITS_OUT.filter((out) => out < units).flatMap((out) =>
     electrical.map((one) => {
-      const { criterion, marginPercent, verdict } = criterionResult(one, true, units - out);
-      return { unitsOut: out, criterion, marginPercent, verdict };
+      const { marginPercent, verdict } = providedFor(one, true, units - out);
+      return { unitsOut: out, criterion: one.criterion, marginPercent, verdict };
     }),
   );
 }
