@@ -1,5 +1,6 @@
 import * as airGaps from './air-gaps';
 import * as atmosphere from './atmosphere';
+import * as clearances from './clearances/formulas';
 import * as stringFormulas from './insulator-string/formulas';
 import * as overvoltage from './overvoltage';
 import * as pollution from './pollution';
@@ -11,7 +12,7 @@ import { Calculation, figureText, formula, type Formula } from './trace';
 
 type AnyFormula = Formula<Record<string, number>>;
 
-const ROOMS = { airGaps, atmosphere, overvoltage, pollution, stringFormulas };
+const ROOMS = { airGaps, atmosphere, clearances, overvoltage, pollution, stringFormulas };
 
 const FORMULAS: AnyFormula[] = Object.values(ROOMS)
   .flatMap((room) => Object.values(room) as unknown[])
