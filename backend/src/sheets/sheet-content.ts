@@ -1,5 +1,5 @@
-import type { StoredRevision } from '../specifications/revision-row';
-import { siteDay } from '../specifications/site-day';
+import { siteDay } from '../platform/site-day';
+import type { StoredRevision } from '../specifications/specifications.service';
 import type { SheetContent } from './document/content';
 
 /** What the sheet of a stored revision says. Its date is that of the content, so that the same content has the same bytes. */

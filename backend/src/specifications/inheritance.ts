@@ -92,8 +92,7 @@ function inWords(path: string, value: unknown): string {
   }
   const name = path.split('.').at(-1) ?? path;
   const choices = (CHOICE_LABELS as Record<string, Record<string, string>>)[name];
-  const words = choices?.[String(value)];
-  if (words) return words;
+  const text = String(value as string | number | boolean);
   const unit = fieldOf(path)?.unit;
-  return unit ? `${String(value)} ${unit}` : String(value);
+  return choices?.[text] ?? (unit ? `${text} ${unit}` : text);
 }

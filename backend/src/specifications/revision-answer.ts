@@ -1,7 +1,7 @@
 import type { Revision } from '@bellgap/common/api';
 import { mayWriteDrafts, type SignedIn } from '../platform/person';
 import { newerBasisRevision, type StoredRevision } from './revision-row';
-import { siteDay } from './site-day';
+import { siteDay } from '../platform/site-day';
 
 /** A revision as a person sees it. */
 export function revisionAnswer(stored: StoredRevision, person: Pick<SignedIn, 'grants'>): Revision {

@@ -16,6 +16,8 @@ import { RevisionsRepository, type RevisionAddress, type RevisionContent } from 
 import { SpecificationsListQuery } from './specifications.list-query';
 import { changesBetween, sameValue } from './values';
 
+export type { RevisionAddress, StoredRevision };
+
 const FIRST_LABEL = 'A';
 
 type Create = BodyOf<typeof contract.createSpecification>;
