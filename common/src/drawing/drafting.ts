@@ -59,14 +59,31 @@ function reach(draft: Draft, textHeightMm: number): Point[] {
   }
 }
 
+export interface Bounds {
+  left: number;
+  top: number;
+  right: number;
+  bottom: number;
+}
+
+function widen(box: Bounds, { xMm, yMm }: Point): void {
+  if (xMm < box.left) box.left = xMm;
+  if (xMm > box.right) box.right = xMm;
+  if (yMm < box.top) box.top = yMm;
+  if (yMm > box.bottom) box.bottom = yMm;
+}
+
 /** Collects primitives in any place, and hands them over moved to the origin with a margin. */
 export class DraftingTable {
   private readonly drafts: Draft[] = [];
+  private readonly box: Bounds = { left: Infinity, top: Infinity, right: -Infinity, bottom: -Infinity };
 
   constructor(readonly textHeightMm: number) {}
 
   add(draft: Draft, frame?: Transform): void {
-    this.drafts.push(frame ? moved(frame, draft) : draft);
+    const placed = frame ? moved(frame, draft) : draft;
+    this.drafts.push(placed);
+    for (const point of reach(placed, this.textHeightMm)) widen(this.box, point);
   }
 
   path(layer: Layer, segments: Segment[], options: { filled?: boolean; about?: string; frame?: Transform } = {}): void {
@@ -96,17 +113,8 @@ export class DraftingTable {
     this.add({ kind: 'dimension', layer, from: p, to: q, offsetMm, text, about, ...(beside ? { beside } : {}) });
   }
 
-  bounds(): { left: number; top: number; right: number; bottom: number } {
-    const box = { left: Infinity, top: Infinity, right: -Infinity, bottom: -Infinity };
-    for (const draft of this.drafts) {
-      for (const { xMm, yMm } of reach(draft, this.textHeightMm)) {
-        box.left = Math.min(box.left, xMm);
-        box.right = Math.max(box.right, xMm);
-        box.top = Math.min(box.top, yMm);
-        box.bottom = Math.max(box.bottom, yMm);
-      }
-    }
-    return box;
+  bounds(): Readonly<Bounds> {
+    return this.box;
   }
 
   finish(title: string, description: string): Drawing {

@@ -32,12 +32,24 @@ export function plain(value: number | null | undefined): string {
 export const withUnit = (text: string, unit: string): string =>
   text === UNKNOWN || unit === '' ? text : `${text} ${unit}`;
 
+/** Some sources have no edition or clause; a dash or "none" then stands in the row. */
+const said = (words: string): boolean => words !== '' && words !== '-' && words !== 'none';
+
 export function citation({ document, edition, clause }: SourceReference): string {
-  const named = edition && edition !== '-' ? `${document}:${edition}` : document;
-  return clause && clause !== '-' ? `${named}, ${clause}` : named;
+  const named = said(edition) ? `${document}:${edition}` : document;
+  return said(clause) ? `${named}, ${clause}` : named;
 }
 
 export const statusWords = ({ status }: SourceReference): string => CHOICE_LABELS.status[status];
+
+export const sameWords = (one: string, other: string): boolean => one.toLowerCase() === other.toLowerCase();
+
+/** Source and status in one line, each once. */
+export function sourceWords(source: SourceReference): string {
+  const cited = citation(source);
+  const status = statusWords(source);
+  return sameWords(cited, status) ? cited : `${cited}; ${status}`;
+}
 
 /** Label of a choice; null is said, never left blank. */
 export function choice(list: Record<string, string>, value: string | number | null | undefined): string {
@@ -55,6 +67,12 @@ export function valueAt(root: unknown, path: string): unknown {
 }
 
 const CHOICES = CHOICE_LABELS as Record<string, Record<string, string>>;
+const LIST_OF: Record<string, string> = {
+  'site.pollution.class': 'pollutionClass',
+  'site.pollution.type': 'pollutionType',
+  'site.pollution.basis': 'pollutionBasis',
+  'clearance.method': 'clearanceMethod',
+};
 
 /** Any input as words with its unit: numbers, choices, and an insulation level as one row. */
 export function inputWords(path: string, value: unknown): string {
@@ -69,14 +87,14 @@ export function inputWords(path: string, value: unknown): string {
       })
       .join('; ');
   }
-  const name = path.split('.').pop() ?? path;
+  const name = LIST_OF[path] ?? path.split('.').pop() ?? path;
   return CHOICES[name]?.[String(value)] ?? String(value);
 }
 
 export const DISTANCE_WORDS: Record<ClearanceRow['distance'], string> = {
   'phase-to-earth': 'Distance from phase to earth',
   'phase-to-phase': 'Distance between phases',
-  section: 'Section distance',
+  section: 'Distance to a section',
   safety: 'Safety distance for people',
 };
 

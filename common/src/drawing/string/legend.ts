@@ -8,7 +8,7 @@ const BARS_MM = [1000, 500, 200, 100, 50] as const;
 /** Scale bar and what was assumed, below everything drawn so far. */
 export function drawLegend(table: DraftingTable, plan: StringPlan): void {
   const t = table.textHeightMm;
-  const { left, right, bottom } = table.bounds();
+  const { left, right, bottom } = { ...table.bounds() };
   const bar = BARS_MM.find((length) => length <= 0.7 * (right - left)) ?? 50;
   let y = bottom + 2 * t;
   for (const [from, to] of [

@@ -132,7 +132,7 @@ function drawMark(doc: PDFKit.PDFDocument, mark: Mark): void {
 function drawAcross(doc: PDFKit.PDFDocument, sheet: LaidOutSheet, word: string): void {
   const { widthPt, heightPt } = sheet;
   const share = widthOf(word, 'semibold');
-  const size = (0.78 * Math.hypot(widthPt, heightPt)) / share;
+  const size = (0.66 * Math.hypot(widthPt, heightPt)) / share;
   const angle = (-Math.atan2(heightPt, widthPt) * 180) / Math.PI;
   const width = share * size;
   doc.save();

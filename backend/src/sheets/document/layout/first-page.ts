@@ -4,6 +4,7 @@ import { paragraph, type Block } from '../blocks';
 import type { SheetContent } from '../content';
 import { conditions } from '../sections/conditions';
 import { notices } from '../sections/cautions';
+import { criteria } from '../sections/criteria';
 import { governing, requiredValues } from '../sections/required-values';
 import { runsOf } from '../fonts/faces';
 import { answerWords, plain } from '../words';
@@ -17,6 +18,12 @@ const PT_PER_MM = 72 / 25.4;
 const SCALES = [1, 2, 5, 10, 15, 20, 25, 30, 40, 50, 75, 100, 150, 200, 500] as const;
 const TEXT_PT = 6.8;
 const GUTTER = 14;
+/** From this proportion on a drawing stands above the values, not beside them. */
+const WIDE = 1.15;
+const LEAST_SHARE = 0.3;
+const PAIR_PT = 14;
+const COLUMN_HEAD_PT = 34;
+const DRAWING_SHARE = 0.57;
 
 interface Fitted {
   drawing: Drawing;
@@ -24,11 +31,9 @@ interface Fitted {
 }
 
 /** The largest usual scale at which the drawing, with its words at a readable size, fits into a box. */
-export function fitDrawing(content: SheetContent, widthPt: number, heightPt: number): Fitted | null {
+function fitDrawing(content: SheetContent, plainDrawing: Drawing, widthPt: number, heightPt: number): Fitted | null {
   const draw = (textScale: number): Drawing | null =>
     drawString(content.input, content.context, content.evaluation, { textScale });
-  const plainDrawing = draw(1);
-  if (!plainDrawing) return null;
   const [widthMm, heightMm] = [widthPt / PT_PER_MM, heightPt / PT_PER_MM];
   const least = Math.max((0.7 * plainDrawing.widthMm) / widthMm, (0.7 * plainDrawing.heightMm) / heightMm);
   for (const scale of SCALES) {
@@ -50,31 +55,44 @@ export function layOutFirstPage(paper: Paper, geometry: PageGeometry, content: S
 
   const values = requiredValues(content);
   const circumstances = conditions(content);
-  const wide = isWide(content);
-  const half = (region.width - GUTTER) / 2;
+  const byCriterion = criteria(content);
+  const drawing = drawString(content.input, content.context, content.evaluation);
   const rest: Block[] = [];
   let scale = '–';
-  if (wide) {
-    const fitted = fitDrawing(content, region.width, 0.42 * flow.room);
+  const column = (x: number, width: number, top: number, blocks: Block[]): void => {
+    rest.push(...new Flow(paper, { x, width, top, bottom: region.bottom }, 0, null).place(blocks));
+  };
+  if (drawing && drawing.widthMm > WIDE * drawing.heightMm) {
+    const half = (region.width - GUTTER) / 2;
+    const columnHeight = COLUMN_HEAD_PT + PAIR_PT * Math.max(pairsIn(values), pairsIn(circumstances));
+    const fitted = fitDrawing(
+      content,
+      drawing,
+      region.width,
+      Math.max(flow.room - columnHeight, LEAST_SHARE * flow.room),
+    );
     if (fitted) scale = placeDrawing(paper, fitted, region.x, flow.y, region.width, false);
-    const drawn = fitted ? (fitted.drawing.heightMm / fitted.scale) * PT_PER_MM : 0;
-    const top = flow.y + drawn + 6;
-    const left = new Flow(paper, { x: region.x, width: half, top, bottom: region.bottom }, 0, null);
-    rest.push(...left.place(values));
-    const right = new Flow(paper, { x: region.x + half + GUTTER, width: half, top, bottom: region.bottom }, 0, null);
-    rest.push(...right.place(circumstances));
+    const top = flow.y + (fitted ? heightOf(fitted) : 0) + 6;
+    column(region.x, half, top, values);
+    column(region.x + half + GUTTER, half, top, circumstances);
+    rest.push(...byCriterion);
   } else {
-    const drawingWidth = 0.5 * region.width;
-    const fitted = fitDrawing(content, drawingWidth, flow.room);
-    if (fitted) scale = placeDrawing(paper, fitted, region.x, flow.y, drawingWidth, true);
-    const x = fitted ? region.x + drawingWidth + GUTTER : region.x;
-    const width = region.x + region.width - x;
-    const column = new Flow(paper, { x, width, top: flow.y, bottom: region.bottom }, 0, null);
-    rest.push(...column.place([...values, ...circumstances]));
+    const width = DRAWING_SHARE * region.width;
+    const fitted = drawing && fitDrawing(content, drawing, width, flow.room);
+    if (fitted) scale = placeDrawing(paper, fitted, region.x, flow.y, width, true);
+    const left = fitted ? width + GUTTER : 0;
+    column(region.x + left, region.width - left, flow.y, [...values, ...circumstances]);
+    if (fitted) column(region.x, width, flow.y + heightOf(fitted) + 4, byCriterion);
+    else rest.push(...byCriterion);
   }
   layOutTitleBlock(paper, geometry, content, scale);
   return rest;
 }
+
+const pairsIn = (blocks: Block[]): number =>
+  blocks.reduce((sum, block) => sum + (block.kind === 'pairs' ? block.rows.length : 0), 0);
+
+const heightOf = ({ drawing, scale }: Fitted): number => (drawing.heightMm / scale) * PT_PER_MM;
 
 function headBlocks(content: SheetContent): Block[] {
   const { input, context, evaluation } = content;
@@ -101,11 +119,6 @@ function headBlocks(content: SheetContent): Block[] {
   const items = notices(content);
   if (items.length > 0) blocks.push({ kind: 'notice', items });
   return blocks;
-}
-
-function isWide({ input, context, evaluation }: SheetContent): boolean {
-  const drawing = drawString(input, context, evaluation);
-  return drawing !== null && drawing.widthMm > 1.15 * drawing.heightMm;
 }
 
 function placeDrawing(

@@ -21,8 +21,13 @@ export interface Paper {
 const BODY_SIZE = 8.5;
 const NOTE_SIZE = 7;
 const HEADING = { 1: { size: 12.5, before: 16, after: 5 }, 2: { size: 9, before: 9, after: 3 } } as const;
-/** A heading stands with at least this much of what it heads. */
+/** A heading stands with at least this much of what it heads; a short list of pairs is not cut at all. */
 const KEEP_PT = 46;
+const MOST_KEPT_PAIRS = 12;
+const PAIR_PT = BODY_SIZE * LEADING + 2.7;
+
+const keepOf = (next: Block): number =>
+  next.kind === 'pairs' && next.rows.length <= MOST_KEPT_PAIRS ? next.rows.length * PAIR_PT : KEEP_PT;
 
 /** Runs blocks down a region and, where allowed, over as many pages as they need. */
 export class Flow {
@@ -99,7 +104,7 @@ export class Flow {
     const { size, before, after } = HEADING[block.level];
     const lines = wrap(block.text, 'semibold', size, this.here.width);
     const height = before + lines.length * size * LEADING + after;
-    if (!this.reserve(height + (next ? KEEP_PT : 0))) return block;
+    if (!this.reserve(height + (next ? keepOf(next) : 0))) return block;
     if (this.y > this.here.top) this.y += before;
     const marks: Mark[] = [];
     const top = this.y;

@@ -39,7 +39,7 @@ export const COLOURS = {
   hair: '#D8D1C3',
   glaze: '#7A3E1D',
   wash: '#F4E9E1',
-  ghost: '#EDEAE4',
+  ghost: '#F3F1EC',
 } as const;
 
 export const element = (tag: Tag, page: number, marks: Mark[] = [], children: Element[] = []): Element => ({

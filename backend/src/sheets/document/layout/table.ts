@@ -7,6 +7,8 @@ import { LEADING, textMarks } from './text';
 const SIZE = 8.5;
 const HEAD_SIZE = 7.5;
 const PAD_X = 4;
+/** A column of figures keeps away from the words at its right. */
+const PAD_FIGURES = 9;
 const PAD_Y = 2.4;
 
 interface Box {
@@ -76,7 +78,7 @@ function layOutRow(cells: Cell[], boxes: Box[], size: number, governs: Row['gove
       const face =
         governs && (words.face ?? 'sans') === 'sans' && words.tone !== 'soft' ? 'semibold' : (words.face ?? 'sans');
       const lineSize = words.size ?? size;
-      return wrap(words.text, face, lineSize, box.width - 2 * PAD_X).map((text) => ({
+      return wrap(words.text, face, lineSize, box.width - padding(cell.align)).map((text) => ({
         text,
         face,
         size: lineSize,
@@ -88,6 +90,8 @@ function layOutRow(cells: Cell[], boxes: Box[], size: number, governs: Row['gove
   });
 }
 
+const padding = (align: Cell['align']): number => PAD_X + (align === 'right' ? PAD_FIGURES : PAD_X);
+
 const rowHeight = (cells: LaidOutCell[]): number => Math.max(0, ...cells.map(({ height }) => height));
 
 function placeCells(flow: Flow, cells: LaidOutCell[], tag: 'TH' | 'TD'): Element[] {
@@ -96,7 +100,7 @@ function placeCells(flow: Flow, cells: LaidOutCell[], tag: 'TH' | 'TD'): Element
     let top = flow.y + PAD_Y;
     for (const { text, face, size, tone } of lines) {
       marks.push(
-        ...textMarks(text, flow.here.x + box.x + PAD_X, top, box.width - 2 * PAD_X, { face, size, tone, align }),
+        ...textMarks(text, flow.here.x + box.x + PAD_X, top, box.width - padding(align), { face, size, tone, align }),
       );
       top += size * LEADING;
     }

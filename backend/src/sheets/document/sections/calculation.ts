@@ -1,8 +1,8 @@
 import type { Status, TraceLine } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
-import { heading, paragraph, type Block, type Cell, type Row } from '../blocks';
+import { heading, paragraph, type Block, type Cell, type Row, type Words } from '../blocks';
 import type { SheetContent } from '../content';
-import { citation, statusWords, withUnit } from '../words';
+import { citation, sameWords, statusWords, withUnit } from '../words';
 
 const RESULT_DIGITS = 10;
 const SIZE = 7.5;
@@ -23,10 +23,10 @@ export function calculation({ evaluation }: SheetContent): Block[] {
       summary: 'The calculation line by line: formula, substitution, result, source and status',
       size: SIZE,
       columns: [
-        { head: 'no.', share: 0.42, align: 'right' },
-        { head: 'formula and substitution', share: 4.6 },
+        { head: 'no', share: 0.5, align: 'right' },
+        { head: 'formula and substitution', share: 4.1 },
         { head: 'result', share: 1.9, align: 'right' },
-        { head: 'source and status', share: 2.4 },
+        { head: 'source and status', share: 3 },
       ],
       rows: evaluation.trace.map(traceRow),
     },
@@ -38,8 +38,8 @@ function traceRow(line: TraceLine, index: number): Row {
   const working: Cell = {
     lines: [
       { text: line.heading, face: 'semibold' },
-      { text: line.formula, face: 'mono' },
-      ...(same || line.substitution === '' ? [] : [{ text: line.substitution, face: 'mono' as const }]),
+      { text: printed(line.formula), face: 'mono' },
+      ...(same || line.substitution === '' ? [] : [{ text: printed(line.substitution), face: 'mono' as const }]),
     ],
   };
   return {
@@ -47,9 +47,22 @@ function traceRow(line: TraceLine, index: number): Row {
       { lines: [{ text: String(index + 1), face: 'mono', tone: 'soft' }], align: 'right' },
       working,
       { lines: [{ text: withUnit(resultWords(line.result), line.unit), face: 'mono' }], align: 'right' },
-      { lines: [{ text: citation(line.source) }, { text: statusWords(line.source), tone: 'soft' }] },
+      { lines: sourceLines(line) },
     ],
   };
+}
+
+/** Signs as they are printed: a raised dot, a root, a minus. */
+const printed = (formula: string): string =>
+  formula
+    .replace(/ \* /g, ' · ')
+    .replace(/\bsqrt\(/g, '√(')
+    .replace(/ - /g, ' − ');
+
+function sourceLines({ source }: TraceLine): Words[] {
+  const cited = citation(source);
+  const status = statusWords(source);
+  return sameWords(cited, status) ? [{ text: cited }] : [{ text: cited }, { text: status, tone: 'soft' }];
 }
 
 function resultWords(result: number | string | null): string {

@@ -2,7 +2,7 @@ import type { ClearanceRow } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { cell, figures, heading, paragraph, type Block, type Row } from '../blocks';
 import type { SheetContent } from '../content';
-import { citation, DISTANCE_WORDS, near, plain, SHAPE_WORDS, statusWords, STRESS_WORDS, up, withUnit } from '../words';
+import { DISTANCE_WORDS, near, plain, SHAPE_WORDS, sourceWords, STRESS_WORDS, up, withUnit } from '../words';
 
 const KINDS: ClearanceRow['distance'][] = ['phase-to-earth', 'phase-to-phase', 'section', 'safety'];
 
@@ -34,8 +34,8 @@ export function clearances({ evaluation }: SheetContent): Block[] {
         { head: 'shape', share: 1.7 },
         { head: 'withstand, kV', share: 1.2, align: 'right' },
         { head: 'altitude factor', share: 1.2, align: 'right' },
-        { head: 'needed', share: 1.2, align: 'right' },
-        { head: 'source', share: 3 },
+        { head: 'needed', share: 1.45, align: 'right' },
+        { head: 'source', share: 2.9 },
       ],
       rows: rows.map(clearanceRow),
     });
@@ -55,7 +55,7 @@ function clearanceRow(row: ClearanceRow): Row {
       figures(plain(row.withstandKv)),
       figures(near(row.altitudeFactor, 3)),
       figures(value),
-      cell(`${citation(row.source)}; ${statusWords(row.source)}${row.interpolated ? '; interpolated' : ''}`, {
+      cell(`${sourceWords(row.source)}${row.interpolated ? '; interpolated' : ''}`, {
         tone: 'soft',
       }),
     ],

@@ -2,7 +2,7 @@ import type { SpecificationInput } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { heading, type Block, type Pairs } from '../blocks';
 import type { SheetContent } from '../content';
-import { choice, inputWords, near, plain, withUnit } from '../words';
+import { choice, inputWords, plain } from '../words';
 
 type Pair = Pairs['rows'][number];
 
@@ -15,7 +15,7 @@ export function conditions({ input, basis, overrides }: SheetContent): Block[] {
       : row,
   );
   const from = basis ? `, basis ${basis.number} rev ${basis.revision}` : '';
-  return [heading(2, `Conditions${from}`), { kind: 'pairs', rows, labelShare: 0.46 }];
+  return [heading(2, `Conditions${from}`), { kind: 'pairs', rows, labelShare: 0.47 }];
 }
 
 type Placed = Pair & { path: string };
@@ -93,7 +93,7 @@ function stringRows({ string }: SpecificationInput): Placed[] {
           {
             path: 'string',
             label: 'Legs from vertical',
-            value: `${withUnit(near(string.vAngleWindwardDeg, 1), '°')} and ${withUnit(near(string.vAngleLeewardDeg, 1), '°')}`,
+            value: `${plain(string.vAngleWindwardDeg)}° and ${plain(string.vAngleLeewardDeg)}°`,
           },
         ]
       : [];

@@ -10,17 +10,18 @@ export function criteria({ evaluation }: SheetContent): Block[] {
   if (!answer) return [];
   const whys = new Map(evaluation.notAssessed.map(({ part, why }) => [part, why]));
   const blocks: Block[] = [
-    heading(1, 'Units by criterion'),
+    heading(2, 'Units by criterion'),
     {
       kind: 'table',
+      size: 7.8,
       summary: 'Units of the string by criterion, with what each needs, what is provided, the margin and the verdict',
       columns: [
-        { head: 'criterion', share: 2.2 },
+        { head: 'criterion', share: 2.1 },
         { head: 'needed', share: 1.6, align: 'right' },
         { head: 'provided', share: 1.6, align: 'right' },
-        { head: 'units needed', share: 1.1, align: 'right' },
-        { head: 'margin', share: 1.1, align: 'right' },
-        { head: 'verdict', share: 1.2 },
+        { head: 'units', share: 0.95, align: 'right' },
+        { head: 'margin', share: 1.3, align: 'right' },
+        { head: 'verdict', share: 1.15 },
       ],
       rows: answer.criteria.map((row) => criterionRow(row, row.criterion === answer.governedBy, whys)),
     },
@@ -51,7 +52,7 @@ export function criteria({ evaluation }: SheetContent): Block[] {
 function criterionRow(row: CriterionResult, governs: boolean, whys: Map<string, string>): Row {
   const name = CHOICE_LABELS.criterion[row.criterion];
   if (row.state !== 'assessed') {
-    const why = whys.get(row.criterion);
+    const why = whys.get(`string.${row.criterion}`);
     const words = row.state === 'not-applicable' ? 'does not apply' : `not assessed${why ? `: ${why}` : ''}`;
     return { cells: [cell(name), cell(words, { tone: 'soft', span: 5 })] };
   }

@@ -3,7 +3,6 @@ import type { SheetContent } from '../content';
 import { calculation } from './calculation';
 import { cautions } from './cautions';
 import { clearances } from './clearances';
-import { criteria } from './criteria';
 import { notAssessed } from './not-assessed';
 import { overrides } from './overrides';
 import { particulars } from './particulars';
@@ -14,15 +13,14 @@ import { supplierProof } from './supplier-proof';
 
 /** What follows the first page, in its order. */
 const SECTIONS: ((content: SheetContent) => Block[])[] = [
-  criteria,
   clearances,
   supplierProof,
   ruleOfThumb,
-  cautions,
-  notAssessed,
-  overrides,
-  particulars,
   calculation,
+  cautions,
+  overrides,
+  notAssessed,
+  particulars,
   standingCautions,
   revisionHistory,
 ];

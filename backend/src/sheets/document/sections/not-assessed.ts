@@ -1,20 +1,39 @@
+import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
 import { cell, heading, type Block } from '../blocks';
 import type { SheetContent } from '../content';
 
 const PARTS: Record<string, string> = {
+  string: 'Insulator string',
+  clearances: 'Clearances',
+  clearance: 'Clearances',
   mechanical: 'Mechanical strength',
   swing: 'Swing and tower head',
   towerHead: 'Swing and tower head',
   midSpan: 'Spacing at mid span',
   phaseSpacing: 'Spacing at mid span',
   bay: 'Substation bay',
-  string: 'Insulator string',
-  clearances: 'Clearances',
-  clearance: 'Clearances',
+  voltageSharing: 'Voltage along the string',
+  extraUnits: 'Extra units',
+  phaseToEarthMm: 'Distance to earth',
+  phaseToPhaseMm: 'Distance between phases',
+  stringLengthWithFittingsMinMm: 'Shortest length with fittings',
+  stringLengthWithFittingsMaxMm: 'Longest length with fittings',
+  overvoltages: 'Representative overvoltages',
 };
+const CRITERIA: Record<string, string> = CHOICE_LABELS.criterion;
 
-const sentence = (part: string): string =>
-  PARTS[part] ?? part.charAt(0).toUpperCase() + part.slice(1).replace(/-/g, ' ');
+/** A part as the answer names it, in words: a criterion, an input by its label, or a part of the method. */
+function partWords(part: string): string {
+  const last = part.split('.').pop() ?? part;
+  const words = fieldOf(part)?.label ?? CRITERIA[last] ?? PARTS[last];
+  if (words) return words;
+  const spaced = last
+    .replace(/Mm$/, '')
+    .replace(/-/g, ' ')
+    .replace(/([a-z])([A-Z])/g, '$1 $2')
+    .toLowerCase();
+  return spaced.charAt(0).toUpperCase() + spaced.slice(1);
+}
 
 /** What the sheet says nothing about, and why: never passed off as met. */
 export function notAssessed({ evaluation }: SheetContent): Block[] {
@@ -28,7 +47,7 @@ export function notAssessed({ evaluation }: SheetContent): Block[] {
         { head: 'part', share: 1.6 },
         { head: 'why', share: 5 },
       ],
-      rows: evaluation.notAssessed.map(({ part, why }) => ({ cells: [cell(sentence(part)), cell(why)] })),
+      rows: evaluation.notAssessed.map(({ part, why }) => ({ cells: [cell(partWords(part)), cell(why)] })),
     },
   ];
 }

@@ -1,7 +1,7 @@
 import { fieldOf } from '@bellgap/common/schemas';
 import { cell, heading, type Block } from '../blocks';
 import type { SheetContent } from '../content';
-import { inputWords, NOT_STATED, valueAt } from '../words';
+import { inputWords, UNKNOWN, valueAt } from '../words';
 
 /** Where the sheet departs from its design basis, and why. */
 export function overrides({ overrides: rows, input, basis }: SheetContent): Block[] {
@@ -20,11 +20,17 @@ export function overrides({ overrides: rows, input, basis }: SheetContent): Bloc
       rows: rows.map(({ path, reason }) => ({
         cells: [
           cell(fieldOf(path)?.label ?? path),
-          cell(basis?.system ? inputWords(path, valueAt(basis, path)) : NOT_STATED, { tone: 'soft' }),
+          cell(basisWords(basis, path), { tone: 'soft' }),
           cell(inputWords(path, valueAt(input, path))),
           cell(reason || 'no reason given'),
         ],
       })),
     },
   ];
+}
+
+/** A basis holds the system of a line or yard; of the site and the string it says nothing. */
+function basisWords(basis: SheetContent['basis'], path: string): string {
+  const value = valueAt(basis, path);
+  return value === undefined ? UNKNOWN : inputWords(path, value);
 }

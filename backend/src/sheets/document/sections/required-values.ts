@@ -1,7 +1,7 @@
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { heading, paragraph, type Block, type Pairs } from '../blocks';
 import type { SheetContent } from '../content';
-import { down, near, plain, UNKNOWN, up, withUnit } from '../words';
+import { down, near, plain, up, withUnit } from '../words';
 
 const VOLTAGE_BASIS = { 'phase-to-earth': 'phase to earth', 'line-to-line': 'line to line' } as const;
 
@@ -44,13 +44,13 @@ export function requiredValues({ evaluation, context, input }: SheetContent): Bl
     add('Creepage needed', withUnit(up(answer.creepageRequiredMm), 'mm'), undefined, true);
     add('Creepage provided', withUnit(down(answer.creepageProvidedMm), 'mm'));
     const basis = answer.creepageVoltageBasis ? VOLTAGE_BASIS[answer.creepageVoltageBasis] : undefined;
-    add('counted on', withUnit(near(answer.creepageVoltageKv, 1), 'kV rms'), basis);
+    add('Creepage voltage', withUnit(near(answer.creepageVoltageKv, 1), 'kV rms'), basis);
     const unified = (label: string, value: number | null, turn: typeof up): void =>
       add(label, withUnit(turn(value, 1), 'mm/kV'), basis);
     unified('USCD needed', answer.uscdRequiredMmPerKv, up);
     unified('USCD provided', answer.uscdProvidedMmPerKv, down);
-    add('as of 1986, needed', withUnit(up(answer.scd1986RequiredMmPerKvUm, 1), 'mm/kV'), 'line to line');
-    add('as of 1986, provided', withUnit(down(answer.scd1986ProvidedMmPerKvUm, 1), 'mm/kV'), 'line to line');
+    add('SCD of 1986 needed', withUnit(up(answer.scd1986RequiredMmPerKvUm, 1), 'mm/kV'), 'line to line');
+    add('SCD of 1986 provided', withUnit(down(answer.scd1986ProvidedMmPerKvUm, 1), 'mm/kV'), 'line to line');
     if (answer.leakageInPerKvLineToGround !== null)
       add('Leakage', withUnit(near(answer.leakageInPerKvLineToGround, 2), 'in/kV'), 'line to ground');
     add('Section length', withUnit(plain(answer.sectionLengthMm), 'mm'));
@@ -58,8 +58,13 @@ export function requiredValues({ evaluation, context, input }: SheetContent): Bl
     add('Dry arc provided', withUnit(down(answer.dryArcMm), 'mm'), devicesWords(input.string?.arcingDevices));
     if (answer.dryArcWithDevicesMm !== null) add('between devices', withUnit(down(answer.dryArcWithDevicesMm), 'mm'));
     const [least, most] = [answer.stringLengthWithFittingsMinMm, answer.stringLengthWithFittingsMaxMm];
-    add('Length with fittings', least === null || most === null ? UNKNOWN : `${near(least)} to ${near(most)} mm`);
+    add(
+      'Length with fittings',
+      least === null || most === null ? 'not assessed' : `${near(least)} to ${near(most)} mm`,
+    );
     add('Mass of a string', withUnit(near(answer.massKg, 1), 'kg'));
+    if (answer.massPerSetKg !== null && answer.massPerSetKg !== answer.massKg)
+      add('Mass of the set', withUnit(near(answer.massPerSetKg, 1), 'kg'));
   }
   const unit = context.insulator;
   if (unit) {
@@ -69,7 +74,7 @@ export function requiredValues({ evaluation, context, input }: SheetContent): Bl
   const { phaseToEarthMm = null, phaseToPhaseMm = null } = evaluation.clearances ?? {};
   add('Distance to earth', withUnit(up(phaseToEarthMm), 'mm'), undefined, true);
   add('Between phases', withUnit(up(phaseToPhaseMm), 'mm'), undefined, true);
-  return [heading(2, 'Required values'), { kind: 'pairs', rows, labelShare: 0.46 }];
+  return [heading(2, 'Required values'), { kind: 'pairs', rows, labelShare: 0.47 }];
 }
 
 function devicesWords(devices: 'none' | 'horns' | 'rings' | null | undefined): string | undefined {

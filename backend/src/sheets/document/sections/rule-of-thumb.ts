@@ -1,6 +1,6 @@
 import { cell, figures, heading, paragraph, type Block } from '../blocks';
 import type { SheetContent } from '../content';
-import { citation, near, plain, statusWords, withUnit } from '../words';
+import { near, plain, sourceWords, withUnit } from '../words';
 
 const VERDICTS = { within: 'within the band', explain: 'to be explained', 'out-of-range': 'does not apply' } as const;
 
@@ -16,8 +16,8 @@ export function ruleOfThumb({ evaluation }: SheetContent): Block[] {
       summary: 'Estimates by rules of thumb beside the figures of the sheet',
       columns: [
         { head: 'rule', share: 3 },
-        { head: 'estimate', share: 1.2, align: 'right' },
-        { head: 'sheet', share: 1.2, align: 'right' },
+        { head: 'estimate', share: 1.35, align: 'right' },
+        { head: 'sheet', share: 1.35, align: 'right' },
         { head: 'band', share: 0.9, align: 'right' },
         { head: 'verdict', share: 1.9 },
         { head: 'source', share: 2.4 },
@@ -29,7 +29,7 @@ export function ruleOfThumb({ evaluation }: SheetContent): Block[] {
           figures(withUnit(digits(row.given), row.unit)),
           figures(row.band === null ? '–' : `±${plain(row.band)}`),
           cell(row.why ? `${VERDICTS[row.verdict]}: ${row.why}` : VERDICTS[row.verdict]),
-          cell(`${citation(row.source)}; ${statusWords(row.source)}`, { tone: 'soft' }),
+          cell(sourceWords(row.source), { tone: 'soft' }),
         ],
       })),
     },
