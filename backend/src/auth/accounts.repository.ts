@@ -28,16 +28,16 @@ export class AccountsRepository {
   constructor(@Inject(KNEX) private readonly knex: Knex) {}
 
   async findByEmail(email: string, db: Knex = this.knex): Promise<Account | null> {
-    const row = await db<AccountRow>('users as u')
+    const row = (await db('users as u')
       .whereRaw('lower(u.email) = lower(?)', [email])
-      .first(...COLUMNS);
+      .first(...COLUMNS)) as AccountRow | undefined;
     return row ? toAccount(row) : null;
   }
 
   async find(id: string, db: Knex = this.knex): Promise<Account | null> {
-    const row = await db<AccountRow>('users as u')
+    const row = (await db('users as u')
       .where('u.id', id)
-      .first(...COLUMNS);
+      .first(...COLUMNS)) as AccountRow | undefined;
     return row ? toAccount(row) : null;
   }
 
