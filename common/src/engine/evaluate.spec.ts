@@ -10,6 +10,7 @@ import {
   type SpecificationInput,
 } from './model';
 import { insulationLevelsFor } from './overvoltage';
+import { unitOf } from './quantities';
 import {
   aCompositeRod,
   aContext,
@@ -342,6 +343,28 @@ describe(evaluate.name, () => {
     expect(evaluation.clearances!.phaseToEarthMm! % 10).toBe(0);
     expect(evaluation.string!.creepageRequiredMm! % 1).not.toBe(0);
     expect(evaluation.string!.dryArcRequiredMm! % 1).not.toBe(0);
+  });
+
+  it('has a unit in the name of every number', () => {
+    /** Older names of the contract, whose unit stands beside them or in their meaning. */
+    const exceptions = new Set([
+      'requiredValue',
+      'providedValue',
+      'estimate',
+      'given',
+      'band',
+      'result',
+      'exponent',
+      'parallelStrings',
+      'rodsInSeries',
+    ]);
+    const named = (value: unknown): string[] =>
+      numbersOf(value).map(([path]) => path.split('.').findLast((step) => Number.isNaN(Number(step)))!);
+    const input = aLine({ system: { insulationLevel: rangeOneLevel(275, 650) }, string: { hardwareLengthMm: 400 } });
+    const unnamed = [...named(input), ...named(evaluate(input, aContext()))].filter(
+      (name) => unitOf(name) === null && !exceptions.has(name),
+    );
+    expect([...new Set(unnamed)]).toEqual([]);
   });
 
   it('takes a company level', () => {

@@ -36,7 +36,10 @@ function readLevel(
     calculation,
   );
   const refused = calculation.cautions.some(({ code }) => code === 'level-no-row');
-  return { situation: refused ? { ...situation, level: null, stopped: true } : situation, level };
+  if (refused) return { situation: { ...situation, level: null, stopped: true }, level };
+  const given = situation.level;
+  const switchingPhaseRatio = given?.switchingPhaseRatio ?? level?.switchingPhaseRatio ?? null;
+  return { situation: { ...situation, level: given === null ? null : { ...given, switchingPhaseRatio } }, level };
 }
 
 function stringOf(

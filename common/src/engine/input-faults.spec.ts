@@ -1,3 +1,4 @@
+import { evaluate } from './evaluate';
 import { inputFaults } from './input-faults';
 import type { EvaluationContext, SpecificationInput } from './model';
 import {
@@ -51,6 +52,15 @@ describe(inputFaults.name, () => {
     expect(paths(aLine({ system: { ...system, insulationLevel: rangeTwoLevel(1050, 1.5, 1425) } }))).toEqual([]);
     const switchingKv = rangeOneLevel(275, 650, { switchingKv: 550 });
     expect(paths(aLine({ system: { insulationLevel: switchingKv } }))).toEqual(['system.insulationLevel.switchingKv']);
+  });
+
+  it('takes a row of range II also where its ratio between phases is left out', () => {
+    const system = { nominalVoltageKv: 400, highestVoltageKv: 420 };
+    const level = rangeTwoLevel(1050, 1.5, 1425);
+    const input = aLine({ system: { ...system, insulationLevel: { ...level, switchingPhaseRatio: null } } });
+    expect(paths(input)).toEqual([]);
+    const whole = evaluate(aLine({ system: { ...system, insulationLevel: level } }), aContext());
+    expect(evaluate(input, aContext())).toEqual(whole);
   });
 
   it('leaves a voltage outside the method to the stop of the evaluation', () => {

@@ -132,6 +132,13 @@ describe(assessString.name, () => {
     expect(codes(input)).toContain('acceptance pollution-not-assessed');
   });
 
+  it('names the input that a criterion misses', () => {
+    const { cautions } = answer(aLine({ string: { surroundings: null } }));
+    expect(cautions).toContainEqual(
+      expect.objectContaining({ code: 'lightning-not-assessed', severity: 'caution', field: 'string.surroundings' }),
+    );
+  });
+
   it('checks a rod against every requirement: an ordinary 245 kV rod at 2310 m comes out short', () => {
     const context = aContext({ insulator: aCompositeRod() });
     const atSea = answer(aLine({ system: KV220 }), context);
@@ -170,6 +177,10 @@ describe(assessString.name, () => {
       expect(codes(aLine({ string: { arcingDevices: 'rings', arcGapMm: null } }))).toContain(
         'acceptance rings-without-gap',
       );
+    });
+
+    it('without the gap of their horns leave the verdict open', () => {
+      expect(criterion(answer(horns(null)).string, 'lightning').verdict).toBe('unknown');
     });
 
     it('that are not known leave the verdict open', () => {

@@ -16,7 +16,12 @@ const NAMES: Record<Criterion, string> = {
 };
 
 /** A criterion that applies without a figure: to be accepted, or proved by the supplier where a test level stands. */
-function cautionNotAssessed({ demands, testLevels }: Parts, units: number | null, calculation: Calculation): void {
+function cautionNotAssessed(
+  given: StringCase,
+  { demands, testLevels }: Parts,
+  units: number | null,
+  calculation: Calculation,
+): void {
   const tested: Record<Criterion, boolean> = {
     pollution: false,
     lightning: testLevels.lightningDryKvPeak !== null,
@@ -33,13 +38,27 @@ function cautionNotAssessed({ demands, testLevels }: Parts, units: number | null
     const text = `${NAMES[criterion]} was not assessed. ${whyNot}${
       proved ? ' The supplier has to prove this withstand of the complete string.' : ''
     }`;
-    calculation.caution(`${criterion}-not-assessed`, proved ? 'caution' : 'acceptance', text, fieldOf(criterion));
+    calculation.caution(
+      `${criterion}-not-assessed`,
+      proved ? 'caution' : 'acceptance',
+      text,
+      fieldOf(criterion, given),
+    );
   }
 }
 
-function fieldOf(criterion: Criterion): string {
-  if (criterion === 'pollution') return 'site.pollution';
-  return criterion === 'minimum' ? 'system.nominalVoltageKv' : 'string.insulatorCode';
+/** The input that a criterion misses, or the unit whose data it misses. */
+function fieldOf(criterion: Criterion, { situation, string }: StringCase): string {
+  if (criterion === 'pollution') return situation.earthFault === null ? 'system.earthFault' : 'site.pollution';
+  if (criterion === 'minimum') return 'system.nominalVoltageKv';
+  const levels = {
+    lightning: situation.level?.lightningKv,
+    switching: situation.level?.switchingKv,
+    'power-frequency': situation.level?.powerFrequencyKv,
+  };
+  if (!isKnown(levels[criterion])) return 'system.insulationLevel';
+  const bySurroundings = criterion !== 'power-frequency' && !isKnown(string.surroundings);
+  return bySurroundings ? 'string.surroundings' : 'string.insulatorCode';
 }
 
 function cautionDevices({ devices }: StringCase, { demands }: Parts, calculation: Calculation): void {
@@ -145,7 +164,7 @@ function infoArrangement({ string, unit, rods }: StringCase, calculation: Calcul
 
 /** All that a reader of the string has to be told. */
 export function cautionString(given: StringCase, parts: Parts, result: StringResult, calculation: Calculation): void {
-  cautionNotAssessed(parts, result.unitsBeforeExtra, calculation);
+  cautionNotAssessed(given, parts, result.unitsBeforeExtra, calculation);
   cautionDevices(given, parts, calculation);
   cautionRod(given, result, calculation);
   cautionTolerance(given, parts, result, calculation);

@@ -77,7 +77,7 @@ function arcDemand(
     provided,
     gapReaches,
   };
-  const providedUnknown = devices.kind === null;
+  const providedUnknown = devices.kind === null || (devices.kind === 'horns' && gapMm === null);
   if (!isDisc(unit)) {
     if (unit.dryArcMm === null) return notAssessed(criterion, 'mm', 'The dry arc of the rod is not known.');
     return demand({ ...common, providedUnknown });

@@ -28,8 +28,10 @@ function fits(row: LevelEntry, level: InsulationLevelInput, basis: Basis): 'whol
     if (printed === null) {
       // The North American rows fix the lightning level alone; what else is known may be given beside it.
       if (given !== null && (basis === 'iec' || row.reason !== null)) return 'not';
-    } else if (given === null) whole = false;
-    else if (given !== printed) return 'not';
+    } else if (given === null) {
+      // The ratio follows from the row that its voltages name; left out, the row is still known.
+      if (key !== 'switchingPhaseRatio') whole = false;
+    } else if (given !== printed) return 'not';
   }
   return whole ? 'whole' : 'partly';
 }
