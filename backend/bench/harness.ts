@@ -47,7 +47,14 @@ export async function report(figures: Figure[]): Promise<void> {
     if (verdict === 'short') short += 1;
     const besideText = beside === null ? '-' : `${figureText(beside)} ${besideUnit ?? unit}`;
     console.log(
-      [name, `${figureText(value)} ${unit}`, besideText, ratio === null ? '-' : ratio.toFixed(2), aimText(aim), verdict].join(' | '),
+      [
+        name,
+        `${figureText(value)} ${unit}`,
+        besideText,
+        ratio === null ? '-' : ratio.toFixed(2),
+        aimText(aim),
+        verdict,
+      ].join(' | '),
     );
   }
   console.log(`${met} met, ${short} short`);

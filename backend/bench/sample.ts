@@ -15,7 +15,12 @@ export function sampleInput(step = 0): SpecificationInput {
     },
     site: {
       altitudeM: 500 + (step % 1500),
-      pollution: { class: (['b', 'c', 'd', 'e'] as const)[step % 4] ?? 'b', type: 'A', basis: 'measured', recheckBy: null },
+      pollution: {
+        class: (['b', 'c', 'd', 'e'] as const)[step % 4] ?? 'b',
+        type: 'A',
+        basis: 'measured',
+        recheckBy: null,
+      },
     },
     string: {
       insulatorCode: 'U160BL',

@@ -37,13 +37,9 @@ describe('pages', () => {
   for (const role of WALKERS) {
     for (const viewport of VIEWPORTS) {
       for (const theme of THEMES) {
-        it(
-          `of ${role ?? 'a stranger'} at ${viewport.widthPx} px, ${theme}: no complaint, no sideways scroll, accessible`,
-          async () => {
-            expect(await walk(browser, { url: product.url, role, viewport, theme, folder: FOLDER })).toEqual([]);
-          },
-          300_000,
-        );
+        it(`of ${role ?? 'a stranger'} at ${viewport.widthPx} px, ${theme}: no complaint, no sideways scroll, accessible`, async () => {
+          expect(await walk(browser, { url: product.url, role, viewport, theme, folder: FOLDER })).toEqual([]);
+        }, 300_000);
       }
     }
   }

@@ -29,7 +29,11 @@ export interface Viewport {
 export const DESKTOP: Viewport = { widthPx: 1440, heightPx: 1000 };
 export const PHONE: Viewport = { widthPx: 390, heightPx: 844 };
 
-export async function openContext(browser: Browser, viewport: Viewport, theme: 'light' | 'dark'): Promise<BrowserContext> {
+export async function openContext(
+  browser: Browser,
+  viewport: Viewport,
+  theme: 'light' | 'dark',
+): Promise<BrowserContext> {
   return browser.newContext({
     viewport: { width: viewport.widthPx, height: viewport.heightPx },
     colorScheme: theme,
@@ -54,7 +58,8 @@ export class Complaints {
       this.rows.push(`request failed: ${request.method()} ${request.url()} ${request.failure()?.errorText ?? ''}`);
     });
     page.on('response', (response) => {
-      if (response.status() >= 400) this.rows.push(`answer ${response.status()}: ${response.request().method()} ${response.url()}`);
+      if (response.status() >= 400)
+        this.rows.push(`answer ${response.status()}: ${response.request().method()} ${response.url()}`);
     });
   }
 

@@ -14,24 +14,35 @@ export async function accessibilityFaults(page: Page): Promise<string[]> {
   await page.evaluate(AXE);
   const violations = await page.evaluate(async () => {
     const { axe } = window as unknown as { axe: { run: (options: object) => Promise<{ violations: AxeViolation[] }> } };
-    return (await axe.run({ runOnly: ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'] })).violations;
+    return (await axe.run({ runOnly: ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'] }))
+      .violations;
   });
   return violations.map(
-    (v) => `axe ${v.id}: ${v.help} at ${v.nodes.slice(0, 3).map((n) => `${n.target.join(' ')} ${n.html.slice(0, 140)}`).join(' | ')}`,
+    (v) =>
+      `axe ${v.id}: ${v.help} at ${v.nodes
+        .slice(0, 3)
+        .map((n) => `${n.target.join(' ')} ${n.html.slice(0, 140)}`)
+        .join(' | ')}`,
   );
 }
 
 /** A page must not scroll sideways; wide tables scroll inside themselves. */
 export async function sidewaysScroll(page: Page): Promise<string[]> {
-  const overflowPx = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
+  const overflowPx = await page.evaluate(
+    () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
+  );
   return overflowPx > 0 ? [`page is ${overflowPx} px wider than the window`] : [];
 }
 
 /** Waits until the page has fetched what it shows and painted it without skeletons. */
 export async function settle(page: Page): Promise<void> {
   await page.waitForLoadState('networkidle');
-  await page.waitForFunction(() => !document.querySelector('.ant-skeleton, .ant-spin-spinning, [aria-busy="true"]'), undefined, {
-    timeout: 10_000,
-  });
+  await page.waitForFunction(
+    () => !document.querySelector('.ant-skeleton, .ant-spin-spinning, [aria-busy="true"]'),
+    undefined,
+    {
+      timeout: 10_000,
+    },
+  );
   await page.evaluate(() => document.fonts.ready.then(() => undefined));
 }

@@ -43,9 +43,7 @@ export async function walk(browser: Browser, options: WalkOptions): Promise<stri
   const context = await openContext(browser, viewport, theme);
   try {
     if (role) await signInByApi(context, url, PERSON_OF[role]);
-    const stops = role
-      ? SIGNED_IN_STOPS.filter(({ roles }) => !roles || roles.includes(role))
-      : SIGNED_OUT_STOPS;
+    const stops = role ? SIGNED_IN_STOPS.filter(({ roles }) => !roles || roles.includes(role)) : SIGNED_OUT_STOPS;
     const page = await context.newPage();
     const complaints = new Complaints(page);
     const faults: string[] = [];
