@@ -121,10 +121,7 @@ function Creepage({ evaluation }: { evaluation: Evaluation }) {
               </>
             )}
             {string.scd1986RequiredMmPerKvUm !== null && (
-              <>
-                {' '}
-                · {formatNumber(string.scd1986RequiredMmPerKvUm, { decimals: 1, round: 'up' })} mm/kV on Um line to line
-              </>
+              <> · {formatNumber(string.scd1986RequiredMmPerKvUm, { decimals: 1, round: 'up' })} mm/kV line to line</>
             )}
           </>
         )}
@@ -141,12 +138,13 @@ function Length({ evaluation, input }: { evaluation: Evaluation; input: Specific
   return (
     <div>
       <span className="answer-figure">
-        <Figure value={string.sectionLengthMm} round="down" /> mm section length
+        <Figure value={string.sectionLengthMm} round="down" name="string.sectionLengthMm" label="Section length" /> mm
+        section length
       </span>
       <small>
         {arc === null ? 'dry arc not known' : `dry arc ${formatNumber(arc, { round: 'down' })} mm`}
         {devices === 'none'
-          ? ', no arcing devices'
+          ? ', no devices'
           : devices === 'horns'
             ? ', with horns'
             : devices === 'rings'

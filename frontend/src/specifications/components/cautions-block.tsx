@@ -26,10 +26,25 @@ export function CautionsBlock({ evaluation }: { evaluation: Evaluation }) {
   );
 }
 
+const SINGULAR: Record<Severity, string> = {
+  stop: 'stop',
+  fail: 'fail',
+  acceptance: 'acceptance',
+  caution: 'caution',
+  info: 'note',
+};
+const PLURAL: Record<Severity, string> = {
+  stop: 'stops',
+  fail: 'fails',
+  acceptance: 'acceptances',
+  caution: 'cautions',
+  info: 'notes',
+};
+
 function countWords(severities: Severity[]): string {
   return ORDER.map((severity) => [severity, severities.filter((one) => one === severity).length] as const)
     .filter(([, count]) => count > 0)
-    .map(([severity, count]) => `${count} ${severity === 'info' ? (count === 1 ? 'note' : 'notes') : severity}`)
+    .map(([severity, count]) => `${count} ${count === 1 ? SINGULAR[severity] : PLURAL[severity]}`)
     .join(', ');
 }
 

@@ -3,6 +3,7 @@ import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { Figure } from '../../ui/figure';
 import { SourceWords, TraceArea } from '../../ui/trace';
 import { useLit } from '../hooks/highlight';
+import { clearanceName } from '../model/trace-names';
 import { whyNot } from '../model/words';
 import { lowerFirst } from './criteria-block';
 import { LedgerBlock } from './ledger-rows';
@@ -62,14 +63,15 @@ function ClearanceBlock({ title, rows, headlineMm, why, isForPeople }: Propertie
         needed <Figure value={headlineMm} unit="mm" round="up" />
       </>
     );
+  const absence = why
+    ? `not assessed: ${lowerFirst(why)}`
+    : isForPeople
+      ? 'not covered by this sheet: the local rule for work and access applies'
+      : 'not covered by this sheet';
   return (
     <LedgerBlock title={title} aside={aside}>
       {rows.length === 0 ? (
-        <p className="zone-note">
-          {isForPeople && !why
-            ? 'not covered by this sheet: the local rule for work and access applies'
-            : `not assessed${why ? `: ${lowerFirst(why)}` : ''}`}
-        </p>
+        <p className="zone-note">{absence}</p>
       ) : (
         <TraceArea>
           <table className="ledger-table">
@@ -81,11 +83,9 @@ function ClearanceBlock({ title, rows, headlineMm, why, isForPeople }: Propertie
                 <th scope="col">needed</th>
               </tr>
             </thead>
-            <tbody>
-              {rows.map((row, index) => (
-                <Row key={`${row.method} ${row.stress} ${row.shape} ${index}`} row={row} />
-              ))}
-            </tbody>
+            {rows.map((row, index) => (
+              <Row key={`${row.method} ${row.stress} ${row.shape} ${index}`} row={row} />
+            ))}
           </table>
         </TraceArea>
       )}
@@ -111,34 +111,42 @@ function Row({ row }: { row: ClearanceRow }) {
     CHOICE_LABELS.clearanceMethod[row.method],
     ...(row.interpolated ? ['interpolated'] : []),
     ...(row.withinSource ? [] : ['outside of the source']),
+    ...(row.h0M !== null && row.altitudeFactor !== null ? [`altitude counted above ${row.h0M} m`] : []),
   ];
   const unit = row.stress === 'power-frequency' ? 'kV' : 'kV peak';
+  const standing = row.governs ? 'is-governing' : undefined;
   return (
-    <tr className={row.governs ? 'is-governing' : undefined} {...lit}>
-      <th scope="row">
-        {stress}
-        {shape && `, ${shape}`}
-        {row.governs && <small className="governs-word"> governs</small>}
-        <small className="row-source">
-          {remarks.join(', ')} — <SourceWords source={row.source} />
-        </small>
-      </th>
-      <td>
-        <Figure value={row.withstandKv} unit={unit} />
-      </td>
-      <td>
-        <Figure value={row.altitudeFactor} decimals={3} />
-        {row.h0M !== null && row.altitudeFactor !== null && <small> above {row.h0M} m</small>}
-      </td>
-      <td>
-        <Figure
-          value={row.valueMm}
-          unit="mm"
-          round="up"
-          name={`clearances.${row.method}.${row.distance}.${row.stress}`}
-          label={`${stress}, needed`}
-        />
-      </td>
-    </tr>
+    <tbody className={standing} {...lit}>
+      <tr>
+        <th scope="row">
+          {stress}
+          {shape && `, ${shape}`}
+          {row.governs && <small className="governs-word"> governs</small>}
+        </th>
+        <td>
+          <Figure value={row.withstandKv} unit={unit} />
+        </td>
+        <td>
+          <Figure value={row.altitudeFactor} decimals={3} />
+        </td>
+        <td>
+          <Figure
+            value={row.valueMm}
+            unit="mm"
+            round="up"
+            name={clearanceName(row)}
+            label={`${stress}, needed`}
+            why={row.withinSource ? undefined : 'beyond the source'}
+          />
+        </td>
+      </tr>
+      <tr className="row-source">
+        <td colSpan={4}>
+          <small>
+            {remarks.join(', ')} — <SourceWords source={row.source} />
+          </small>
+        </td>
+      </tr>
+    </tbody>
   );
 }

@@ -58,7 +58,14 @@ export function CreepageBlock({ evaluation, input }: Properties) {
                 />
               </td>
               <td>
-                <Figure value={string.uscdProvidedMmPerKv} unit="mm/kV" decimals={1} round="down" />
+                <Figure
+                  value={string.uscdProvidedMmPerKv}
+                  unit="mm/kV"
+                  decimals={1}
+                  round="down"
+                  name="string.uscdProvidedMmPerKv"
+                  label="Specific creepage given"
+                />
               </td>
             </tr>
             <tr>
@@ -74,10 +81,24 @@ export function CreepageBlock({ evaluation, input }: Properties) {
                 />
               </td>
               <td>
-                <Figure value={string.scd1986RequiredMmPerKvUm} unit="mm/kV" decimals={1} round="up" />
+                <Figure
+                  value={string.scd1986RequiredMmPerKvUm}
+                  unit="mm/kV"
+                  decimals={1}
+                  round="up"
+                  name="string.scd1986RequiredMmPerKvUm"
+                  label="Specific creepage of 1986, needed"
+                />
               </td>
               <td>
-                <Figure value={string.scd1986ProvidedMmPerKvUm} unit="mm/kV" decimals={1} round="down" />
+                <Figure
+                  value={string.scd1986ProvidedMmPerKvUm}
+                  unit="mm/kV"
+                  decimals={1}
+                  round="down"
+                  name="string.scd1986ProvidedMmPerKvUm"
+                  label="Specific creepage of 1986, given"
+                />
               </td>
             </tr>
             {string.leakageInPerKvLineToGround !== null && (
@@ -110,7 +131,13 @@ export function CreepageBlock({ evaluation, input }: Properties) {
                 />
               </td>
               <td>
-                <Figure value={string.creepageProvidedMm} unit="mm" round="down" />
+                <Figure
+                  value={string.creepageProvidedMm}
+                  unit="mm"
+                  round="down"
+                  name="string.creepageProvidedMm"
+                  label="Creepage given"
+                />
               </td>
             </tr>
           </tbody>

@@ -108,6 +108,7 @@ interface ChoiceAtProperties extends At {
   placeholder?: string;
   listWidth?: number;
   empty?: string;
+  wide?: boolean;
 }
 
 export function ChoiceAt({ path, note, choices, value, onChoose, ...list }: ChoiceAtProperties) {

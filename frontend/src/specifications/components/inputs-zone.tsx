@@ -1,5 +1,5 @@
 import { memo } from 'react';
-import { Form } from 'antd';
+import { ConfigProvider, Form } from 'antd';
 import { useForm } from '../hooks/form-context';
 import { fieldPath } from '../model/faults';
 import { valueAt } from '../model/form';
@@ -7,17 +7,21 @@ import { useCatalogue } from '../queries/use-catalogue';
 import { ChoiceAt, DateAt, NumberAt } from './fields-at';
 import { InsulatorAt, LevelAt, ParallelStringsAt, FrequencyAt } from './looked-up-fields';
 
+const CLOSE = { token: { controlHeight: 28 } };
+
 /** What is known: system, site, string, clearances. Only fields that mean something for the choices made are shown. */
 export const InputsZone = memo(function InputsZone() {
   return (
     <section className="zone zone-inputs" aria-label="Inputs">
-      <Form component={false}>
-        <OtherFaults />
-        <SystemGroup />
-        <SiteGroup />
-        <StringGroup />
-        <ClearanceGroup />
-      </Form>
+      <ConfigProvider theme={CLOSE}>
+        <Form component={false}>
+          <OtherFaults />
+          <SystemGroup />
+          <SiteGroup />
+          <StringGroup />
+          <ClearanceGroup />
+        </Form>
+      </ConfigProvider>
     </section>
   );
 });

@@ -16,7 +16,13 @@ export function LengthsBlock({ evaluation }: { evaluation: Evaluation }) {
       <TraceArea>
         <dl className="ledger-list">
           <LedgerRow label="Section length" about="string.sectionLengthMm">
-            <Figure value={string.sectionLengthMm} unit="mm" round="down" />
+            <Figure
+              value={string.sectionLengthMm}
+              unit="mm"
+              round="down"
+              name="string.sectionLengthMm"
+              label="Section length"
+            />
           </LedgerRow>
           <LedgerRow label="Length with fittings" note="with tolerances" about="string.stringLengthWithFittingsMaxMm">
             <Figure

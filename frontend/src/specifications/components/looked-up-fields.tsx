@@ -73,6 +73,7 @@ export function LevelAt() {
         onChoose={onChoose}
         loading={basis !== null && isPending}
         listWidth={380}
+        wide
         placeholder={highestVoltageKv === null ? 'needs Um' : 'choose'}
         empty={emptyLevels(basis, highestVoltageKv)}
         note={
@@ -81,7 +82,12 @@ export function LevelAt() {
             : undefined
         }
       />
-      {level !== null && <NumberAt path="system.insulationLevel.levelHoldsToM" />}
+      {level !== null && (
+        <NumberAt
+          path="system.insulationLevel.levelHoldsToM"
+          note={holdsToM === null || holdsToM === undefined ? 'left empty: counted as 1000 m' : undefined}
+        />
+      )}
     </>
   );
 }

@@ -1,30 +1,90 @@
-import type { TraceLine } from '@bellgap/common/api';
+import type { ClearanceRow, TraceLine } from '@bellgap/common/api';
 
-/** Lines of the working by the figure that they lead to; a line's id is "topic.name" or "topic.name:use". */
+/** Lines of the working that lead to a figure; a line's id is "topic.name" or "topic.name:use". */
 const LINES: readonly (readonly [figure: RegExp, line: RegExp])[] = [
   [
-    /^string\.(criteria\.pollution|creepageRequiredMm|uscdRequiredMmPerKv)$/,
-    /^pollution\.|^atmosphere\.[^:]+:.*creepage|^string\.units-by-creepage|^string\.count:pollution/,
+    /^string\.(criteria\.pollution|creepageRequiredMm)$/,
+    /^pollution\.|^atmosphere\.altitude-factor:creepage|^string\.units-by-creepage|^string\.count:pollution/,
   ],
   [/^string\.creepageVoltageKv$/, /^pollution\.voltage/],
-  [/^string\.creepageProvidedMm$/, /^string\.units-by-creepage|^string\.count:pollution/],
+  [/^string\.creepageProvidedMm$/, /^string\.(creepage-provided|units$)/],
+  [
+    /^string\.uscdRequiredMmPerKv$/,
+    /^pollution\.|^atmosphere\.altitude-factor:creepage|^string\.specific-creepage:uscd-required/,
+  ],
+  [/^string\.uscdProvidedMmPerKv$/, /^string\.(creepage-provided|specific-creepage:uscd-provided)|^pollution\.voltage/],
+  [/^string\.scd1986RequiredMmPerKvUm$/, /^string\.specific-creepage:scd1986-required/],
+  [/^string\.scd1986ProvidedMmPerKvUm$/, /^string\.specific-creepage:scd1986-provided/],
   [
     /^string\.criteria\.lightning$/,
-    /:(string )?lightning$|^string\.gap-factor|^air-gaps\.(fast-front-gap-factor|deviation-factor):string|^air-gaps\.lightning-dry-arc/,
+    /:(string-)?lightning$|^string\.gap-factor|^air-gaps\.fast-front-gap-factor:string|^air-gaps\.lightning-dry-arc/,
   ],
   [
     /^string\.criteria\.switching$/,
-    /:(string )?switching$|^string\.gap-factor|^air-gaps\.insulator-gap-factor:string|^air-gaps\.switching-dry-arc/,
+    /:(string-)?switching$|^string\.gap-factor|^air-gaps\.insulator-gap-factor:string|^air-gaps\.switching-dry-arc/,
   ],
-  [/^string\.criteria\.power-frequency$/, /:(string )?power[ -]frequency$|^string\.wet-flashover/],
+  [/^string\.criteria\.power-frequency$/, /:(string-)?power-frequency$|^string\.wet-flashover/],
   [
     /^string\.criteria\.minimum$/,
-    /:minimum$|^string\.(company-minimum|suspension-level|dielectric-factor|minimum-other-unit|units-in-thin-air)/,
+    /:minimum$|^string\.(company-minimum|suspension-level|minimum-|units-in-thin-air)|^atmosphere\.dielectric-factor/,
   ],
-  [/^string\.units$/, /^string\.(count|units-by|extra|company-minimum|suspension-level)/],
+  [/^string\.units$/, /^string\.(count|extra-units|units$|minimum-units)/],
+  [/^string\.sectionLengthMm$/, /^string\.section-length/],
+  [/^string\.stringLengthWithFittings$/, /^string\.(spacing-tolerance|section-length|length)/],
+  [/^string\.dryArcRequiredMm$/, /^air-gaps\.(lightning|switching)-dry-arc|^air-gaps\.fifty-percent-voltage/],
+  [/^string\.coordination$/, /^string\.external-clearance/],
+  [/^string\.testLevels\.lightning$/, /^(string\.test-level|atmosphere\.altitude-factor):(string-)?lightning$/],
+  [/^string\.testLevels\.switching$/, /^(string\.test-level|atmosphere\.altitude-factor):(string-)?switching$/],
+  [
+    /^string\.testLevels\.power-frequency$/,
+    /^(string\.test-level|atmosphere\.altitude-factor):(string-)?power-frequency$/,
+  ],
+  [/^clearances\.phaseToEarthMm$/, /^clearances\.(phaseToEarthMm|row:[^:]+:phase-to-earth:)/],
+  [/^clearances\.phaseToPhaseMm$/, /^clearances\.(phaseToPhaseMm|row:[^:]+:phase-to-phase:)/],
 ];
-export const hasTrace = (name: string): boolean => LINES.some(([figure]) => figure.test(name));
+
+/** A test level is no criterion: its own line shows it, the count's lines do not. */
+const NOT_OF_CRITERIA = /^string\.test-level/;
+
+const ROW = 'clearances.row:';
+const DISTANCE_WORDS: Record<string, string> = {
+  'phase-to-earth': 'phase to earth',
+  'phase-to-phase': 'between phases',
+};
+
+/** Name of the figure of a row of distances, as the last line of its working has it. */
+export function clearanceName({
+  method,
+  distance,
+  stress,
+  shape,
+}: Pick<ClearanceRow, 'method' | 'distance' | 'stress' | 'shape'>): string {
+  return ROW + [method, distance, stress, ...(shape === null ? [] : [shape])].join(':');
+}
+
+/** All lines of one row: what reads the table or the formula, the altitude, and the distance itself. */
+function isOfRow(name: string, id: string): boolean {
+  if (id === name) return true;
+  const [method = '', distance = '', stress = '', shape] = name.slice(ROW.length).split(':');
+  const use = id.slice(id.indexOf(':') + 1);
+  const words = DISTANCE_WORDS[distance] ?? distance;
+  if (method === 'iec-table') {
+    return (
+      use === [distance, stress, shape].join(':') ||
+      use === `clearance ${words}, ${stress}, ${shape}` ||
+      (id === 'overvoltage.switching-between-phases' && distance === 'phase-to-phase' && stress === 'switching')
+    );
+  }
+  return use === `${distance}:${stress}` || use.startsWith(`${stress} ${words}`);
+}
+
+export function hasTrace(name: string): boolean {
+  return name.startsWith(ROW) || LINES.some(([figure]) => figure.test(name));
+}
+
 export function traceLinesOf(name: string, lines: readonly TraceLine[]): TraceLine[] {
+  if (name.startsWith(ROW)) return lines.filter(({ id }) => isOfRow(name, id));
   const wanted = LINES.filter(([figure]) => figure.test(name)).map(([, line]) => line);
-  return lines.filter(({ id }) => wanted.some((line) => line.test(id)));
+  const isCriterion = name.startsWith('string.criteria.');
+  return lines.filter(({ id }) => wanted.some((line) => line.test(id)) && !(isCriterion && NOT_OF_CRITERIA.test(id)));
 }

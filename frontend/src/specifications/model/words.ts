@@ -23,9 +23,31 @@ const CHOICES: Record<string, Record<string, string>> = {
   'clearance.safetySource': CHOICE_LABELS.safetySource,
 };
 
+/** What a closed field shows where the full words are too long for it. */
+const SHORT: Record<string, Record<string, string>> = {
+  'system.neutralEarthing': { effective: 'Effective', resonant: 'Resonant', isolated: 'Isolated' },
+  'system.earthFault': { cleared: 'Cleared', sustained: 'Sustained' },
+  'site.pollution.type': { A: 'A, solid', B: 'B, fog, spray', AB: 'A and B' },
+  'string.surroundings': { 'cross-arm': 'Cross-arm', window: 'Window', 'lower-structure': 'Below', open: 'Not known' },
+  'clearance.method': {
+    'iec-table': 'IEC tables',
+    'en-empirical': 'EN empirical',
+    'en-theoretical': 'EN theoretical',
+    'north-american': 'N. American',
+  },
+  'clearance.shapePhaseToEarth': { 'rod-structure': 'Rod', 'conductor-structure': 'Conductor' },
+  'clearance.shapePhaseToPhase': { 'rod-conductor': 'Rod', 'conductor-conductor': 'Conductors' },
+  'clearance.fastFrontFrom': { level: 'Level', string: 'String' },
+  'clearance.enGap': { window: 'Window', structure: 'Structure', obstacle: 'Obstacle' },
+  'clearance.safetySource': { 'rd-337': 'RD 337/2014', 'iec-61936-1': 'IEC 61936-1' },
+};
+
 /** The choices of a field in the order and words in which they are offered. */
-export function choicesOf(path: string): { value: string; label: string }[] {
-  return Object.entries(CHOICES[path] ?? {}).map(([value, label]) => ({ value, label }));
+export function choicesOf(path: string): { value: string; label: string; short?: string }[] {
+  return Object.entries(CHOICES[path] ?? {}).map(([value, label]) => {
+    const short = SHORT[path]?.[value];
+    return short === undefined ? { value, label } : { value, label, short };
+  });
 }
 
 /** A value of the input as it is read, with its unit. */

@@ -21,6 +21,8 @@ export interface FieldWords {
   /** A severity of the answer that points at this field. */
   mark?: ReactNode;
   readOnly?: boolean | undefined;
+  /** The control needs more room than a figure does. */
+  wide?: boolean | undefined;
 }
 
 export const noteIdOf = (id: string): string => `${id}-note`;
@@ -39,11 +41,12 @@ export function FieldFrame({
   inherited = false,
   overridden = false,
   mark,
+  wide = false,
   children,
 }: Properties) {
   const standing = overridden ? 'is-overridden' : inherited ? 'is-inherited' : '';
   return (
-    <div className={`bg-field ${standing}`} data-field={id}>
+    <div className={`bg-field ${standing}${wide ? ' is-wide' : ''}`} data-field={id}>
       <Form.Item
         htmlFor={id}
         colon={false}

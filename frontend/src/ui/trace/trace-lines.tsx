@@ -6,12 +6,11 @@ import './trace.css';
 
 /** A citation in words, with how well the figure is known. */
 export function SourceWords({ source }: { source: SourceReference }) {
-  const where = [source.document, source.edition].filter(Boolean).join(':');
-  return (
-    <span className={`bg-source is-${source.status}`}>
-      {[where, source.clause].filter(Boolean).join(', ')} · {CHOICE_LABELS.status[source.status]}
-    </span>
-  );
+  const where = [[source.document, source.edition].filter(Boolean).join(':'), source.clause].filter(Boolean).join(', ');
+  const status = CHOICE_LABELS.status[source.status];
+  // "Common practice, no published source" is both the citation and its status.
+  const words = where.toLowerCase().includes(status.toLowerCase()) ? where : `${where} · ${status}`;
+  return <span className={`bg-source is-${source.status}`}>{words}</span>;
 }
 
 function resultText({ result, unit }: TraceLine): string | null {
