@@ -17,6 +17,12 @@ async function main(): Promise<void> {
 }
 
 main().catch((error: unknown) => {
-  console.error(error instanceof ConfigError ? error.message : error);
+  console.error(wordsFor(error));
   process.exit(1);
 });
+
+function wordsFor(error: unknown): unknown {
+  if (error instanceof ConfigError) return error.message;
+  const { code, port } = (error ?? {}) as { code?: unknown; port?: unknown };
+  return code === 'EADDRINUSE' ? `PORT ${String(port)} is taken; give another one.` : error;
+}

@@ -1,3 +1,4 @@
+import { createSecretKey } from 'node:crypto';
 import { Module } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
 import { JwtModule } from '@nestjs/jwt';
@@ -17,7 +18,11 @@ import { ThrottleService } from './throttle.service';
   imports: [
     JwtModule.registerAsync({
       inject: [CONFIG],
-      useFactory: ({ sessionSecret }: Config) => ({ secret: sessionSecret, signOptions: { algorithm: 'HS256' } }),
+      useFactory: ({ sessionSecret }: Config) => {
+        // Given as text, the key would be read anew, as a public key first, at each request.
+        const key = createSecretKey(Buffer.from(sessionSecret));
+        return { secretOrKeyProvider: () => key, signOptions: { algorithm: 'HS256' as const } };
+      },
     }),
   ],
   controllers: [AuthController],
