@@ -6,6 +6,7 @@ import '@fontsource/ibm-plex-mono/latin-400.css';
 import '@fontsource/ibm-plex-mono/latin-ext-400.css';
 import '@fontsource/ibm-plex-mono/latin-600.css';
 import '@fontsource/ibm-plex-mono/latin-ext-600.css';
+import './app/fonts/fonts.css';
 import './app/theme/tokens.css';
 import './app/base.css';
 import { StrictMode } from 'react';

@@ -1,10 +1,8 @@
 import { Link } from 'react-router-dom';
 import { EmptyState } from '../ui/states/empty-state';
-import { useTitle } from '../ui/use-title';
 import { paths } from './paths';
 
 export function NotFoundPage() {
-  useTitle('Not found');
   return (
     <EmptyState title="There is nothing at this address" level={1}>
       The address may be mistyped, or you may not be allowed to see what stands here.{' '}

@@ -7,6 +7,7 @@ export function RouteFault() {
   const fetching = error instanceof TypeError && /import|fetch|module/i.test(error.message);
   return (
     <ErrorState
+      level={1}
       title="This page could not be shown"
       text={
         fetching

@@ -1,6 +1,8 @@
 import type { ReactNode } from 'react';
 import './ledger.css';
 
+const isFigure = (value: ReactNode) => typeof value === 'string' && /^[\d−]/.test(value);
+
 /** Named values under each other with hairlines between, figures at the right. */
 export function Ledger({ rows }: { rows: readonly (readonly [label: string, value: ReactNode])[] }) {
   return (
@@ -8,7 +10,7 @@ export function Ledger({ rows }: { rows: readonly (readonly [label: string, valu
       {rows.map(([label, value]) => (
         <div key={label}>
           <dt>{label}</dt>
-          <dd className="num">{value ?? <span className="soft">not known</span>}</dd>
+          <dd className={isFigure(value) ? 'num' : undefined}>{value ?? <span className="soft">not known</span>}</dd>
         </div>
       ))}
     </dl>

@@ -24,7 +24,7 @@ export function browserName(userAgent: string | null): string {
       ['Safari/', 'Safari'],
     ].find(([sign]) => sign && userAgent.includes(sign))?.[1] ?? userAgent.slice(0, 40);
   const system = ['Windows', 'Android', 'iPhone', 'iPad', 'Mac OS', 'Linux'].find((name) => userAgent.includes(name));
-  return system ? `${browser} on ${system}` : browser;
+  return system && !browser.includes(system) ? `${browser} on ${system}` : browser;
 }
 
 export function SessionsTable() {

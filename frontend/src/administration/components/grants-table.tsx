@@ -39,7 +39,7 @@ export function GrantsTable({ user, endable }: { user: User; endable: boolean })
               grantStanding(row, on) !== 'ended' && (
                 <Button
                   size="small"
-                  aria-label={`End the role ${ROLE_LABELS[row.role]}`}
+                  aria-label={`End today: ${ROLE_LABELS[row.role]}, ${row.projectCode ?? 'all projects'}`}
                   loading={end.isPending && end.variables === row.id}
                   onClick={() => end.mutate(row.id)}
                 >

@@ -23,7 +23,12 @@ export function SessionGate({ children }: { children: ReactNode }) {
   if (session.isPending) return null;
   if (session.isError) {
     return (
-      <ErrorState title="Bellgap cannot be reached" text={failureText(session.error)} retry={() => session.refetch()} />
+      <ErrorState
+        level={1}
+        title="Bellgap cannot be reached"
+        text={failureText(session.error)}
+        retry={() => session.refetch()}
+      />
     );
   }
   const person = session.data.user;

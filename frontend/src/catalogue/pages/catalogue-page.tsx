@@ -36,7 +36,7 @@ const COLUMNS: Column<CatalogueUnit>[] = [
   { key: 'spacingMm', title: 'Spacing, mm', value: (row) => row.spacingMm, figure: true, sortable: true },
   { key: 'diameterMm', title: 'Diameter, mm', value: (row) => row.diameterMm, figure: true, sortable: true },
   { key: 'creepageMm', title: 'Creepage, mm', value: (row) => row.creepageMm, figure: true, sortable: true },
-  { key: 'massKg', title: 'Mass, kg', value: (row) => row.massKg, figure: true },
+  { key: 'massKg', title: 'Mass, kg', value: (row) => row.massKg, figure: true, decimals: 1 },
   { key: 'coupling', title: 'Coupling', value: (row) => row.coupling },
   {
     key: 'source',

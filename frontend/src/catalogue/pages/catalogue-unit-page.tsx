@@ -1,12 +1,15 @@
 import { contract, type CatalogueUnit } from '@bellgap/common/api';
+import { drawUnit } from '@bellgap/common/drawing';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { useQuery } from '@tanstack/react-query';
+import { useMemo } from 'react';
 import { Link, useParams } from 'react-router-dom';
 import { queryOf } from '../../api/queries';
 import { paths } from '../../app/paths';
 import type { Column } from '../../ui/data-table/columns';
 import { DataTable, figureText } from '../../ui/data-table/data-table';
 import { useListState } from '../../ui/data-table/use-list-state';
+import { DrawingView } from '../../ui/drawing/drawing-view';
 import { Facts } from '../../ui/facts';
 import { Ledger } from '../../ui/ledger';
 import { Page } from '../../ui/page/page';
@@ -14,6 +17,7 @@ import { Sheet } from '../../ui/page/sheet';
 import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
 import { familyText, kindText, materialText, profileText, sourceText } from '../model';
+import './catalogue-unit-page.css';
 
 type Flashover = NonNullable<CatalogueUnit['wetFlashover']>[number];
 
@@ -56,6 +60,7 @@ function dimensionsOf(unit: CatalogueUnit): (readonly [string, string | null])[]
 }
 
 function UnitView({ unit }: { unit: CatalogueUnit }) {
+  const drawing = useMemo(() => drawUnit(unit), [unit]);
   return (
     <Page
       title={unit.code}
@@ -71,20 +76,29 @@ function UnitView({ unit }: { unit: CatalogueUnit }) {
           ['Version', <span className="num">{unit.version}</span>],
         ]}
       />
-      <Sheet title="Dimensions and strength">
-        <Ledger rows={dimensionsOf(unit)} />
-        {unit.withdrawn && unit.note && <p className="soft">{unit.note}</p>}
-      </Sheet>
-      <Sheet title="Source">
-        <Ledger
-          rows={[
-            ['Document', unit.source.document],
-            ['Edition', unit.source.edition],
-            ['Clause', unit.source.clause],
-            ['Status', CHOICE_LABELS.status[unit.source.status]],
-          ]}
-        />
-      </Sheet>
+      <div className={drawing ? 'unit-sheets unit-sheets-drawn' : 'unit-sheets'}>
+        {drawing && (
+          <Sheet title="Outline" note="to scale; the form of cap and shed is not">
+            <div className="unit-drawing">
+              <DrawingView drawing={drawing} />
+            </div>
+          </Sheet>
+        )}
+        <Sheet title="Dimensions and strength">
+          <Ledger rows={dimensionsOf(unit)} />
+          {unit.withdrawn && unit.note && <p className="soft">{unit.note}</p>}
+        </Sheet>
+        <Sheet title="Source">
+          <Ledger
+            rows={[
+              ['Document', unit.source.document],
+              ['Edition', unit.source.edition],
+              ['Clause', unit.source.clause],
+              ['Status', CHOICE_LABELS.status[unit.source.status]],
+            ]}
+          />
+        </Sheet>
+      </div>
       {unit.wetFlashover && unit.wetFlashover.length > 0 && (
         <Sheet title="Wet flashover of complete strings" note={`Power frequency; ${sourceText(unit.source)}`} flush>
           <FlashoverTable code={unit.code} rows={unit.wetFlashover} />
@@ -99,6 +113,7 @@ export function CatalogueUnitPage() {
   const unit = useQuery(queryOf(contract.insulator, { params: { code } }));
   return (
     <QueryState
+      level={1}
       query={unit}
       what="The unit"
       missing={

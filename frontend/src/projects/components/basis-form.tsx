@@ -77,7 +77,7 @@ function BasisFields({ form }: { form: Form }) {
       <section aria-labelledby="basis-level" className="basis-level">
         <h3 id="basis-level">Insulation level</h3>
         <LevelPart form={form} />
-        <FormFigure form={form} path="system.levelHoldsToM" label="Level holds up to" />
+        <FormFigure form={form} path="system.levelHoldsToM" label="Level holds up to" unit="m" />
       </section>
     </div>
   );

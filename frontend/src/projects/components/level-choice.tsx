@@ -40,11 +40,10 @@ function LevelTable({ rows, highestVoltageKv, value, fault, choose }: LevelTable
       aria-describedby={fault ? `${name}-fault` : undefined}
     >
       <legend>
-        Insulation level
-        <span className="soft">
+        <span>
           {tableVoltageKv === highestVoltageKv
-            ? `, one row of ${highestVoltageKv} kV`
-            : `, one row of ${tableVoltageKv} kV, the next higher voltage of the table`}
+            ? `One row of ${highestVoltageKv} kV`
+            : `One row of ${tableVoltageKv} kV, the next higher voltage of the table`}
         </span>
       </legend>
       {stray && (

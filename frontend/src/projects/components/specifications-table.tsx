@@ -5,10 +5,11 @@ import { maySeeDrafts, usePerson } from '../../api/session';
 import { DataTable } from '../../ui/data-table/data-table';
 import { useListQuery } from '../../ui/data-table/use-list-query';
 import { useListState } from '../../ui/data-table/use-list-state';
-import { SPECIFICATION_COLUMNS } from '../../ui/specification-rows/specification-columns';
+import { SAVED_BY_COLUMN, SPECIFICATION_COLUMNS } from '../../ui/specification-rows/specification-columns';
 import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
 
+const COLUMNS = [...SPECIFICATION_COLUMNS, SAVED_BY_COLUMN];
 const STATE_CHOICES = REVISION_STATES.map((value) => ({ value, label: REVISION_STATE_LABELS[value] }));
 
 function NoSpecifications({ project, act }: { project: Project; act: ReactNode }) {
@@ -42,7 +43,7 @@ export function SpecificationsTable({ project, act }: { project: Project; act: R
         <DataTable
           label={`Specifications of ${project.code}`}
           name={`specifications-${project.code}`}
-          columns={SPECIFICATION_COLUMNS}
+          columns={COLUMNS}
           rows={items}
           rowKey={(row) => row.id}
           list={list}

@@ -24,3 +24,10 @@ export function timeZoneChoices(): { value: string; label: string }[] {
     ...Intl.supportedValuesOf('timeZone').map((zone) => ({ value: zone, label: zone.replaceAll('_', ' ') })),
   ];
 }
+
+/** A zone as people write it: its offset from UTC, and its name where that says more. */
+export function zoneText(zone: string): string {
+  const parts = new Intl.DateTimeFormat('en-GB', { timeZone: zone, timeZoneName: 'longOffset' }).formatToParts();
+  const offset = (parts.find(({ type }) => type === 'timeZoneName')?.value ?? zone).replace('GMT', 'UTC');
+  return zone.startsWith('Etc/') || !zone.includes('/') ? offset : `${offset}, ${zone.replaceAll('_', ' ')}`;
+}

@@ -4,6 +4,7 @@ import { Button } from 'antd';
 import { useState } from 'react';
 import { Link, useParams } from 'react-router-dom';
 import { queryOf } from '../../api/queries';
+import { maySeeDrafts, usePerson } from '../../api/session';
 import { paths } from '../../app/paths';
 import { Ledger } from '../../ui/ledger';
 import { Moment } from '../../ui/moment';
@@ -80,6 +81,18 @@ function BasisView({ project, history }: BasisViewProps) {
 
 export function DesignBasisPage() {
   const { code = '' } = useParams();
+  const person = usePerson();
+  if (!maySeeDrafts(person)) {
+    return (
+      <EmptyState title="The design basis is for those who work on drafts" level={1}>
+        The issued sheets of <Link to={paths.project.to(code)}>{code}</Link> carry its figures.
+      </EmptyState>
+    );
+  }
+  return <KnownBasisPage code={code} />;
+}
+
+function KnownBasisPage({ code }: { code: string }) {
   const project = useQuery(queryOf(contract.project, { params: { code } }));
   const history = useQuery(queryOf(contract.designBasis, { params: { code } }));
   const missing = (
@@ -88,9 +101,9 @@ export function DesignBasisPage() {
     </EmptyState>
   );
   return (
-    <QueryState query={project} what="The project" missing={missing}>
+    <QueryState level={1} query={project} what="The project" missing={missing}>
       {(found) => (
-        <QueryState query={history} what="The design basis" missing={missing}>
+        <QueryState level={1} query={history} what="The design basis" missing={missing}>
           {(bases) => <BasisView project={found} history={bases} />}
         </QueryState>
       )}

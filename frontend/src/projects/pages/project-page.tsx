@@ -15,7 +15,7 @@ import { CreateSpecificationForm } from '../components/create-specification-form
 import { EditProjectForm } from '../components/project-form';
 import { SpecificationsTable } from '../components/specifications-table';
 import { TowerFamiliesTable } from '../components/tower-families-table';
-import { PROJECT_KIND_LABELS, voltageText } from '../model/labels';
+import { PROJECT_KIND_LABELS, voltageText, zoneText } from '../model/labels';
 
 function ProjectFacts({ project }: { project: Project }) {
   const drafts = maySeeDrafts(usePerson());
@@ -31,7 +31,7 @@ function ProjectFacts({ project }: { project: Project }) {
         ['Kind', PROJECT_KIND_LABELS[project.kind]],
         ['Voltage Un/Um, line to line', voltageText(project) ?? 'not set'],
         ...(drafts ? ([['Design basis', basis]] as const) : []),
-        ['Site time zone', project.siteTimeZone],
+        ['Site time zone', zoneText(project.siteTimeZone)],
         ['Paper', project.paper],
       ]}
     />
@@ -49,15 +49,9 @@ function ProjectView({ project }: { project: Project }) {
   );
   return (
     <Page
-      title={project.title}
-      tabTitle={`${project.code} ${project.title}`}
+      title={`${project.code} ${project.title}`}
       crumbs={[{ label: 'Projects', to: paths.projects.to() }]}
-      lead={
-        <>
-          <span className="num">{project.code}</span>
-          {project.description && <> · {project.description}</>}
-        </>
-      }
+      lead={project.description || undefined}
       acts={
         project.mayEdit && (
           <>
@@ -95,6 +89,7 @@ export function ProjectPage() {
   const project = useQuery(queryOf(contract.project, { params: { code } }));
   return (
     <QueryState
+      level={1}
       query={project}
       what="The project"
       missing={

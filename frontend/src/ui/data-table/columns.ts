@@ -12,6 +12,8 @@ export interface Column<Row> {
   render?: (row: Row) => ReactNode;
   /** A figure: right-aligned, even digits. */
   figure?: boolean;
+  /** Decimals of a figure on the screen. */
+  decimals?: number;
   sortable?: boolean;
   /** Not in the copy and not in the file. */
   screenOnly?: boolean;

@@ -25,7 +25,7 @@ interface DataTableProps<Row> {
 }
 
 function tableColumns<Row>(columns: Column<Row>[], list: ListState): TableColumnType<Row>[] {
-  return columns.map(({ key, title, value, render, figure, sortable, wraps }) => ({
+  return columns.map(({ key, title, value, render, figure, decimals, sortable, wraps }) => ({
     key,
     dataIndex: key,
     title,
@@ -37,15 +37,16 @@ function tableColumns<Row>(columns: Column<Row>[], list: ListState): TableColumn
       if (render) return render(row);
       const cell = value(row);
       if (cell === null || cell === undefined || cell === '') return <span className="soft">—</span>;
-      return typeof cell === 'number' ? figureText(cell) : String(cell);
+      return typeof cell === 'number' ? figureText(cell, decimals) : String(cell);
     },
   }));
 }
 
-const FIGURE = new Intl.NumberFormat('en-GB', { maximumFractionDigits: 3 });
-
-export function figureText(value: number): string {
-  return FIGURE.format(value).replace('-', '−');
+/** A figure as it is read: thousands apart, a true minus, and the same decimals down a column where they are given. */
+export function figureText(value: number, decimals?: number): string {
+  return value
+    .toLocaleString('en-GB', { minimumFractionDigits: decimals ?? 0, maximumFractionDigits: decimals ?? 3 })
+    .replace('-', '−');
 }
 
 /** The one table: sorts, filters, pages by cursor, copies and exports; wide ones scroll inside themselves. */
@@ -60,11 +61,14 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   if (shown.length === 0 && !list.narrowed && !list.cursor && !loading && empty) return <>{empty}</>;
   return (
     <div className="data-table">
-      <div className="table-bar">
-        <TableFilters list={list} searchLabel={searchLabel} filters={filters} />
-        <TableActs name={name} columns={columns} allRows={pages ? pages.allRows : () => shown} />
-      </div>
-      <div className="table-scroll" role="region" aria-label={label} tabIndex={0} aria-busy={loading ?? false}>
+      {(searchLabel || filters.length > 0) && <TableFilters list={list} searchLabel={searchLabel} filters={filters} />}
+      <div
+        className="table-scroll"
+        role="region"
+        aria-label={`${label}, table`}
+        tabIndex={0}
+        aria-busy={loading ?? false}
+      >
         <Table<Row>
           size="small"
           columns={shownColumns}
@@ -82,16 +86,25 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           }}
         />
       </div>
-      {pages && (pages.next || pages.previous) && (
-        <nav className="table-pages" aria-label={`Pages of ${label}`}>
-          <Button size="small" disabled={!pages.previous} onClick={() => pages.previous && list.turnTo(pages.previous)}>
-            Previous
-          </Button>
-          <Button size="small" disabled={!pages.next} onClick={() => pages.next && list.turnTo(pages.next)}>
-            Next
-          </Button>
-        </nav>
-      )}
+      <div className="table-foot">
+        {pages && (pages.next || pages.previous) ? (
+          <nav className="table-pages" aria-label={`Pages of ${label}`}>
+            <Button
+              size="small"
+              disabled={!pages.previous}
+              onClick={() => pages.previous && list.turnTo(pages.previous)}
+            >
+              Previous
+            </Button>
+            <Button size="small" disabled={!pages.next} onClick={() => pages.next && list.turnTo(pages.next)}>
+              Next
+            </Button>
+          </nav>
+        ) : (
+          <span>{shown.length === 1 ? '1 row' : `${shown.length} rows`}</span>
+        )}
+        <TableActs name={name} columns={columns} allRows={pages ? pages.allRows : () => shown} />
+      </div>
     </div>
   );
 }

@@ -30,7 +30,7 @@ function StateMark({ row }: { row: SpecificationRow }) {
 function Margin({ row }: { row: SpecificationRow }) {
   if (row.worstMarginPercent === null) return <span className="soft">—</span>;
   const text = `${figureText(Math.round(row.worstMarginPercent * 10) / 10)} %`;
-  return row.worstMarginPercent < 0 ? <span className="row-short">{text} short</span> : text;
+  return row.worstMarginPercent < 0 ? <span className="row-short">{text}</span> : text;
 }
 
 function Severity({ severity }: { severity: string | null }) {
@@ -99,12 +99,9 @@ export const SPECIFICATION_COLUMNS: Column<SpecificationRow>[] = [
     key: 'savedAt',
     title: 'Saved',
     value: (row) => row.savedAt,
-    render: (row) => (
-      <>
-        <Moment at={row.savedAt} />
-        {row.savedBy && <span className="soft">, {row.savedBy}</span>}
-      </>
-    ),
+    render: (row) => <Moment at={row.savedAt} />,
     sortable: true,
   },
 ];
+
+export const SAVED_BY_COLUMN: Column<SpecificationRow> = { key: 'savedBy', title: 'By', value: (row) => row.savedBy };

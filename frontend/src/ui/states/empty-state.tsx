@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { useTitle } from '../use-title';
 import './states.css';
 
 interface EmptyStateProps {
@@ -10,6 +11,7 @@ interface EmptyStateProps {
 }
 
 export function EmptyState({ title, children, act, level = 2 }: EmptyStateProps) {
+  useTitle(level === 1 ? title : undefined);
   const Heading = level === 1 ? 'h1' : 'h2';
   return (
     <div className="state-panel">
