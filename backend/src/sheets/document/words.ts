@@ -78,6 +78,7 @@ const LIST_OF: Record<string, string> = {
 export function inputWords(path: string, value: unknown): string {
   if (value === null || value === undefined) return NOT_STATED;
   if (typeof value === 'number') return withUnit(plain(value), fieldOf(path)?.unit ?? '');
+  if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (typeof value === 'object') {
     return Object.entries(value)
       .filter(([, part]) => part !== null && part !== undefined)
@@ -88,7 +89,8 @@ export function inputWords(path: string, value: unknown): string {
       .join('; ');
   }
   const name = LIST_OF[path] ?? path.split('.').pop() ?? path;
-  return CHOICES[name]?.[String(value)] ?? String(value);
+  if (typeof value !== 'string') return NOT_STATED;
+  return CHOICES[name]?.[value] ?? value;
 }
 
 export const DISTANCE_WORDS: Record<ClearanceRow['distance'], string> = {

@@ -1,7 +1,8 @@
-import type { Block, Heading, List, Notice, Pairs, Paragraph } from '../blocks';
+import type { Block, Heading, List, Notice, Paragraph } from '../blocks';
 import { widthOf } from '../fonts/faces';
 import { wrap } from '../fonts/wrap';
 import { COLOURS, element, type Element, type Mark } from './marks';
+import { layOutPairs, pairsHeight } from './pairs';
 import { layOutTable } from './table';
 import { LEADING, textMarks } from './text';
 
@@ -19,15 +20,13 @@ export interface Paper {
 }
 
 const BODY_SIZE = 8.5;
-const NOTE_SIZE = 7;
 const HEADING = { 1: { size: 12.5, before: 16, after: 5 }, 2: { size: 9, before: 9, after: 3 } } as const;
 /** A heading stands with at least this much of what it heads; a short list of pairs is not cut at all. */
 const KEEP_PT = 46;
 const MOST_KEPT_PAIRS = 12;
-const PAIR_PT = BODY_SIZE * LEADING + 2.7;
 
 const keepOf = (next: Block): number =>
-  next.kind === 'pairs' && next.rows.length <= MOST_KEPT_PAIRS ? next.rows.length * PAIR_PT : KEEP_PT;
+  next.kind === 'pairs' && next.rows.length <= MOST_KEPT_PAIRS ? pairsHeight(next.rows.length) : KEEP_PT;
 
 /** Runs blocks down a region and, where allowed, over as many pages as they need. */
 export class Flow {
@@ -90,7 +89,7 @@ export class Flow {
       case 'paragraph':
         return this.paragraph(block);
       case 'pairs':
-        return this.pairs(block);
+        return layOutPairs(this, block);
       case 'list':
         return this.list(block);
       case 'notice':
@@ -135,71 +134,6 @@ export class Flow {
       this.y += size * LEADING;
     }
     this.add(element('P', this.page, marks));
-    this.y += 3;
-    return null;
-  }
-
-  private pairs(block: Pairs): Block | null {
-    const size = BODY_SIZE;
-    const table = element('Table', this.page);
-    table.title = 'Labels and values';
-    this.add(table);
-    for (let i = 0; i < block.rows.length; i += 1) {
-      const row = block.rows[i]!;
-      const labelWidth = this.here.width * (block.labelShare ?? 0.4) - 6;
-      const valueWidth = this.here.width - labelWidth - 6;
-      const labels = wrap(row.label, row.strong ? 'semibold' : 'sans', size, labelWidth);
-      const mono = /^[−\d]/.test(row.value);
-      const face = mono ? 'mono' : row.strong ? 'semibold' : 'sans';
-      const values = wrap(row.value, face, size, valueWidth);
-      const lastWidth = widthOf(values[values.length - 1] ?? '', face) * size;
-      const noteWidth = row.note ? widthOf(row.note, 'sans') * NOTE_SIZE : 0;
-      const beside = row.note !== undefined && lastWidth + 5 + noteWidth <= valueWidth;
-      const notes = row.note && !beside ? wrap(row.note, 'sans', NOTE_SIZE, valueWidth) : [];
-      const lines = Math.max(labels.length, values.length);
-      const height = lines * size * LEADING + notes.length * NOTE_SIZE * LEADING + 2.6;
-      if (!this.reserve(height)) return { ...block, rows: block.rows.slice(i) };
-      const x = this.here.x;
-      const top = this.y + 1;
-      const label = labels.flatMap((text, line) =>
-        textMarks(text, x, top + line * size * LEADING, labelWidth, {
-          face: row.strong ? 'semibold' : 'sans',
-          size,
-          tone: row.strong ? 'ink' : 'soft',
-        }),
-      );
-      const valueX = x + labelWidth + 6;
-      const value = values.flatMap((text, line) =>
-        textMarks(text, valueX, top + line * size * LEADING, valueWidth, { face, size }),
-      );
-      if (row.note && beside) {
-        const noteTop = top + (values.length - 1) * size * LEADING + (size - NOTE_SIZE);
-        value.push(
-          ...textMarks(row.note, valueX + lastWidth + 5, noteTop, noteWidth, {
-            face: 'sans',
-            size: NOTE_SIZE,
-            tone: 'soft',
-          }),
-        );
-      }
-      notes.forEach((text, line) => {
-        const noteTop = top + values.length * size * LEADING + line * NOTE_SIZE * LEADING;
-        value.push(...textMarks(text, valueX, noteTop, valueWidth, { face: 'sans', size: NOTE_SIZE, tone: 'soft' }));
-      });
-      table.children.push(
-        element('TR', this.page, [], [element('TH', this.page, label), element('TD', this.page, value)]),
-      );
-      this.y += height;
-      this.artifact({
-        kind: 'rule',
-        x,
-        y: this.y,
-        toX: x + this.here.width,
-        toY: this.y,
-        weight: 0.35,
-        colour: COLOURS.hair,
-      });
-    }
     this.y += 3;
     return null;
   }

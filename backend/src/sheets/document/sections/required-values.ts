@@ -16,6 +16,7 @@ export function governing({ evaluation }: SheetContent): Block[] {
   const margin = criterion?.marginPercent;
   const sentences = [
     names.length > 1 ? `${names.join(', ')} need the same and govern.` : `${names[0]} governs.`,
+    ...(criterion?.verdict === 'short' ? ['Requirement not met.'] : []),
     ...(margin === null || margin === undefined ? [] : [`Margin ${down(margin, 1)} %.`]),
   ];
   const open = answer.criteria.filter((row) => row.applies && row.state === 'not-assessed');
@@ -56,7 +57,8 @@ export function requiredValues({ evaluation, context, input }: SheetContent): Bl
     add('Section length', withUnit(plain(answer.sectionLengthMm), 'mm'));
     add('Dry arc needed', withUnit(up(answer.dryArcRequiredMm), 'mm'));
     add('Dry arc provided', withUnit(down(answer.dryArcMm), 'mm'), devicesWords(input.string?.arcingDevices));
-    if (answer.dryArcWithDevicesMm !== null) add('between devices', withUnit(down(answer.dryArcWithDevicesMm), 'mm'));
+    if (answer.dryArcWithDevicesMm !== null)
+      add('Dry arc with devices', withUnit(down(answer.dryArcWithDevicesMm), 'mm'));
     const [least, most] = [answer.stringLengthWithFittingsMinMm, answer.stringLengthWithFittingsMaxMm];
     add(
       'Length with fittings',
