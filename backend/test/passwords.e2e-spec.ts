@@ -1,4 +1,5 @@
 import { contract } from '@bellgap/common/api';
+import { UsersService } from '../src/users/users.service';
 import { TestApp } from './support/test-app';
 import type { TestClient } from './support/test-client';
 
@@ -106,6 +107,18 @@ describe('passwords', () => {
       test.clock.advance({ days: 7, seconds: 1 });
       expect((await accept(tokenOf(second.answer.link))).status).toBe(422);
       expect((await accept('no such token at all')).status).toBe(422);
+    });
+
+    it('makes the first administrator of an installation, and a new link for one who lost his password', async () => {
+      const given = { email: 'first@company.example', name: 'Wen Tollarsson' };
+      const first = await test.app.get(UsersService).inviteAdministrator(given);
+      expect(first.user.grants).toMatchObject([{ role: 'administrator', projectCode: null, grantedBy: null }]);
+      const second = await test.app.get(UsersService).inviteAdministrator(given);
+      expect(second.user).toEqual(first.user);
+      expect((await accept(tokenOf(first.link))).status).toBe(422);
+      expect((await accept(tokenOf(second.link))).status).toBe(204);
+      const client = await test.signIn({ email: given.email, password: NEW_PASSWORD });
+      expect((await client.call(contract.users)).status).toBe(200);
     });
 
     it('is stored as a hash only', async () => {

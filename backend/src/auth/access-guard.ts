@@ -1,10 +1,10 @@
 import { Injectable, type CanActivate, type ExecutionContext } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
-import type { EndpointDefinition } from '@bellgap/common/api';
+import { PASSIVE_HEADER, type EndpointDefinition } from '@bellgap/common/api';
 import { forbidden, notSignedIn } from '../platform/domain-error';
 import { holdsAnywhere, type PersonRequest } from '../platform/person';
 import { ENDPOINT, OPEN } from '../platform/route';
-import { PASSIVE_HEADER, SESSION_COOKIE } from '../platform/session-cookie';
+import { SESSION_COOKIE } from '../platform/session-cookie';
 import { SessionsService } from './sessions.service';
 
 /** Finds out who asks, and lets in whom the contract names. A route that says nothing is closed. */
@@ -23,7 +23,7 @@ export class AccessGuard implements CanActivate {
     const cookies = request.cookies as Record<string, unknown> | undefined;
     const token = cookies?.[SESSION_COOKIE];
     if (typeof token === 'string') {
-      const passive = request.headers[PASSIVE_HEADER] === '1';
+      const passive = request.get(PASSIVE_HEADER) === '1';
       request.person = (await this.sessions.read(token, { passive })) ?? undefined;
     }
     if (access === 'open') return true;

@@ -16,11 +16,12 @@ export class Passwords {
 
   /** Takes the same time whether or not there is a hash to compare with. */
   async matches(password: string, passwordHash: string | null): Promise<boolean> {
-    const cost = String(this.config.passwordCost).padStart(2, '0');
-    const same = await compare(digest(password), passwordHash ?? `$2b$${cost}$${NOBODY}`);
+    const same = await compare(digest(password), passwordHash ?? hashOfNobody(this.config.passwordCost));
     return same && passwordHash !== null;
   }
 }
+
+export const hashOfNobody = (cost: number) => `$2b$${String(cost).padStart(2, '0')}$${NOBODY}`;
 
 /** bcrypt reads 72 bytes and stops at a zero byte; a digest in base64 lets every character of a password count. */
 function digest(password: string): string {

@@ -3,9 +3,6 @@ import type { Config } from './config';
 
 export const SESSION_COOKIE = 'bellgap_session';
 
-/** Requests that no person made, such as polling and timed saves: they do not keep a session alive. */
-export const PASSIVE_HEADER = 'x-bellgap-passive';
-
 function options({ secureCookie }: Config): CookieOptions {
   return { httpOnly: true, sameSite: 'strict', path: '/', secure: secureCookie };
 }
