@@ -34,13 +34,15 @@ export async function openContext(
   viewport: Viewport,
   theme: 'light' | 'dark',
 ): Promise<BrowserContext> {
-  return browser.newContext({
+  const context = await browser.newContext({
     viewport: { width: viewport.widthPx, height: viewport.heightPx },
     colorScheme: theme,
     locale: 'en-GB',
     timezoneId: 'UTC',
     acceptDownloads: true,
   });
+  context.setDefaultTimeout(10_000);
+  return context;
 }
 
 /** What a page said on the console or failed to fetch; a clean page leaves it empty. */
