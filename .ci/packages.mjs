@@ -59,7 +59,7 @@ if (!installed()) {
   console.log('Installing packages');
   const { status } = spawnSync(
     'npm',
-    ['ci', '--include=dev', '--no-audit', '--no-fund', '--loglevel=error', ...cacheSetting()],
+    ['ci', '--include=dev', '--no-audit', '--no-fund', '--loglevel=error', '--no-update-notifier', ...cacheSetting()],
     {
       cwd: root,
       stdio: ['ignore', 'inherit', 'inherit'],
