@@ -29,8 +29,8 @@ export const AnswerBar = memo(function AnswerBar({ answer, state, message, unit 
     <div className={`answer is-${state}`} data-testid="answer" data-state={state}>
       <TraceArea className="answer-figures">
         <Count evaluation={evaluation} input={input} unit={unit} />
-        {evaluation.string && <Creepage evaluation={evaluation} />}
-        {evaluation.string && <Length evaluation={evaluation} input={input} />}
+        <Creepage evaluation={evaluation} />
+        <Length evaluation={evaluation} input={input} />
         {input.kind === 'bay' && <BayDistances evaluation={evaluation} />}
         <Governing evaluation={evaluation} unit={unit} />
       </TraceArea>
@@ -50,6 +50,8 @@ export const AnswerBar = memo(function AnswerBar({ answer, state, message, unit 
     </div>
   );
 });
+
+const isStopped = ({ cautions }: Evaluation): boolean => cautions.some(({ severity }) => severity === 'stop');
 
 function noCountWhy(evaluation: Evaluation): string {
   const stop = evaluation.cautions.find(({ severity }) => severity === 'stop');
@@ -81,8 +83,9 @@ function Count({
   if (units === null) {
     return (
       <div className="answer-main">
-        <span className="answer-big">No count yet</span>
+        <span className="answer-big">{isStopped(evaluation) ? 'No count' : 'No count yet'}</span>
         <small className="answer-why">{noCountWhy(evaluation)}</small>
+        <Gravest cautions={evaluation.cautions} />
       </div>
     );
   }
@@ -99,40 +102,34 @@ function Count({
 
 function Creepage({ evaluation }: { evaluation: Evaluation }) {
   const { string } = evaluation;
-  if (!string) return null;
+  if (!string || (string.creepageProvidedMm === null && string.creepageRequiredMm === null)) return null;
   const basis = string.creepageVoltageBasis === 'line-to-line' ? 'line to line' : 'phase to earth';
+  const words: string[] = [];
+  if (string.creepageRequiredMm === null) words.push('needed: not known');
+  else words.push(`needed ${formatNumber(string.creepageRequiredMm, { round: 'up' })} mm`);
+  if (string.creepageVoltageKv !== null && string.uscdRequiredMmPerKv !== null) {
+    const perKv = formatNumber(string.uscdRequiredMmPerKv, { decimals: 1, round: 'up' });
+    words.push(`${perKv} mm/kV on ${formatNumber(string.creepageVoltageKv, { decimals: 1 })} kV ${basis}`);
+  }
+  if (string.scd1986RequiredMmPerKvUm !== null) {
+    words.push(`${formatNumber(string.scd1986RequiredMmPerKvUm, { decimals: 1, round: 'up' })} mm/kV line to line`);
+  }
   return (
     <div>
       <span className="answer-figure">
         <Figure value={string.creepageProvidedMm} round="down" name="string.creepageProvidedMm" label="Creepage" /> mm
         creepage
       </span>
-      <small>
-        {string.creepageRequiredMm === null ? (
-          `needed: not known${whyNot(evaluation, 'string.pollution') ? `, ${whyNot(evaluation, 'string.pollution')}` : ''}`
-        ) : (
-          <>
-            {`needed ${formatNumber(string.creepageRequiredMm, { round: 'up' })} mm`}
-            {string.creepageVoltageKv !== null && string.uscdRequiredMmPerKv !== null && (
-              <>
-                {' '}
-                · {formatNumber(string.uscdRequiredMmPerKv, { decimals: 1, round: 'up' })} mm/kV on{' '}
-                {formatNumber(string.creepageVoltageKv, { decimals: 1 })} kV {basis}
-              </>
-            )}
-            {string.scd1986RequiredMmPerKvUm !== null && (
-              <> · {formatNumber(string.scd1986RequiredMmPerKvUm, { decimals: 1, round: 'up' })} mm/kV line to line</>
-            )}
-          </>
-        )}
-      </small>
+      <small>{words.join(' · ')}</small>
     </div>
   );
 }
 
+const DEVICE_WORDS = { none: ', no devices', horns: ', with horns', rings: ', with rings' } as const;
+
 function Length({ evaluation, input }: { evaluation: Evaluation; input: SpecificationInput }) {
   const { string } = evaluation;
-  if (!string) return null;
+  if (!string || string.sectionLengthMm === null) return null;
   const devices = input.string?.arcingDevices;
   const arc = string.dryArcWithDevicesMm ?? string.dryArcMm;
   return (
@@ -143,13 +140,7 @@ function Length({ evaluation, input }: { evaluation: Evaluation; input: Specific
       </span>
       <small>
         {arc === null ? 'dry arc not known' : `dry arc ${formatNumber(arc, { round: 'down' })} mm`}
-        {devices === 'none'
-          ? ', no devices'
-          : devices === 'horns'
-            ? ', with horns'
-            : devices === 'rings'
-              ? ', with rings'
-              : ''}
+        {devices ? DEVICE_WORDS[devices] : ''}
       </small>
     </div>
   );
@@ -180,8 +171,8 @@ function marginOf({ string }: Evaluation, criterion: Criterion | null): number |
 
 function Governing({ evaluation, unit }: { evaluation: Evaluation; unit: InsulatorUnit | null }) {
   const { string } = evaluation;
-  if (!string) return null;
-  const words = governingWords(string);
+  const words = string ? governingWords(string) : null;
+  if (!string || words === null) return null;
   const margin = marginOf(evaluation, string.governedBy);
   const parts: string[] = [];
   if (margin !== null) parts.push(`margin ${formatNumber(margin, { decimals: 1, round: 'down' })} %`);
@@ -193,11 +184,11 @@ function Governing({ evaluation, unit }: { evaluation: Evaluation; unit: Insulat
   const open = string.criteria
     .filter(({ state }) => state === 'not-assessed')
     .map(({ criterion }) => criterionWords(criterion).toLowerCase());
-  if (open.length > 0) parts.push(`${open.join(' and ')} not assessed`);
+  if (open.length > 0) parts.push(`not assessed: ${open.join(', ')}`);
   return (
     <div>
-      <span className="answer-governs">{words ?? 'Nothing governs yet'}</span>
-      <small>{parts.join(' · ') || 'no criterion has a figure'}</small>
+      <span className="answer-governs">{words}</span>
+      <small>{parts.join(' · ')}</small>
       <Gravest cautions={evaluation.cautions} />
     </div>
   );

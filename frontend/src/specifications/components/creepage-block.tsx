@@ -2,7 +2,6 @@ import type { Evaluation, SpecificationInput } from '@bellgap/common/api';
 import { Figure } from '../../ui/figure';
 import { TraceArea } from '../../ui/trace';
 import { useLit } from '../hooks/highlight';
-import { whyNot } from '../model/words';
 import { LedgerBlock } from './ledger-rows';
 
 interface Properties {
@@ -16,7 +15,6 @@ export function CreepageBlock({ evaluation, input }: Properties) {
   const lit = useLit('string.units');
   if (!string) return null;
   const basis = string.creepageVoltageBasis === 'phase-to-earth' ? 'phase to earth' : 'line to line';
-  const why = whyNot(evaluation, 'string.pollution');
   return (
     <LedgerBlock title="Creepage by both conventions">
       <TraceArea>
@@ -54,7 +52,6 @@ export function CreepageBlock({ evaluation, input }: Properties) {
                   round="up"
                   name="string.uscdRequiredMmPerKv"
                   label="Specific creepage needed"
-                  why={why}
                 />
               </td>
               <td>

@@ -63,7 +63,6 @@ export function LevelAt() {
     },
     [own, holdsToM, setFigure],
   );
-  const chosenRow = own.find((row) => levelKey(row) === key);
   return (
     <>
       <ChoiceAt
@@ -76,11 +75,6 @@ export function LevelAt() {
         wide
         placeholder={highestVoltageKv === null ? 'needs Um' : 'choose'}
         empty={emptyLevels(basis, highestVoltageKv)}
-        note={
-          level !== null && highestVoltageKv !== null && rows && !chosenRow
-            ? `no row of the table for Um ${highestVoltageKv} kV`
-            : undefined
-        }
       />
       {level !== null && (
         <NumberAt

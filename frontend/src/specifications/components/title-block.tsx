@@ -62,15 +62,14 @@ function TitleCell() {
         {readOnly ? (
           values.title
         ) : (
-          <Input.TextArea
+          <Input
             id="field-title"
-            autoSize={{ minRows: 1, maxRows: 3 }}
             variant="borderless"
             value={values.title}
             maxLength={160}
             aria-invalid={fault ? true : undefined}
             aria-describedby={fault ? 'field-title-note' : undefined}
-            onChange={({ target }) => setTitle(target.value.replace(/\n/g, ' '))}
+            onChange={({ target }) => setTitle(target.value)}
             onBlur={leave}
           />
         )}
