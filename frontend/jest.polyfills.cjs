@@ -29,3 +29,11 @@ globalThis.MessageChannel ??= class {
     this.port2 = { postMessage: () => setTimeout(() => this.port1.onmessage?.({}), 0), close() {} };
   }
 };
+
+// The router wraps each navigation in a Request; it reads no more of it than this.
+globalThis.Request ??= class {
+  constructor(url, { method = 'GET', signal } = {}) {
+    Object.assign(this, { url: String(url), method, signal, headers: new Map() });
+  }
+};
+globalThis.structuredClone ??= (value) => JSON.parse(JSON.stringify(value));

@@ -8,7 +8,7 @@ import { discOutline } from './silhouettes/disc';
 import { rodOutline } from './silhouettes/rod';
 
 /** Heights of text in the longer side of a unit, and distance of its dimension lines in heights of text. */
-const TEXTS_IN_UNIT = { disc: 17, rod: 34 } as const;
+const TEXTS_IN_UNIT = { disc: 24, rod: 34 } as const;
 const DIMENSION_TEXTS = 2.6;
 
 /**

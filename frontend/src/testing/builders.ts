@@ -15,7 +15,7 @@ export const aProject = (given: Partial<Project> = {}): Project => ({
   code: 'KL221',
   title: 'Saltgrave - Ondara',
   kind: 'line',
-  siteTimeZone: '+04:00',
+  siteTimeZone: 'Etc/GMT-4',
   paper: 'A4',
   description: '',
   lockVersion: 3,

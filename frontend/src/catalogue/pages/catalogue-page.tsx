@@ -28,7 +28,7 @@ const COLUMNS: Column<CatalogueUnit>[] = [
     ),
     sortable: true,
   },
-  { key: 'family', title: 'Family', value: familyText },
+  { key: 'family', title: 'Family', value: familyText, fileOnly: true },
   { key: 'kind', title: 'Kind', value: kindText },
   { key: 'material', title: 'Material', value: materialText },
   { key: 'profile', title: 'Profile', value: profileText },
@@ -41,8 +41,10 @@ const COLUMNS: Column<CatalogueUnit>[] = [
   {
     key: 'source',
     title: 'Source',
-    value: (row) => `${sourceText(row.source)} (${CHOICE_LABELS.status[row.source.status]})`,
+    value: (row) => sourceText(row.source),
+    render: (row) => <span title={sourceText(row.source)}>{row.source.document}</span>,
   },
+  { key: 'status', title: 'Status', value: (row) => CHOICE_LABELS.status[row.source.status] },
 ];
 
 const FILTERS = [

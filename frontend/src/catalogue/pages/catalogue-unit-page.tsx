@@ -79,7 +79,7 @@ function UnitView({ unit }: { unit: CatalogueUnit }) {
       <div className={drawing ? 'unit-sheets unit-sheets-drawn' : 'unit-sheets'}>
         {drawing && (
           <Sheet title="Outline" note="to scale; the form of cap and shed is not">
-            <div className="unit-drawing">
+            <div className="unit-drawing" style={{ aspectRatio: drawing.widthMm / drawing.heightMm }}>
               <DrawingView drawing={drawing} />
             </div>
           </Sheet>

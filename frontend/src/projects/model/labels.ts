@@ -16,18 +16,15 @@ export function voltageText(project: Pick<Project, 'nominalVoltageKv' | 'highest
 export function timeZoneChoices(): { value: string; label: string }[] {
   const offsets = Array.from({ length: 27 }, (_, step) => {
     const hours = step - 12;
-    const value = `${hours < 0 ? '-' : '+'}${String(Math.abs(hours)).padStart(2, '0')}:00`;
-    return { value, label: `UTC${value}` };
+    // The names of these zones count the other way round: Etc/GMT-4 is four hours before UTC.
+    const value = hours === 0 ? 'Etc/UTC' : `Etc/GMT${hours > 0 ? '-' : '+'}${Math.abs(hours)}`;
+    return { value, label: `UTC${hours < 0 ? '-' : '+'}${String(Math.abs(hours)).padStart(2, '0')}:00` };
   });
-  return [
-    ...offsets,
-    ...Intl.supportedValuesOf('timeZone').map((zone) => ({ value: zone, label: zone.replaceAll('_', ' ') })),
-  ];
+  const named = Intl.supportedValuesOf('timeZone').filter((zone) => !zone.startsWith('Etc/') && zone !== 'UTC');
+  return [...offsets, ...named.map((zone) => ({ value: zone, label: zone.replaceAll('_', ' ') }))];
 }
 
-/** A zone as people write it: its offset from UTC, and its name where that says more. */
+/** A zone as people write it: by its offset, or by its name. */
 export function zoneText(zone: string): string {
-  const parts = new Intl.DateTimeFormat('en-GB', { timeZone: zone, timeZoneName: 'longOffset' }).formatToParts();
-  const offset = (parts.find(({ type }) => type === 'timeZoneName')?.value ?? zone).replace('GMT', 'UTC');
-  return zone.startsWith('Etc/') || !zone.includes('/') ? offset : `${offset}, ${zone.replaceAll('_', ' ')}`;
+  return timeZoneChoices().find(({ value }) => value === zone)?.label ?? zone;
 }

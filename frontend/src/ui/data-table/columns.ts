@@ -17,6 +17,8 @@ export interface Column<Row> {
   sortable?: boolean;
   /** Not in the copy and not in the file. */
   screenOnly?: boolean;
+  /** Only in the copy and in the file: on the screen it would stand twice. */
+  fileOnly?: boolean;
   /** Long words that may break; other cells stay on one line. */
   wraps?: boolean;
 }

@@ -25,7 +25,8 @@ interface DataTableProps<Row> {
 }
 
 function tableColumns<Row>(columns: Column<Row>[], list: ListState): TableColumnType<Row>[] {
-  return columns.map(({ key, title, value, render, figure, decimals, sortable, wraps }) => ({
+  const shown = columns.filter(({ fileOnly }) => !fileOnly);
+  return shown.map(({ key, title, value, render, figure, decimals, sortable, wraps }) => ({
     key,
     dataIndex: key,
     title,

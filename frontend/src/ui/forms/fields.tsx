@@ -57,7 +57,7 @@ export function LongTextField<Values extends FormikValues>({
       {({ value, set, onBlur, ...control }) => (
         <Input.TextArea
           {...control}
-          autoSize={{ minRows: rows, maxRows: 12 }}
+          rows={rows}
           value={(value as string | null) ?? ''}
           onChange={({ target }) => set(target.value)}
           onBlur={onBlur}
