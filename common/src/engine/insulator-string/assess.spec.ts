@@ -104,6 +104,14 @@ describe(assessString.name, () => {
     expect(criterion(string, 'lightning').marginUnits).toBe(3);
   });
 
+  it('says that extra units were not filled in, and counts none', () => {
+    const { string, cautions } = answer(aLine({ string: { spareUnits: null } }));
+    expect(string.extraUnits).toBe(0);
+    expect(cautions).toContainEqual(
+      expect.objectContaining({ code: 'extra-units-not-filled-in', severity: 'caution', field: 'string.spareUnits' }),
+    );
+  });
+
   it('takes the wet flashover from the table for 255 x 146 mm and from the catalogue elsewhere', () => {
     const other = aDisc({ diameterMm: 280 });
     expect(criterion(answer(aLine(), aContext({ insulator: other })).string, 'power-frequency').state).toBe(

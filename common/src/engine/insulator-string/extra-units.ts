@@ -1,3 +1,4 @@
+import { isKnown } from '../quantities';
 import { COMPANY, cite } from '../sources';
 import type { Calculation } from '../trace';
 import type { StringCase } from './assess';
@@ -10,6 +11,10 @@ import { isDisc } from './unit';
 export function extraUnits({ string, context, unit }: StringCase, calculation: Calculation): number | null {
   if (!isDisc(unit)) return 0;
   const byHand = string.spareUnits ?? 0;
+  if (!isKnown(string.spareUnits)) {
+    const text = 'Whether the string carries extra units is not filled in; it is counted without any by hand.';
+    calculation.caution('extra-units-not-filled-in', 'caution', text, 'string.spareUnits');
+  }
   const { tensionExtraUnits, version } = context.settings;
   const arrangement = string.arrangement ?? null;
   if (arrangement === null && tensionExtraUnits > 0) {
