@@ -3,7 +3,7 @@ import { memo, useEffect, useState } from 'react';
 import { Figure, formatNumber } from '../../ui/figure';
 import { TraceArea } from '../../ui/trace';
 import type { Answer, AnswerState } from '../hooks/use-live-evaluation';
-import { criterionWords, governingWords, stringWords, whyNot } from '../model/words';
+import { criterionWords, governingWords, missingWords, stringWords, whyNot } from '../model/words';
 import { SeverityShape } from './caution-mark';
 
 interface Properties {
@@ -24,7 +24,7 @@ const STATE_WORDS: Record<Exclude<AnswerState, 'current'>, string> = {
 /** The answer on top, in words and figures: how many of what, how much creepage, how long, and what governs. */
 export const AnswerBar = memo(function AnswerBar({ answer, state, message, unit }: Properties) {
   const { evaluation, input } = answer;
-  const sentence = sentenceOf(evaluation, unit);
+  const sentence = sentenceOf(answer, unit);
   return (
     <div className={`answer is-${state}`} data-testid="answer" data-state={state}>
       <TraceArea className="answer-figures">
@@ -53,9 +53,9 @@ export const AnswerBar = memo(function AnswerBar({ answer, state, message, unit 
 
 const isStopped = ({ cautions }: Evaluation): boolean => cautions.some(({ severity }) => severity === 'stop');
 
-function noCountWhy(evaluation: Evaluation): string {
+function noCountWhy(evaluation: Evaluation, input: SpecificationInput): string {
   const stop = evaluation.cautions.find(({ severity }) => severity === 'stop');
-  return stop?.text ?? whyNot(evaluation, 'string') ?? 'more has to be filled in';
+  return stop?.text ?? missingWords(input) ?? whyNot(evaluation, 'string') ?? 'No criterion could be assessed';
 }
 
 const unitsWord = (units: number, isRod: boolean): string =>
@@ -84,7 +84,7 @@ function Count({
     return (
       <div className="answer-main">
         <span className="answer-big">{isStopped(evaluation) ? 'No count' : 'No count yet'}</span>
-        <small className="answer-why">{noCountWhy(evaluation)}</small>
+        <small className="answer-why">{noCountWhy(evaluation, input)}</small>
         <Gravest cautions={evaluation.cautions} />
       </div>
     );
@@ -228,9 +228,9 @@ function shortGoverning(evaluation: Evaluation): string {
   return margin === null ? words : `${words}, ${formatNumber(margin, { decimals: 1, round: 'down' })} %`;
 }
 
-function sentenceOf(evaluation: Evaluation, unit: InsulatorUnit | null): string {
+function sentenceOf({ evaluation, input }: Answer, unit: InsulatorUnit | null): string {
   const { string } = evaluation;
-  if (string?.units === null || string?.units === undefined) return `No count: ${noCountWhy(evaluation)}`;
+  if (string?.units === null || string?.units === undefined) return `No count: ${noCountWhy(evaluation, input)}`;
   const governing = governingWords(string);
   return `${shortCount(evaluation, unit)}.${governing ? ` ${governing}.` : ''}`;
 }

@@ -18,7 +18,9 @@ export function CriteriaBlock({ evaluation, isRod }: Properties) {
   if (!string) {
     return (
       <LedgerBlock title={title}>
-        <p className="zone-note">{whyNot(evaluation, 'string') ?? 'No string is described yet.'}</p>
+        <p className="zone-note">
+          Each criterion shows its own count here as soon as the site and the string are described.
+        </p>
       </LedgerBlock>
     );
   }

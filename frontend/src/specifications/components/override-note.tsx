@@ -24,7 +24,7 @@ export function OverrideNote({ path, was }: Properties) {
           <Input
             size="small"
             aria-label={`Reason why it differs from the basis: ${label}`}
-            placeholder="reason"
+            placeholder="reason, needed for the check"
             value={reason}
             maxLength={500}
             status={reason.trim() === '' ? 'warning' : ''}

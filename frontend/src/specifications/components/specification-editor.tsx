@@ -64,13 +64,19 @@ export function SpecificationEditor({ first }: Properties) {
 
   const [begun] = useState<Answer>(() => ({ input, key: inputKey, evaluation: first.evaluation }));
   const live = useLiveEvaluation({ input, key: inputKey, readable: readable && !inputFaulty }, begun);
+  // What a save gives back is taken over where it says something new; fields stay as they are drawn.
+  const onSaved = useCallback(
+    (saved: Revision) =>
+      setRevision((now) => (now.basis?.id === saved.basis?.id ? { ...saved, basis: now.basis } : saved)),
+    [],
+  );
   const draft = { values, body, key, readable: readable && ownFaults.length === 0 };
   const { saving, save, rebase, compareWith, versionNow } = useSaving({
     first,
     address,
     draft,
     enabled: !readOnly,
-    onSaved: setRevision,
+    onSaved,
   });
   const [offers, setOffersShown] = useState(() => (readOnly ? [] : offersOf(first, key)));
   const traceSource = useTraceSource(live.answer);

@@ -5,8 +5,10 @@ import { call } from '../../api/client';
 import { useSession } from '../../api/session';
 
 /** Long enough not to ask for every key of a fast typist, short enough to be felt as at once. */
-const PAUSE_MS = 70;
+const PAUSE_MS = 60;
 const RETRY_MS = 4000;
+/** One and the same where there are none, so that fields are not drawn anew for nothing. */
+const NO_FAULTS: FieldError[] = [];
 
 export interface Answer {
   evaluation: Evaluation;
@@ -37,11 +39,12 @@ interface Asked {
 
 function outcomeOf(error: unknown): Pick<Asked, 'outcome' | 'faults' | 'message'> {
   const message = failureText(error);
-  if (!(error instanceof ApiError)) return { outcome: 'failed', faults: [], message };
+  if (!(error instanceof ApiError)) return { outcome: 'failed', faults: NO_FAULTS, message };
   if (error.code === 'validation') return { outcome: 'refused', faults: error.fields, message };
-  if (error.code === 'unreachable' || error.status === 503) return { outcome: 'unreachable', faults: [], message };
-  if (error.code === 'not-signed-in') return { outcome: 'signed-out', faults: [], message };
-  return { outcome: 'failed', faults: [], message };
+  if (error.code === 'unreachable' || error.status === 503)
+    return { outcome: 'unreachable', faults: NO_FAULTS, message };
+  if (error.code === 'not-signed-in') return { outcome: 'signed-out', faults: NO_FAULTS, message };
+  return { outcome: 'failed', faults: NO_FAULTS, message };
 }
 
 interface Question {
@@ -59,7 +62,7 @@ export function useLiveEvaluation({ input, key, readable }: Question, first: Ans
   const [asked, setAsked] = useState<Asked>({
     answer: first,
     outcome: 'current',
-    faults: [],
+    faults: NO_FAULTS,
     message: null,
     about: first.key,
   });
@@ -87,7 +90,7 @@ export function useLiveEvaluation({ input, key, readable }: Question, first: Ans
           setAsked({
             answer: { evaluation: evaluation as Evaluation, input: about, key },
             outcome: 'current',
-            faults: [],
+            faults: NO_FAULTS,
             message: null,
             about: key,
           });
@@ -118,8 +121,8 @@ export function useLiveEvaluation({ input, key, readable }: Question, first: Ans
   }, [lost]);
 
   const { answer, faults, message } = asked;
-  if (!readable) return { answer, state: 'faulty', faults: [], message: null };
-  if (answer.key === key) return { answer, state: 'current', faults: [], message: null };
+  if (!readable) return { answer, state: 'faulty', faults: NO_FAULTS, message: null };
+  if (answer.key === key) return { answer, state: 'current', faults: NO_FAULTS, message: null };
   if (asked.about !== key) return { answer, state: 'waiting', faults, message: null };
   const state = asked.outcome === 'refused' ? 'faulty' : asked.outcome === 'current' ? 'waiting' : asked.outcome;
   return { answer, state, faults, message };

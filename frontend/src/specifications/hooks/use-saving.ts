@@ -1,4 +1,4 @@
-import { contract, type Revision } from '@bellgap/common/api';
+import { contract, type FieldError, type Revision } from '@bellgap/common/api';
 import { useCallback, useEffect, useReducer, useRef } from 'react';
 import { call } from '../../api/client';
 import { useSession } from '../../api/session';
@@ -9,6 +9,8 @@ import { useForgetLists, type RevisionAddress } from '../queries/use-revision';
 
 const PAUSE_MS = 800;
 const RETRY_MS = 5000;
+/** One and the same where there are none, so that fields are not drawn anew for nothing. */
+const NO_FAULTS: FieldError[] = [];
 
 export interface Draft {
   values: FormValues;
@@ -32,7 +34,7 @@ const begin = (first: Revision): Saving => ({
   state: 'saved',
   savedAt: first.savedAt,
   kept: false,
-  faults: [],
+  faults: NO_FAULTS,
   message: null,
   conflict: null,
   origin: formOf(first),
@@ -77,7 +79,7 @@ export function useSaving({ first, address, draft, enabled, onSaved }: Given) {
         tell({
           state: settled ? 'saved' : 'unsaved',
           savedAt: saved.savedAt,
-          faults: [],
+          faults: NO_FAULTS,
           message: null,
           origin: values,
           originVersion: saved.lockVersion,
@@ -117,12 +119,12 @@ export function useSaving({ first, address, draft, enabled, onSaved }: Given) {
     if (key === savedKey.current && Object.keys(values.unread).length === 0) {
       if (running.current || inConflict) return;
       forget(id);
-      tell({ state: 'saved', faults: [], message: null });
+      tell({ state: 'saved', faults: NO_FAULTS, message: null });
       return;
     }
     const draftOfNow: KeptDraft = { lockVersion: originVersion, values, origin, keptAt: new Date().toISOString() };
     const kept = keep(id, draftOfNow);
-    tell(running.current || inConflict ? { kept } : { kept, state: 'unsaved', faults: [] });
+    tell(running.current || inConflict ? { kept } : { kept, state: 'unsaved', faults: NO_FAULTS });
     if (readable && !inConflict) timer.current = setTimeout(() => void save(true), PAUSE_MS);
   }, [key, values, readable, enabled, id, save, inConflict, origin, originVersion]);
 

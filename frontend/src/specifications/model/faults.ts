@@ -3,11 +3,13 @@ import type { FieldError } from '@bellgap/common/api';
 import { ValidationError } from 'yup';
 import type { FormValues, SaveBody } from './form';
 
+const NONE: FieldError[] = [];
+
 /** Faults of the form by the schema that the server uses too. */
 export function faultsOf(body: SaveBody): FieldError[] {
   try {
     saveRevisionSchema.validateSync(body, { strict: true, abortEarly: false });
-    return [];
+    return NONE;
   } catch (failure) {
     if (!(failure instanceof ValidationError)) throw failure;
     const inner = failure.inner.length > 0 ? failure.inner : [failure];

@@ -103,6 +103,30 @@ export function governingWords({
   return `${[first, ...low.slice(0, -1)].join(', ')} and ${low.at(-1)} govern alike`;
 }
 
+/** Inputs that a count rests on and that are not known yet, by their labels. */
+export function missingWords({ basis, system, site, string }: SpecificationInput): string | null {
+  const pollution = site?.pollution;
+  const severity = pollution && ('contamination' in pollution ? pollution.contamination : pollution.class);
+  const needed: [path: string, value: unknown][] = [
+    ['basis', basis],
+    ['system.highestVoltageKv', system?.highestVoltageKv],
+    ['system.neutralEarthing', system?.neutralEarthing],
+    ['system.earthFault', system?.neutralEarthing === 'effective' ? true : system?.earthFault],
+    ['system.insulationLevel', system?.insulationLevel],
+    ['site.altitudeM', site?.altitudeM],
+    [basis === 'north-american' ? 'site.pollution.contamination' : 'site.pollution.class', severity],
+    ['string.insulatorCode', string?.insulatorCode],
+    ['string.arrangement', string?.arrangement],
+    ['string.surroundings', string?.surroundings],
+    ['string.arcingDevices', string?.arcingDevices],
+  ];
+  const open = needed
+    .filter(([, value]) => value === null || value === undefined)
+    .map(([path]) => fieldOf(path)?.label.toLowerCase());
+  if (open.length === 0) return null;
+  return `Still to fill in: ${open.join(', ')}`;
+}
+
 /** Why a part of the answer has no figure. */
 export function whyNot({ notAssessed }: Evaluation, ...parts: string[]): string | undefined {
   return notAssessed.find(({ part }) => parts.some((name) => part === name || part.startsWith(`${name}.`)))?.why;

@@ -152,7 +152,7 @@ describe('fields that apply', () => {
     const field = voltage.closest('[data-field]') as HTMLElement;
     expect(field).toHaveClass('is-overridden');
     expect(field).toHaveTextContent('differs from the basis (220 kV rms)');
-    await type(within(field).getByPlaceholderText('reason'), 'as built');
+    await type(within(field).getByPlaceholderText(/^reason/), 'as built');
     await waitFor(() =>
       expect(server.saves().at(-1)?.body).toMatchObject({
         overrides: [{ path: 'system.nominalVoltageKv', reason: 'as built' }],

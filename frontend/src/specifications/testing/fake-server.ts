@@ -43,7 +43,12 @@ export const aRevision = (given: Partial<Revision> = {}): Revision => ({
 /** An answer with another count, so that a test can tell answers apart. */
 export function anEvaluation(units: number, given: Partial<Evaluation> = {}): Evaluation {
   const { string } = suspensionCase.evaluation;
-  return { ...suspensionCase.evaluation, trace: [], string: string && { ...string, units, unitsBeforeExtra: units }, ...given };
+  return {
+    ...suspensionCase.evaluation,
+    trace: [],
+    string: string && { ...string, units, unitsBeforeExtra: units },
+    ...given,
+  };
 }
 
 export const problem = (status: number, code: string, more: Record<string, unknown> = {}): Answered => ({

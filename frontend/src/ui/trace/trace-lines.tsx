@@ -6,7 +6,12 @@ import './trace.css';
 
 /** A citation in words, with how well the figure is known. */
 export function SourceWords({ source }: { source: SourceReference }) {
-  const where = [[source.document, source.edition].filter(Boolean).join(':'), source.clause].filter(Boolean).join(', ');
+  const where = [
+    [source.document, source.edition].filter((part) => part !== '' && part !== 'none').join(':'),
+    source.clause,
+  ]
+    .filter(Boolean)
+    .join(', ');
   const status = CHOICE_LABELS.status[source.status];
   // "Common practice, no published source" is both the citation and its status.
   const words = where.toLowerCase().includes(status.toLowerCase()) ? where : `${where} · ${status}`;
