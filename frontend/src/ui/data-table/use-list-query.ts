@@ -20,14 +20,14 @@ export function useListQuery<Row>(
   params: Record<string, string> = {},
 ) {
   const asked = listQuery(list);
+  const place = JSON.stringify(params);
   const ask = useCallback(
     (query: Record<string, string | undefined>, signal?: AbortSignal) =>
-      call(endpoint as EndpointDefinition, { params, query, signal } as never) as Promise<unknown> as Promise<
-        Page<Row>
-      >,
-    // Parameters are compared by what they hold.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
-    [endpoint, JSON.stringify(params)],
+      call(
+        endpoint as EndpointDefinition,
+        { params: JSON.parse(place) as Record<string, string>, query, signal } as never,
+      ) as Promise<unknown> as Promise<Page<Row>>,
+    [endpoint, place],
   );
   const query = useQuery<Page<Row>, ApiError>({
     queryKey: [endpoint.path, params, asked],

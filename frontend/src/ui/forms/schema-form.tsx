@@ -18,10 +18,10 @@ interface SchemaFormViewProps<Values extends FormikValues> {
 /** The frame of a form: fields, what went wrong as a whole, and the acts at its foot. */
 export function SchemaFormView<Values extends FormikValues>(props: SchemaFormViewProps<Values>) {
   const { form, submitLabel, acts, label, submitDisabled, children } = props;
-  const { formik } = form;
+  const { formik, attach, failure } = form;
   return (
     <form
-      ref={form.element}
+      ref={attach}
       noValidate
       aria-label={label}
       className="schema-form"
@@ -34,9 +34,7 @@ export function SchemaFormView<Values extends FormikValues>(props: SchemaFormVie
       <Form layout="vertical" component={false} requiredMark={false}>
         {children}
       </Form>
-      {form.failure && (
-        <Alert type="error" showIcon title={form.failure} role="alert" className="schema-form-failure" />
-      )}
+      {failure && <Alert type="error" showIcon title={failure} role="alert" className="schema-form-failure" />}
       <div className="schema-form-acts">
         <Button type="primary" htmlType="submit" loading={formik.isSubmitting} disabled={submitDisabled ?? false}>
           {submitLabel}

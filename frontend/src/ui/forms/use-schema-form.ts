@@ -1,5 +1,5 @@
 import { useFormik, type FormikValues, getIn, setIn, type FormikErrors } from 'formik';
-import { useEffect, useMemo, useRef, useState } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { ValidationError, type AnySchema } from 'yup';
 import { ApiError, failureText } from '../../api/api-error';
 
@@ -27,7 +27,7 @@ export function useSchemaForm<Values extends FormikValues>(options: SchemaFormOp
   const { schema, initialValues, toBody = (values: Values) => values, submit, newerVersion } = options;
   const [serverFaults, setServerFaults] = useState<Record<string, ServerFault>>({});
   const [failure, setFailure] = useState<string | null>(null);
-  const element = useRef<HTMLFormElement>(null);
+  const [element, attach] = useState<HTMLFormElement | null>(null);
   const [attempt, setAttempt] = useState(0);
 
   const readBody = (values: Values): unknown => schema.cast(toBody(values), { assert: false });
@@ -55,7 +55,7 @@ export function useSchemaForm<Values extends FormikValues>(options: SchemaFormOp
             { message, value: getIn(values, path) as unknown },
           ]);
           setServerFaults(Object.fromEntries(faults) as Record<string, ServerFault>);
-          const known = error.fields.filter(({ path }) => element.current?.querySelector(selectorOf(path)));
+          const known = error.fields.filter(({ path }) => element?.querySelector(selectorOf(path)));
           if (known.length < error.fields.length)
             setFailure(
               failureWithFields(
@@ -79,9 +79,9 @@ export function useSchemaForm<Values extends FormikValues>(options: SchemaFormOp
   const { isSubmitting } = formik;
   useEffect(() => {
     if (attempts > 0 && !isSubmitting) {
-      element.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus();
+      element?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus();
     }
-  }, [attempts, isSubmitting]);
+  }, [attempts, isSubmitting, element]);
 
   const faultOf = (path: string): string | undefined => {
     const fault = serverFaults[path];
@@ -100,7 +100,7 @@ export function useSchemaForm<Values extends FormikValues>(options: SchemaFormOp
     [formik],
   );
 
-  return { formik, element, failure, setFailure, faultOf, reset };
+  return { formik, attach, failure, setFailure, faultOf, reset };
 }
 
 function faultsByPath<Values extends FormikValues>(error: ValidationError): FormikErrors<Values> {
