@@ -148,10 +148,15 @@ export default typescript.config(
   // frontend
   {
     files: ['frontend/src/**/*.{ts,tsx}'],
-    extends: [reactHooks.configs.flat.recommended],
+    plugins: { 'react-hooks': reactHooks },
     languageOptions: { globals: globals.browser },
     // antd hands out its message and modal functions by destructuring.
-    rules: { ...noImports(...frontendImports()), '@typescript-eslint/unbound-method': 'off' },
+    rules: {
+      ...noImports(...frontendImports()),
+      'react-hooks/rules-of-hooks': 'error',
+      'react-hooks/exhaustive-deps': 'error',
+      '@typescript-eslint/unbound-method': 'off',
+    },
   },
   ...[1, 2, 3].map((depth) => ({
     files: [`frontend/src/${'*/'.repeat(depth)}*.{ts,tsx}`],

@@ -29,6 +29,8 @@ const withDatabase = {
   globalTeardown: `${__dirname}/database/src/testing/global-teardown.ts`,
 };
 module.exports = {
+  // Enough for a busy machine; what is slow on a quiet one shows in the times.
+  testTimeout: 30_000,
   projects: [
     { ...base, displayName: 'common', rootDir: 'common' },
     { ...base, ...withDatabase, displayName: 'database', rootDir: 'database' },

@@ -16,7 +16,6 @@ import { REVISION_STATES } from './states';
 /** Schemas of answers. Instants are RFC 3339 in UTC, dates YYYY-MM-DD. */
 
 const instant = () => yup.string().required();
-const nullableInstant = () => yup.string().nullable().defined();
 const day = () => yup.string().required();
 const nullableText = () => yup.string().nullable().defined();
 const nullableNumber = () => yup.number().nullable().defined();
