@@ -1,10 +1,10 @@
-import type { Caution, Criterion, Evaluation, InsulatorUnit, SpecificationInput } from '@bellgap/common/api';
-import { memo, useEffect, useState } from 'react';
+import type { Criterion, Evaluation, InsulatorUnit, SpecificationInput } from '@bellgap/common/api';
+import { memo } from 'react';
 import { Figure, formatNumber } from '../../ui/figure';
 import { TraceArea } from '../../ui/trace';
 import type { Answer, AnswerState } from '../hooks/use-live-evaluation';
 import { criterionWords, governingWords, missingWords, stringWords, whyNot } from '../model/words';
-import { SeverityShape } from './caution-mark';
+import { Gravest, Spoken } from './answer-parts';
 
 interface Properties {
   answer: Answer;
@@ -194,26 +194,6 @@ function Governing({ evaluation, unit }: { evaluation: Evaluation; unit: Insulat
   );
 }
 
-function Gravest({ cautions }: { cautions: readonly Caution[] }) {
-  const stops = cautions.filter(({ severity }) => severity === 'stop').length;
-  const fails = cautions.filter(({ severity }) => severity === 'fail').length;
-  if (stops + fails === 0) return null;
-  return (
-    <span className="answer-gravest">
-      {stops > 0 && (
-        <b className="is-stop">
-          <SeverityShape severity="stop" /> {stops} stop
-        </b>
-      )}
-      {fails > 0 && (
-        <b className="is-fail">
-          <SeverityShape severity="fail" /> {fails} fail
-        </b>
-      )}
-    </span>
-  );
-}
-
 function shortCount({ string, clearances }: Evaluation, unit: InsulatorUnit | null): string {
   if (string?.units !== null && string?.units !== undefined)
     return `${string.units} ${unitsWord(string.units, isRod(unit))}${unit ? ` ${unit.code}` : ''}`;
@@ -233,21 +213,4 @@ function sentenceOf({ evaluation, input }: Answer, unit: InsulatorUnit | null): 
   if (string?.units === null || string?.units === undefined) return `No count: ${noCountWhy(evaluation, input)}`;
   const governing = governingWords(string);
   return `${shortCount(evaluation, unit)}.${governing ? ` ${governing}.` : ''}`;
-}
-
-/** Long enough that a screen reader hears the answer, not each key. */
-const QUIET_MS = 1200;
-
-function Spoken({ sentence, isCurrent }: { sentence: string; isCurrent: boolean }) {
-  const [spoken, setSpoken] = useState('');
-  useEffect(() => {
-    if (!isCurrent) return undefined;
-    const timer = setTimeout(() => setSpoken(sentence), QUIET_MS);
-    return () => clearTimeout(timer);
-  }, [sentence, isCurrent]);
-  return (
-    <p className="visually-hidden" role="status" aria-live="polite">
-      {spoken}
-    </p>
-  );
 }

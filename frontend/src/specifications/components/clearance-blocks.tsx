@@ -104,7 +104,7 @@ function shapeWords(shape: string | null): string | null {
 }
 
 function Row({ row }: { row: ClearanceRow }) {
-  const lit = useLit(row.distance === 'phase-to-earth' ? 'clearances.phaseToEarthMm' : undefined);
+  const lit = useLit(row.distance === 'phase-to-earth' && row.governs ? 'clearances.phaseToEarthMm' : undefined);
   const shape = shapeWords(row.shape);
   const stress = STRESSES[row.stress] ?? row.stress.replaceAll('-', ' ');
   const remarks = [

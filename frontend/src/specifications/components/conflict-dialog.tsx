@@ -1,5 +1,5 @@
 import { Modal, Radio } from 'antd';
-import { useMemo, useState } from 'react';
+import { useState } from 'react';
 import { momentText } from '../../ui/moment';
 import { differences, merged, type Difference } from '../model/compare';
 import type { FormValues } from '../model/form';
@@ -29,7 +29,8 @@ function pathOf(key: string): string {
 
 /** Both versions of a draft, field by field. Nothing of either is lost: what only one changed is taken, the rest is chosen. */
 export function ConflictDialog({ mine, theirs, origin, changedBy, changedAt, onResolve }: Properties) {
-  const differing = useMemo(() => differences(mine, theirs, origin), [mine, theirs, origin]);
+  // The versions stay as they were when the dialog opened; the page below cannot be typed in meanwhile.
+  const [differing] = useState(() => differences(mine, theirs, origin));
   const [chosen, setChosen] = useState<Record<string, Side>>({});
   const sideOf = ({ key, changedBy: by }: Difference): Side | undefined =>
     chosen[key] ?? (by === 'me' ? 'mine' : by === 'them' ? 'theirs' : undefined);

@@ -12,7 +12,7 @@ import { useLiveEvaluation, type Answer } from '../hooks/use-live-evaluation';
 import { useSaving } from '../hooks/use-saving';
 import { useSpecificationForm } from '../hooks/use-specification-form';
 import { useTraceSource } from '../hooks/use-trace-source';
-import { bodyOf, formOf, type FormValues } from '../model/form';
+import { asStored, bodyOf, formOf, type FormValues } from '../model/form';
 import { faultsOf, isReadable } from '../model/faults';
 import { setOffers, takeOffers } from '../model/kept-draft';
 import { useUnit } from '../hooks/use-unit';
@@ -193,9 +193,9 @@ export function SpecificationEditor({ first }: Properties) {
           </div>
           {conflict && (
             <ConflictDialog
-              mine={values}
-              theirs={formOf(conflict.current)}
-              origin={saving.origin}
+              mine={asStored(values, unit)}
+              theirs={asStored(formOf(conflict.current), conflict.current.context.insulator)}
+              origin={asStored(saving.origin, revision.context.insulator)}
               changedBy={conflict.changedBy}
               changedAt={conflict.changedAt}
               onResolve={(resolved) => beginFrom(conflict.current, resolved)}

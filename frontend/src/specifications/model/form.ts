@@ -125,6 +125,11 @@ export function inputOf(values: FormValues, unit: InsulatorUnit | null): Specifi
   return next as unknown as SpecificationInput;
 }
 
+/** The form as the server would have it: what does not apply is unknown. For setting two versions side by side. */
+export function asStored(values: FormValues, unit: InsulatorUnit | null): FormValues {
+  return { ...values, input: fill(BLANK, inputOf(values, unit)) };
+}
+
 export function bodyOf(values: FormValues, unit: InsulatorUnit | null, basis: PinnedBasis | null): SaveBody {
   const input = inputOf(values, unit);
   return {
