@@ -7,5 +7,5 @@ app.use(express.json({ limit: '1mb' }));
 app.post('/api/v1/evaluations', (request, response) => {
   response.json(request.body.input ? answer : null);
 });
-const server = app.listen(Number(process.env.PORT), '127.0.0.1', () => process.send?.('ready'));
-process.on('SIGTERM', () => server.close(() => process.exit(0)));
+app.listen(Number(process.env.PORT), '127.0.0.1', () => process.send?.('ready'));
+process.once('disconnect', () => process.exit(0));

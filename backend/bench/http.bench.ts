@@ -1,73 +1,63 @@
 import { fork } from 'node:child_process';
 import path from 'node:path';
-import autocannon from 'autocannon';
+import { API_PREFIX, PASSIVE_HEADER } from '@bellgap/common/api';
 import { DEMO_PASSWORD } from '@bellgap/database';
-import { freePort, startProduct } from '../test/support/product-process';
+import { PERSON_OF } from '../../frontend/e2e/support/routes';
+import { freePort } from '../test/support/product-process';
 import type { Figure } from './harness';
+import { overHttp, requestBytes } from './load';
+import { product } from './product';
+import { sideBySide } from './rates';
 import { sampleInput } from './sample';
 
-const SECONDS = 6;
 const CONNECTIONS = 10;
-const ENGINEER = 't.orvelle@kigc.example';
+const ROUTE = `${API_PREFIX}/evaluations`;
 
-async function cookieOf(url: string): Promise<string> {
-  const answer = await fetch(`${url}/api/v1/sessions`, {
+async function signIn(url: string): Promise<string> {
+  const answer = await fetch(`${url}${API_PREFIX}/sessions`, {
     method: 'POST',
     headers: { 'content-type': 'application/json' },
-    body: JSON.stringify({ email: ENGINEER, password: DEMO_PASSWORD }),
+    body: JSON.stringify({ email: PERSON_OF.engineer, password: DEMO_PASSWORD }),
   });
-  return (answer.headers.getSetCookie()[0] ?? '').split(';')[0] ?? '';
+  const cookie = answer.headers.getSetCookie()[0]?.split(';')[0];
+  if (!answer.ok || !cookie) throw new Error(`Nobody could be signed in: ${answer.status}`);
+  return cookie;
 }
 
-/** Answers per second of the evaluation route; every request differs from the one before. */
-async function requestsPerSecond(url: string, cookie: string): Promise<number> {
-  const requests = Array.from({ length: 400 }, (_, step) => ({
-    method: 'POST' as const,
-    path: '/api/v1/evaluations',
-    headers: { 'content-type': 'application/json', 'x-bellgap-passive': '1', cookie },
-    body: JSON.stringify({ input: sampleInput(step * 7), trace: false }),
-  }));
-  const cannon = (duration: number) => autocannon({ url, connections: CONNECTIONS, duration, requests });
-  await cannon(2);
-  const result = await cannon(SECONDS);
-  if (result.non2xx > 0 || result.errors > 0) throw new Error(`${result.non2xx} answers were no success`);
-  return result.requests.average;
-}
-
-async function besideExpress(answer: string): Promise<number> {
+async function startBareExpress(answer: string): Promise<{ port: number; stop: () => void }> {
   const port = await freePort();
   const child = fork(path.join(__dirname, 'bare-express.cjs'), {
     env: { ...process.env, NODE_ENV: 'production', PORT: String(port), ANSWER: answer },
     execArgv: [],
   });
-  await new Promise((resolve) => child.once('message', resolve));
-  try {
-    return await requestsPerSecond(`http://127.0.0.1:${port}`, '');
-  } finally {
-    child.kill('SIGTERM');
-  }
+  await new Promise((resolve, reject) => {
+    child.once('message', resolve);
+    child.once('exit', (code) => reject(new Error(`bare-express.cjs ended with ${code}`)));
+  });
+  return { port, stop: () => child.kill('SIGKILL') };
 }
 
-/** Evaluations through HTTP, session read and validation included. */
-export const httpFigures: Figure[] = [
+/** Evaluations through HTTP, session read and validation included; every request differs from the one before. */
+export const httpFigures: readonly Figure[] = [
   {
     name: 'evaluations-over-http',
     unit: '/s',
     aim: { ratioAtLeast: 1 / 3 },
     measure: async () => {
-      const product = await startProduct();
+      const { url } = await product();
+      const headers = { 'content-type': 'application/json', [PASSIVE_HEADER]: '1', cookie: await signIn(url) };
+      const bodies = Array.from({ length: 400 }, (_, i) => JSON.stringify({ input: sampleInput(7 * i), trace: false }));
+      const requests = bodies.map((body) => requestBytes('POST', ROUTE, headers, body));
+      const sample = await fetch(url + ROUTE, { method: 'POST', headers, body: bodies[0] ?? '' });
+      if (!sample.ok) throw new Error(`The evaluation was refused: ${await sample.text()}`);
+      const bare = await startBareExpress(await sample.text());
       try {
-        const cookie = await cookieOf(product.url);
-        const sample = await fetch(`${product.url}/api/v1/evaluations`, {
-          method: 'POST',
-          headers: { 'content-type': 'application/json', cookie },
-          body: JSON.stringify({ input: sampleInput(), trace: false }),
-        });
-        const answer = await sample.text();
-        const value = await requestsPerSecond(product.url, cookie);
-        return { value, beside: await besideExpress(answer) };
+        return await sideBySide(
+          overHttp(Number(new URL(url).port), requests, CONNECTIONS),
+          overHttp(bare.port, requests, CONNECTIONS),
+        );
       } finally {
-        await product.stop();
+        bare.stop();
       }
     },
   },

@@ -1,22 +1,39 @@
-import startTestCluster from '../../database/src/testing/global-setup';
-import stopTestCluster from '../../database/src/testing/global-teardown';
-import { browserFigures } from './browser.bench';
+import { availableParallelism, loadavg } from 'node:os';
 import { engineFigures } from './engine.bench';
 import { report } from './harness';
 import { httpFigures } from './http.bench';
+import { pageFigures } from './page.bench';
+import { stopProduct } from './product';
 import { sheetFigures } from './sheet.bench';
 import { startFigures } from './start.bench';
+import { typingFigures } from './typing.bench';
+
+const FIGURES = [
+  ...engineFigures,
+  ...httpFigures,
+  ...typingFigures,
+  ...sheetFigures,
+  ...pageFigures,
+  ...startFigures,
+] as const;
+
+function sayWhatElseRuns(): void {
+  const [load = 0] = loadavg();
+  const cores = availableParallelism();
+  if (load > cores / 2)
+    console.error(`The machine is at work already: load ${load.toFixed(1)} on ${cores} cores. Times will be long.`);
+}
 
 async function main(): Promise<void> {
-  startTestCluster();
+  sayWhatElseRuns();
   try {
-    await report([...engineFigures, ...httpFigures, ...sheetFigures, ...browserFigures, ...startFigures]);
+    await report(FIGURES, process.env.ONLY || undefined);
   } finally {
-    stopTestCluster();
+    await stopProduct();
   }
 }
 
 main().catch((error: unknown) => {
-  console.error(error);
+  console.error(error instanceof Error ? error.message : error);
   process.exitCode = 1;
 });

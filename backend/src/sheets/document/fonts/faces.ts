@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { create, type Font } from 'fontkit';
+import { withLayoutMemory } from './layout-memory';
 import { unpackWoff } from './woff';
 
 export const FACES = ['sans', 'semibold', 'mono'] as const;
@@ -33,11 +34,13 @@ interface LoadedFace {
 
 const loaded = new Map<Face, LoadedFace>();
 
+export const openFont = (face: Face): Font => create(unpackWoff(readFileSync(join(FOLDER, FILES[face])))) as Font;
+
 /** Each face is read and unpacked once in a process. */
 function load(face: Face): LoadedFace {
   const known = loaded.get(face);
   if (known) return known;
-  const font = create(unpackWoff(readFileSync(join(FOLDER, FILES[face])))) as Font;
+  const font = withLayoutMemory(openFont(face));
   const advances = new Map<number, number | null>();
   const advanceOf = (codePoint: number): number | null => {
     const seen = advances.get(codePoint);
