@@ -33,7 +33,8 @@ function wordsAt(form: SpecificationForm, path: string, note?: ReactNode): Field
     unit: field?.unit,
     error: faultAt(form.faults, path),
     mark: marksAt(form, path),
-    inherited: inheritedPath !== null && !overridden,
+    // What cannot be written here is part of the sheet too.
+    inherited: !overridden && (inheritedPath !== null || form.readOnly),
     overridden,
     readOnly: form.readOnly,
     note: carriesNote ? (
