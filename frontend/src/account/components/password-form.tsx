@@ -4,7 +4,7 @@ import { useQueryClient } from '@tanstack/react-query';
 import { App } from 'antd';
 import { call } from '../../api/client';
 import { keyOf } from '../../api/queries';
-import { PasswordField } from '../../ui/forms/fields';
+import { PasswordField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 import { PASSWORD_HINT } from '../model/password-hint';

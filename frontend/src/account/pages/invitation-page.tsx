@@ -4,7 +4,7 @@ import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { call } from '../../api/client';
 import { paths } from '../../app/paths';
-import { PasswordField } from '../../ui/forms/fields';
+import { PasswordField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 import { FrontPage } from '../../ui/page/front-page';

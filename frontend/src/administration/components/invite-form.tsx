@@ -4,7 +4,7 @@ import { useQueryClient } from '@tanstack/react-query';
 import { Button } from 'antd';
 import { call } from '../../api/client';
 import { keyOf } from '../../api/queries';
-import { TextField } from '../../ui/forms/fields';
+import { TextField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 

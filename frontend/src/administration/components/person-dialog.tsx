@@ -7,7 +7,7 @@ import { failureText } from '../../api/api-error';
 import { call } from '../../api/client';
 import { keyOf } from '../../api/queries';
 import { usePerson } from '../../api/session';
-import { TextField } from '../../ui/forms/fields';
+import { TextField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 import { standingOf } from '../model/people';

@@ -6,7 +6,7 @@ import type { Column } from '../../ui/data-table/columns';
 import { DataTable } from '../../ui/data-table/data-table';
 import { useListQuery } from '../../ui/data-table/use-list-query';
 import { useListState } from '../../ui/data-table/use-list-state';
-import { choicesOf } from '../../ui/forms/fields';
+import { choicesOf } from '../../ui/forms/choices';
 import { Page } from '../../ui/page/page';
 import { Sheet } from '../../ui/page/sheet';
 import { EmptyState } from '../../ui/states/empty-state';
@@ -42,9 +42,17 @@ const COLUMNS: Column<CatalogueUnit>[] = [
     key: 'source',
     title: 'Source',
     value: (row) => sourceText(row.source),
-    render: (row) => <span title={sourceText(row.source)}>{row.source.document}</span>,
+    render: (row) => <span title={sourceText(row.source)}>{familyText(row)}</span>,
   },
-  { key: 'status', title: 'Status', value: (row) => CHOICE_LABELS.status[row.source.status] },
+  {
+    key: 'status',
+    title: 'Status',
+    value: (row) => CHOICE_LABELS.status[row.source.status],
+    render: (row) => {
+      const words = CHOICE_LABELS.status[row.source.status];
+      return <span title={words}>{words.split(',')[0]}</span>;
+    },
+  },
 ];
 
 const FILTERS = [

@@ -4,7 +4,9 @@ import { useQueryClient } from '@tanstack/react-query';
 import { Button } from 'antd';
 import { call } from '../../api/client';
 import { keyOf } from '../../api/queries';
-import { ChoiceField, TextField, choicesOf } from '../../ui/forms/fields';
+import { ChoiceField } from '../../ui/forms/choice-field';
+import { choicesOf } from '../../ui/forms/choices';
+import { TextField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 

@@ -1,7 +1,7 @@
 import { contract, type BodyOf, type Person } from '@bellgap/common/api';
 import { signInSchema } from '@bellgap/common/schemas';
 import { call } from '../../api/client';
-import { PasswordField, TextField } from '../../ui/forms/fields';
+import { PasswordField, TextField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 

@@ -58,3 +58,10 @@ export function searchRows<Row>(rows: readonly Row[], columns: readonly Column<R
     return words.every((word) => text.includes(word));
   });
 }
+
+/** A figure as it is read: thousands apart, a true minus, and the same decimals down a column where they are given. */
+export function figureText(value: number, decimals?: number): string {
+  return value
+    .toLocaleString('en-GB', { minimumFractionDigits: decimals ?? 0, maximumFractionDigits: decimals ?? 3 })
+    .replace('-', '−');
+}

@@ -1,8 +1,9 @@
-import { Button, Table, type TableColumnType } from 'antd';
+import { Button } from 'antd';
 import { useMemo, type ReactNode } from 'react';
 import { searchRows, sortRows, type Column } from './columns';
 import './data-table.css';
 import { TableActs } from './table-acts';
+import { TableBody } from './table-body';
 import { TableFilters, type TableFilter } from './table-filters';
 import type { ListState } from './use-list-state';
 
@@ -24,32 +25,6 @@ interface DataTableProps<Row> {
   empty?: ReactNode;
 }
 
-function tableColumns<Row>(columns: Column<Row>[], list: ListState): TableColumnType<Row>[] {
-  const shown = columns.filter(({ fileOnly }) => !fileOnly);
-  return shown.map(({ key, title, value, render, figure, decimals, sortable, wraps }) => ({
-    key,
-    dataIndex: key,
-    title,
-    align: figure ? 'right' : 'left',
-    className: [figure ? 'num' : '', wraps ? 'cell-wraps' : ''].join(' ').trim(),
-    sorter: sortable ?? false,
-    sortOrder: list.sort === key ? 'ascend' : list.sort === `-${key}` ? 'descend' : null,
-    render: (_: unknown, row: Row) => {
-      if (render) return render(row);
-      const cell = value(row);
-      if (cell === null || cell === undefined || cell === '') return <span className="soft">—</span>;
-      return typeof cell === 'number' ? figureText(cell, decimals) : String(cell);
-    },
-  }));
-}
-
-/** A figure as it is read: thousands apart, a true minus, and the same decimals down a column where they are given. */
-export function figureText(value: number, decimals?: number): string {
-  return value
-    .toLocaleString('en-GB', { minimumFractionDigits: decimals ?? 0, maximumFractionDigits: decimals ?? 3 })
-    .replace('-', '−');
-}
-
 /** The one table: sorts, filters, pages by cursor, copies and exports; wide ones scroll inside themselves. */
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   const { label, name, columns, rows, rowKey, list, pages, searchLabel, filters = [], loading, empty } = props;
@@ -57,7 +32,6 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     () => (pages ? rows : sortRows(searchRows(rows, columns, list.search), columns, list.sort)),
     [pages, rows, columns, list.search, list.sort],
   );
-  const shownColumns = useMemo(() => tableColumns(columns, list), [columns, list]);
 
   if (shown.length === 0 && !list.narrowed && !list.cursor && !loading && empty) return <>{empty}</>;
   return (
@@ -70,21 +44,12 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
         tabIndex={0}
         aria-busy={loading ?? false}
       >
-        <Table<Row>
-          size="small"
-          columns={shownColumns}
-          dataSource={shown as Row[]}
+        <TableBody
+          columns={columns}
+          rows={shown}
           rowKey={rowKey}
-          pagination={false}
-          showSorterTooltip={false}
-          locale={{
-            emptyText: list.narrowed ? 'Nothing matches; show all, or look for something else.' : 'Nothing here yet.',
-          }}
-          onChange={(_pagination, _filters, sorter) => {
-            if (Array.isArray(sorter)) return;
-            const key = String(sorter.columnKey ?? '');
-            list.change({ sort: sorter.order ? (sorter.order === 'descend' ? `-${key}` : key) : undefined });
-          }}
+          list={list}
+          nothing={list.narrowed ? 'Nothing matches; show all, or look for something else.' : 'Nothing here yet.'}
         />
       </div>
       <div className="table-foot">

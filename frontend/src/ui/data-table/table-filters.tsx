@@ -1,4 +1,4 @@
-import { Button, Input, Select } from 'antd';
+import { Button } from 'antd';
 import { useEffect, useRef, useState } from 'react';
 import type { ListState } from './use-list-state';
 
@@ -21,9 +21,9 @@ function SearchBox({ list, label }: { list: ListState; label: string }) {
   useEffect(() => () => clearTimeout(timer.current), []);
 
   return (
-    <Input
+    <input
       type="search"
-      className="table-search"
+      className="plain-input table-search"
       aria-label={label}
       placeholder={label}
       value={typed}
@@ -47,19 +47,20 @@ export function TableFilters({ list, searchLabel, filters }: TableFiltersProps) 
     <div className="table-filters">
       {searchLabel && <SearchBox list={list} label={searchLabel} />}
       {filters.map(({ name, label, choices }) => (
-        <Select<string>
+        <select
           key={name}
           aria-label={label}
-          placeholder={label}
-          options={choices}
-          value={list.filters[name] ?? null}
-          allowClear
-          virtual={false}
-          showSearch={false}
-          popupMatchSelectWidth={false}
-          className="table-filter"
-          onChange={(value?: string) => list.change({ [name]: value })}
-        />
+          className="plain-input table-filter"
+          value={list.filters[name] ?? ''}
+          onChange={({ target }) => list.change({ [name]: target.value || undefined })}
+        >
+          <option value="">{label}: all</option>
+          {choices.map(({ value, label: words }) => (
+            <option key={value} value={value}>
+              {words}
+            </option>
+          ))}
+        </select>
       ))}
       {list.narrowed && (
         <Button type="link" onClick={list.clear}>

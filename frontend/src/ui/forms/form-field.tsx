@@ -1,4 +1,3 @@
-import { Form } from 'antd';
 import { getIn, type FormikValues } from 'formik';
 import type { ReactNode } from 'react';
 import { idOf, type SchemaForm } from './use-schema-form';
@@ -6,6 +5,7 @@ import { idOf, type SchemaForm } from './use-schema-form';
 export interface Control {
   id: string;
   'aria-invalid': boolean;
+  status: '' | 'error';
   'aria-describedby': string | undefined;
   value: unknown;
   set(value: unknown): void;
@@ -36,21 +36,22 @@ export function FormField<Values extends FormikValues>(props: FormFieldProps<Val
   const fault = form.faultOf(path);
   const help = fault ? withoutLabel(fault, labelText ?? (typeof label === 'string' ? label : '')) : hint;
   return (
-    <Form.Item
-      label={label}
-      htmlFor={id}
-      colon={false}
-      validateStatus={fault ? 'error' : ''}
-      help={help ? <span id={`${id}-help`}>{help}</span> : undefined}
-    >
+    <div className={fault ? 'form-field is-faulty' : 'form-field'}>
+      <label htmlFor={id}>{label}</label>
       {children({
         id,
         'aria-invalid': fault !== undefined,
+        status: fault ? 'error' : '',
         'aria-describedby': help ? `${id}-help` : undefined,
         value: getIn(formik.values, path) as unknown,
         set: (value) => void formik.setFieldValue(path, value),
         onBlur: () => void formik.setFieldTouched(path, true),
       })}
-    </Form.Item>
+      {help && (
+        <div className="form-field-help" id={`${id}-help`}>
+          {help}
+        </div>
+      )}
+    </div>
   );
 }

@@ -1,4 +1,4 @@
-import { Alert, Button, Form } from 'antd';
+import { Alert, Button } from 'antd';
 import type { FormikValues } from 'formik';
 import type { ReactNode } from 'react';
 import './forms.css';
@@ -31,9 +31,7 @@ export function SchemaFormView<Values extends FormikValues>(props: SchemaFormVie
         formik.handleSubmit();
       }}
     >
-      <Form layout="vertical" component={false} requiredMark={false}>
-        {children}
-      </Form>
+      {children}
       {failure && <Alert type="error" showIcon title={failure} role="alert" className="schema-form-failure" />}
       <div className="schema-form-acts">
         <Button type="primary" htmlType="submit" loading={formik.isSubmitting} disabled={submitDisabled ?? false}>

@@ -2,8 +2,7 @@ import { REVISION_STATE_LABELS, type SpecificationRow } from '@bellgap/common/ap
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { Link } from 'react-router-dom';
 import { paths } from '../../app/paths';
-import type { Column } from '../data-table/columns';
-import { figureText } from '../data-table/data-table';
+import { figureText, type Column } from '../data-table/columns';
 import { Moment } from '../moment';
 import './specification-rows.css';
 

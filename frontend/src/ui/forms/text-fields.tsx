@@ -1,10 +1,10 @@
-import { Input, Select } from 'antd';
+import { Input } from 'antd';
 import type { FormikValues } from 'formik';
 import type { ReactNode } from 'react';
 import { FormField } from './form-field';
 import type { SchemaForm } from './use-schema-form';
 
-interface FieldProps<Values extends FormikValues> {
+export interface FieldProps<Values extends FormikValues> {
   form: SchemaForm<Values>;
   path: string;
   label: string;
@@ -88,45 +88,4 @@ export function PasswordField<Values extends FormikValues>(props: PasswordFieldP
       )}
     </FormField>
   );
-}
-
-interface ChoiceFieldProps<Values extends FormikValues> extends FieldProps<Values> {
-  choices: { value: string | number; label: string }[];
-  placeholder?: string;
-  clearable?: boolean;
-  searchable?: boolean;
-  changed?: (value: unknown) => void;
-}
-
-/** One of a list; nothing is chosen beforehand. */
-export function ChoiceField<Values extends FormikValues>(props: ChoiceFieldProps<Values>) {
-  const { form, path, label, hint, choices, placeholder = 'Choose', clearable, searchable, changed } = props;
-  return (
-    <FormField form={form} path={path} label={label} hint={hint}>
-      {({ value, set, onBlur, ...control }) => (
-        <Select<string | number>
-          {...control}
-          options={choices}
-          value={(value as string | number | null) ?? undefined}
-          placeholder={placeholder}
-          allowClear={clearable ?? false}
-          showSearch={searchable ? { optionFilterProp: 'label' } : false}
-          virtual={false}
-          onChange={(chosen: string | number | undefined) => {
-            set(chosen ?? null);
-            changed?.(chosen ?? null);
-          }}
-          onBlur={onBlur}
-        />
-      )}
-    </FormField>
-  );
-}
-
-/** Choices of a record of labels, in its order. */
-export function choicesOf<T extends string>(
-  labels: Record<T, string>,
-  values?: readonly T[],
-): { value: T; label: string }[] {
-  return (values ?? (Object.keys(labels) as T[])).map((value) => ({ value, label: labels[value] }));
 }
