@@ -54,8 +54,9 @@ export function PeopleSheet() {
   const { query, pages, turning } = useListQuery<User>(contract.users, list);
   const [inviting, setInviting] = useState(false);
   const [invitation, setInvitation] = useState<Invitation | null>(null);
-  const [openId, setOpenId] = useState<string | null>(null);
-  const opened = query.data?.items.find(({ id }) => id === openId) ?? null;
+  const [chosen, setChosen] = useState<User | null>(null);
+  // The person stays open where the list behind is narrowed to others meanwhile.
+  const opened = chosen && (query.data?.items.find(({ id }) => id === chosen.id) ?? chosen);
 
   return (
     <Sheet
@@ -72,7 +73,7 @@ export function PeopleSheet() {
           <DataTable
             label="People"
             name="people"
-            columns={columnsWith((user) => setOpenId(user.id))}
+            columns={columnsWith(setChosen)}
             rows={items}
             rowKey={(row) => row.id}
             list={list}
@@ -101,7 +102,7 @@ export function PeopleSheet() {
       >
         {invitation && <InvitationLink invitation={invitation} />}
       </Modal>
-      <PersonDialog user={opened} close={() => setOpenId(null)} invited={setInvitation} />
+      <PersonDialog user={opened} close={() => setChosen(null)} invited={setInvitation} />
     </Sheet>
   );
 }
