@@ -62,7 +62,7 @@ describe('specifying a string', () => {
         .getByLabel(/^Nominal voltage/)
         .inputValue(),
     ).toBe('220');
-    await answer().getByText('No count yet').first().waitFor();
+    await answer().getByText('No count yet').locator('visible=true').first().waitFor();
   }, 30_000);
 
   it('answers while the site and the string are filled in', async () => {
@@ -87,13 +87,13 @@ describe('specifying a string', () => {
   it('follows a dirtier class and a higher site, and goes back', async () => {
     await choose(page, 'Pollution class', 'e, very heavy');
     // 53.7 x 141.45 = 7595.9 mm; /370 = 20.53.
-    await answer().getByText(/^21$/).first().waitFor();
+    await answer().getByText(/^21$/).locator('visible=true').first().waitFor();
     await fill(page, /^Altitude/, '2310');
     // times exp(0.5 x 1310/8150) = 8231.6 mm; /370 = 22.25.
-    await answer().getByText(/^23$/).first().waitFor();
+    await answer().getByText(/^23$/).locator('visible=true').first().waitFor();
     await fill(page, /^Altitude/, '900');
     await choose(page, 'Pollution class', 'd, heavy');
-    await answer().getByText(/^17$/).first().waitFor();
+    await answer().getByText(/^17$/).locator('visible=true').first().waitFor();
   }, 60_000);
 
   it('opens the working of a figure', async () => {
@@ -112,14 +112,14 @@ describe('specifying a string', () => {
         .getByLabel(/^Altitude/)
         .inputValue(),
     ).toBe('900');
-    await answer().getByText(/^17$/).first().waitFor();
+    await answer().getByText(/^17$/).locator('visible=true').first().waitFor();
     expect(await page.getByRole('img', { name: /17/ }).count()).toBeGreaterThan(0);
   }, 30_000);
 
   it('says beside the field what cannot be, and loses nothing', async () => {
     await fill(page, /^Altitude/, '6000');
     await page.getByText('lies outside the method', { exact: false }).first().waitFor();
-    await answer().getByText('No count yet').first().waitFor();
+    await answer().getByText('No count yet').locator('visible=true').first().waitFor();
     await fill(page, /^Altitude/, '90o');
     await page
       .locator('[data-field]', { has: page.getByLabel(/^Altitude/) })
