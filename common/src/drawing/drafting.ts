@@ -86,9 +86,15 @@ export class DraftingTable {
     for (const point of reach(placed, this.textHeightMm)) widen(this.box, point);
   }
 
-  path(layer: Layer, segments: Segment[], options: { filled?: boolean; about?: string; frame?: Transform } = {}): void {
-    const { filled = false, about, frame } = options;
-    if (segments.length > 0) this.add({ kind: 'path', layer, segments, filled, ...(about ? { about } : {}) }, frame);
+  path(
+    layer: Layer,
+    segments: Segment[],
+    options: { filled?: boolean; solid?: boolean; about?: string; frame?: Transform } = {},
+  ): void {
+    const { filled = false, solid = false, about, frame } = options;
+    if (segments.length === 0) return;
+    const marks = { ...(solid ? { solid } : {}), ...(about ? { about } : {}) };
+    this.add({ kind: 'path', layer, segments, filled, ...marks }, frame);
   }
 
   text(layer: Layer, at: Point, text: string, anchor: TextPrimitive['anchor'] = 'start', about?: string): void {

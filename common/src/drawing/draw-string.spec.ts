@@ -98,6 +98,33 @@ describe('the string to scale', () => {
     expect(discs(drawing)).toHaveLength(34);
   });
 
+  it('draws the share of the voltage as a bar beside each disc, the line end solid', () => {
+    const lineEndFirst = [40, 25, 20, 15];
+    const evaluation = answer(discUnit(), 4, { voltageSharing: lineEndFirst });
+    const drawing = drawn(drawString(suspensionCase.input, suspensionCase.context, evaluation));
+    const bars = drawing.primitives.flatMap((p) => (p.kind === 'path' && p.layer === 'share' ? [p] : []));
+    const widths = bars
+      .flatMap(({ data }) => data.split('Z').filter((one) => one !== ''))
+      .map((one) => {
+        const xs = [...one.matchAll(/(-?[\d.]+) -?[\d.]+/g)].map((m) => Number(m[1]));
+        return Math.max(...xs) - Math.min(...xs);
+      });
+    expect(widths).toHaveLength(4);
+    widths.forEach((width, i) => expect(width / widths[3]!).toBeCloseTo([15, 20, 25, 40][i]! / 40, 2));
+    expect(bars.map(({ solid }) => solid ?? false)).toEqual([false, true]);
+    const words = allWords(drawing).map((w) => w.text);
+    expect(words).toEqual(expect.arrayContaining(['15.0 % voltage share', '40.0 %']));
+    expect(drawing.description).toContain('from 15.0 % at the attachment to 40.0 % at the line end');
+  });
+
+  it.each([
+    ['a count that is not that of the shares', { voltageSharing: [60, 40] }],
+    ['no shares', { voltageSharing: [] }],
+  ])('draws no bars for %s', (_, over) => {
+    const drawing = drawn(drawString(suspensionCase.input, suspensionCase.context, answer(discUnit(), 4, over)));
+    expect(drawing.primitives.some(({ layer }) => layer === 'share')).toBe(false);
+  });
+
   it('draws nothing without a unit or a count', () => {
     expect(drawString(suspensionCase.input, { insulator: null }, suspensionCase.evaluation)).toBeNull();
     expect(

@@ -5,7 +5,8 @@ import type { Drawing, Point, Primitive, TextPrimitive } from './primitives';
 /** What a renderer strokes: SVG path data in millimetres, shared by the screen and the sheet. */
 export interface Outline {
   data: string;
-  fill: 'none' | 'ground' | 'ink';
+  /** The tint is a light shade that carries no meaning of its own. */
+  fill: 'none' | 'ground' | 'tint' | 'ink';
   dashed: boolean;
 }
 
@@ -36,7 +37,11 @@ export function outlineOf(primitive: Primitive, textHeightMm: number): Outline |
         dashed: false,
       };
     case 'path':
-      return { data: primitive.data, fill: primitive.filled ? 'ground' : 'none', dashed: false };
+      return {
+        data: primitive.data,
+        fill: primitive.solid ? 'ink' : primitive.filled ? (primitive.layer === 'share' ? 'tint' : 'ground') : 'none',
+        dashed: false,
+      };
     case 'arc':
       return {
         data: arc(primitive.centre, primitive.radiusMm, primitive.startDeg, primitive.endDeg),

@@ -12,6 +12,7 @@ export const LAYERS = [
   'live', // live parts
   'dimension', // dimension lines and their text
   'clearance', // clearance arcs and circles
+  'share', // shares of a whole as bars
   'governing', // what governs
   'note', // words
 ] as const;
@@ -42,11 +43,15 @@ export interface PolylinePrimitive extends Drawn {
   filled: boolean;
 }
 
-/** A path of lines and cubic curves, closed and filled with the ground where `filled`; `data` is SVG path data in mm. */
+/**
+ * A path of lines and cubic curves; `data` is SVG path data in mm. `filled` takes the fill of the layer, the ground for
+ * all but shares; `solid` the ink of the layer.
+ */
 export interface PathPrimitive extends Drawn {
   kind: 'path';
   data: string;
   filled: boolean;
+  solid?: boolean;
 }
 
 /** Angles in degrees, clockwise from the positive x axis (y points down); `startDeg` is below `endDeg`. */

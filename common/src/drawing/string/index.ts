@@ -6,6 +6,7 @@ import type { Drawing } from '../primitives';
 import { assumptions, drawLegend } from './legend';
 import { contentSizeMm, layOutSuspension, layOutTension, layOutV } from './layouts';
 import { planString, type StringPlan } from './plan';
+import { sharesFromAttachment, shareWords } from './voltage-sharing';
 
 /** Heights of text in the longer side of what is drawn. */
 const TEXTS_IN_CONTENT = 46;
@@ -32,7 +33,7 @@ export function drawString(
   const table = new DraftingTable((contentSizeMm(plan) / TEXTS_IN_CONTENT) * (options.textScale ?? 1));
   LAYOUTS[plan.arrangement](table, plan, evaluation);
   drawLegend(table, plan);
-  return table.finish(titleOf(plan), describe(plan));
+  return table.finish(titleOf(plan), describe(plan, evaluation));
 }
 
 function titleOf(plan: StringPlan): string {
@@ -40,7 +41,7 @@ function titleOf(plan: StringPlan): string {
   return `${CHOICE_LABELS.arrangement[plan.arrangement]} string, ${units}, to scale`;
 }
 
-function describe(plan: StringPlan): string {
+function describe(plan: StringPlan, evaluation: Evaluation): string {
   const { unit } = plan;
   const parts = [
     `${plan.count} ${CHOICE_LABELS.insulatorKind[unit.kind].toLowerCase()} ${plan.count === 1 ? 'unit' : 'units'} ${unit.code}`,
@@ -63,5 +64,10 @@ function describe(plan: StringPlan): string {
     parts.push(`length with fittings ${figure(plan.withFittings.minMm)} to ${figure(plan.withFittings.maxMm)} mm`);
   if (plan.clearanceMm !== null)
     parts.push(`an arc ${figure(plan.clearanceMm)} mm from the live part shows the distance needed to earth`);
+  const shares = sharesFromAttachment(plan, evaluation.string?.voltageSharing ?? []);
+  if (shares)
+    parts.push(
+      `bars show the share of the voltage across each unit, from ${shareWords(shares[0]!)} at the attachment to ${shareWords(shares.at(-1)!)} at the line end`,
+    );
   return [...parts, ...assumptions(plan)].join('; ') + '.';
 }

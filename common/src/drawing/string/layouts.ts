@@ -6,6 +6,7 @@ import { drawSteel } from '../silhouettes/structure';
 import { dimensionReach, dimensionString, drawClearance, drawClearanceLength } from './dimensions';
 import { deviceReach, drawFittings, drawInsulators, drawLivePart } from './insulators';
 import type { StringPlan } from './plan';
+import { drawSharingBeside, drawSharingOfLeg, sharesFromAttachment, sharingReachMm } from './voltage-sharing';
 
 const SUPPORT_WORDS = {
   'cross-arm': 'cross-arm',
@@ -43,19 +44,22 @@ export const layOutSuspension: Layout = (table, plan, evaluation) => {
   const frame = shift(0, 0);
   const reach = dimensionReach(plan, t);
   const outer = plan.clearanceMm === null ? 0 : plan.clearanceMm + plan.liveRadiusMm;
-  const right = Math.max(outer, reach.rightMm + 2 * t);
+  const shares = sharesFromAttachment(plan, evaluation.string?.voltageSharing ?? []);
+  const besideMm = shares ? sharingReachMm(reach.rightMm, t) : reach.rightMm;
+  const right = Math.max(outer, besideMm + 2 * t);
   const steel = 1.7 * t;
-  const hasWindow = plan.surroundings === 'window' && outer > reach.rightMm;
+  const hasWindow = plan.surroundings === 'window' && outer > besideMm;
   drawSteel(table, -reach.leftMm, -steel, reach.leftMm + right + (hasWindow ? steel : 0), steel);
   table.text('note', at(-reach.leftMm, -steel - 0.6 * t), SUPPORT_WORDS[plan.surroundings]);
   drawWholeString(table, plan, frame);
   drawLivePart(table, plan, frame);
   dimensionString(table, plan, frame, evaluation);
+  if (shares) drawSharingBeside(table, plan, frame, shares, reach.rightMm);
 
   const labelMm = plan.liveMm + Math.max(1.6 * t, 0.5 * plan.liveRadiusMm);
   table.text('live', at(plan.liveRadiusMm + 0.5 * t, labelMm), 'live part');
   const below = plan.surroundings === 'lower-structure' && plan.clearanceMm !== null;
-  drawClearance(table, plan, frame, below ? 100 : 8, reach.rightMm);
+  drawClearance(table, plan, frame, below ? 100 : 8, besideMm);
   if (hasWindow) drawSteel(table, outer, 0, steel, plan.liveMm + 3 * t);
   if (below) {
     const ground = plan.liveMm + outer;
@@ -70,6 +74,8 @@ export const layOutTension: Layout = (table, plan, evaluation) => {
   const reach = dimensionReach(plan, t);
   const outer = plan.clearanceMm === null ? 0 : plan.clearanceMm + plan.liveRadiusMm;
   const steel = 1.7 * t;
+  const shares = sharesFromAttachment(plan, evaluation.string?.voltageSharing ?? []);
+  const besideMm = shares ? sharingReachMm(reach.rightMm, t) : reach.rightMm;
   const below = Math.max(reach.rightMm + 2 * t, 0.6 * outer);
   drawSteel(table, -steel, -reach.leftMm, steel, reach.leftMm + below);
   table.text('note', at(-steel, -reach.leftMm - 0.6 * t), SUPPORT_WORDS[plan.surroundings]);
@@ -79,7 +85,8 @@ export const layOutTension: Layout = (table, plan, evaluation) => {
   drawLivePart(table, plan, frame);
   table.text('live', at(plan.liveMm + 1.2 * t, plan.liveRadiusMm + 1.3 * t), 'live part');
   dimensionString(table, plan, frame, evaluation);
-  drawClearance(table, plan, frame, 8, reach.rightMm);
+  if (shares) drawSharingBeside(table, plan, frame, shares, reach.rightMm);
+  drawClearance(table, plan, frame, 8, besideMm);
 };
 
 export const layOutV: Layout = (table, plan, evaluation) => {
@@ -110,6 +117,8 @@ export const layOutV: Layout = (table, plan, evaluation) => {
   drawLivePart(table, plan, home);
   dimensionString(table, plan, frames[0]!.frame, evaluation);
   drawLegAngles(table, plan);
+  const shares = sharesFromAttachment(plan, evaluation.string?.voltageSharing ?? []);
+  if (shares) drawSharingOfLeg(table, plan, frames[1]!.frame, shares);
 
   table.text('live', at(plan.liveRadiusMm + 0.5 * t, Math.max(1.6 * t, plan.liveRadiusMm + t)), 'live part');
   if (plan.clearanceMm === null) return;

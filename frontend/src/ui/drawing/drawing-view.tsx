@@ -1,5 +1,5 @@
 import { useId, type CSSProperties } from 'react';
-import { outlineOf, wordsOf, type Drawing, type Primitive } from '@bellgap/common/drawing';
+import { outlineOf, wordsOf, type Drawing, type Outline, type Primitive } from '@bellgap/common/drawing';
 import { LAYER_STYLES } from './layer-styles';
 
 export interface DrawingViewProps {
@@ -13,6 +13,7 @@ export interface DrawingViewProps {
 
 const GROUND = 'var(--bg-surface)';
 const HIT_WIDTH_PX = 12;
+const TINT = 'var(--bg-rule)';
 
 /** A drawing as SVG: it fills the width it is given and keeps its proportions. */
 export function DrawingView({ drawing, className, hoveredAbout = null, onAbout }: DrawingViewProps) {
@@ -44,6 +45,12 @@ export function DrawingView({ drawing, className, hoveredAbout = null, onAbout }
       ))}
     </svg>
   );
+}
+
+function fillOf(fill: Outline['fill'], ink: string): string {
+  if (fill === 'none') return 'none';
+  if (fill === 'ink') return ink;
+  return fill === 'tint' ? TINT : GROUND;
 }
 
 interface MarkProps {
@@ -80,7 +87,7 @@ function Mark({ primitive, textHeightMm, strong, onAbout }: MarkProps) {
       {outline && (
         <path
           d={outline.data}
-          fill={outline.fill === 'none' ? 'none' : outline.fill === 'ink' ? stroke : GROUND}
+          fill={fillOf(outline.fill, stroke)}
           stroke={stroke}
           strokeWidth={style.widthPx + (strong ? 0.8 : 0)}
           vectorEffect="non-scaling-stroke"

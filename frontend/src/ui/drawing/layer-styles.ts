@@ -16,6 +16,7 @@ export const LAYER_STYLES: Record<Layer, LayerStyle> = {
   live: { stroke: 'var(--bg-ink)', widthPx: 1.8, words: 'var(--bg-ink)' },
   dimension: { stroke: 'var(--bg-soft)', widthPx: 0.8, words: 'var(--bg-ink)' },
   clearance: { stroke: 'var(--bg-soft)', widthPx: 1.2, words: 'var(--bg-ink)' },
+  share: { stroke: 'var(--bg-soft)', widthPx: 0.8, words: 'var(--bg-ink)' },
   governing: { stroke: 'var(--bg-glaze)', widthPx: 1.5, words: 'var(--bg-glaze)' },
   note: { stroke: 'var(--bg-ink)', widthPx: 1, words: 'var(--bg-soft)' },
 };

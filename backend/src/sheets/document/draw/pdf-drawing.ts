@@ -23,11 +23,13 @@ export const PDF_LAYERS: Record<Layer, PdfLayer> = {
   live: { colour: '#1D2528', weightPt: 1.1, words: '#1D2528' },
   dimension: { colour: '#4A5458', weightPt: 0.4, words: '#1D2528' },
   clearance: { colour: '#4A5458', weightPt: 0.6, words: '#1D2528' },
+  share: { colour: '#4A5458', weightPt: 0.35, words: '#1D2528' },
   governing: { colour: '#7A3E1D', weightPt: 0.8, words: '#7A3E1D' },
   note: { colour: '#1D2528', weightPt: 0.5, words: '#4A5458' },
 };
 
 const GROUND = '#FFFFFF';
+const TINT = '#D6D1C6';
 
 /** Walks the primitives of a drawing; the same outlines as on the screen. */
 export function drawPrimitives(
@@ -51,7 +53,8 @@ export function drawPrimitives(
       if (outline.dashed) doc.dash(3 / pointsPerMm, { space: 2.4 / pointsPerMm });
       doc.path(outline.data);
       if (outline.fill === 'none') doc.stroke();
-      else doc.fillColor(outline.fill === 'ink' ? layer.colour : GROUND).fillAndStroke();
+      else
+        doc.fillColor(outline.fill === 'ink' ? layer.colour : outline.fill === 'tint' ? TINT : GROUND).fillAndStroke();
       doc.restore();
     }
     const words = wordsOf(primitive, drawing.textHeightMm);
