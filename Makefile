@@ -52,6 +52,7 @@ packages: node
 	@node .ci/packages.mjs
 
 build: packages
+	@node .ci/prune.mjs
 	@node_modules/.bin/tsc -b backend
 	@$(MAKE) -s frontend/dist/index.html
 
