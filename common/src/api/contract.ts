@@ -34,6 +34,7 @@ import {
   userAnswer,
 } from './answers';
 import { endpoint } from './endpoint';
+import { methodEndpoints } from './method-endpoints';
 import { DRAFT_READERS, DRAFT_WRITERS } from './roles';
 
 const ADMINISTRATOR = ['administrator'] as const;
@@ -441,6 +442,9 @@ export const contract = {
     answer: yup.array().of(insulationLevelAnswer.required()).required(),
     success: 200,
   }),
+
+  // tables and formulas, known answers, what would be if
+  ...methodEndpoints,
 } as const;
 
 export type Contract = typeof contract;

@@ -2,6 +2,7 @@ export * from './fields';
 export * from './parts';
 export * from './specification-input';
 export * from './company-settings';
+export * from './method';
 export * from './people';
 export * from './projects';
 export * from './specifications';

@@ -1,0 +1,102 @@
+import * as yup from 'yup';
+import { revisionNoteSchema, sweepSchema, tableConfirmationSchema, whatIfSchema } from '../schemas/method';
+import { endpoint } from './endpoint';
+import {
+  knownAnswersAnswer,
+  revisionNoteAnswer,
+  sweepAnswer,
+  tableAnswer,
+  tableConfirmationAnswer,
+  tableEntryAnswer,
+  whatIfAnswer,
+} from './method-answers';
+import { DRAFT_READERS } from './roles';
+
+const ADMINISTRATOR = ['administrator'] as const;
+
+/** Endpoints about the method: its tables and formulas, its known answers, and what would be if. */
+export const methodEndpoints = {
+  tables: endpoint({
+    method: 'GET',
+    path: '/tables',
+    summary: 'Every table and formula of the method',
+    access: 'signed-in',
+    answer: yup.array().of(tableEntryAnswer.required()).required(),
+    success: 200,
+  }),
+  table: endpoint({
+    method: 'GET',
+    path: '/tables/:key',
+    summary: 'A table with its rows, or a formula',
+    access: 'signed-in',
+    answer: tableAnswer,
+    success: 200,
+  }),
+  tableConfirmations: endpoint({
+    method: 'GET',
+    path: '/table-confirmations',
+    summary: 'What owners of the print have recorded, the newest first',
+    access: 'signed-in',
+    answer: yup.array().of(tableConfirmationAnswer.required()).required(),
+    success: 200,
+  }),
+  confirmTable: endpoint({
+    method: 'POST',
+    path: '/table-confirmations',
+    summary: 'Record that the print agrees with a row or formula, or that it differs',
+    access: ADMINISTRATOR,
+    body: tableConfirmationSchema,
+    answer: tableConfirmationAnswer.required(),
+    success: 201,
+  }),
+  runKnownAnswers: endpoint({
+    method: 'POST',
+    path: '/known-answers/runs',
+    summary: 'Run the published examples; nothing is stored',
+    access: 'signed-in',
+    answer: knownAnswersAnswer,
+    success: 200,
+  }),
+  sweep: endpoint({
+    method: 'POST',
+    path: '/evaluations/sweep',
+    summary: 'Units by altitude and class; nothing is stored',
+    access: 'signed-in',
+    body: sweepSchema,
+    answer: sweepAnswer,
+    success: 200,
+  }),
+  whatIf: endpoint({
+    method: 'POST',
+    path: '/evaluations/what-if',
+    summary: 'What would change in a few other cases; nothing is stored',
+    access: 'signed-in',
+    body: whatIfSchema,
+    answer: whatIfAnswer,
+    success: 200,
+  }),
+  revisionNotes: endpoint({
+    method: 'GET',
+    path: '/projects/:code/specifications/:number/revisions/:label/notes',
+    summary: 'Notes on a revision, the newest first',
+    access: 'signed-in',
+    answer: yup.array().of(revisionNoteAnswer.required()).required(),
+    success: 200,
+  }),
+  writeRevisionNote: endpoint({
+    method: 'POST',
+    path: '/projects/:code/specifications/:number/revisions/:label/notes',
+    summary: 'Write a note on a revision',
+    access: DRAFT_READERS,
+    body: revisionNoteSchema,
+    answer: revisionNoteAnswer.required(),
+    success: 201,
+  }),
+  removeRevisionNote: endpoint({
+    method: 'DELETE',
+    path: '/projects/:code/specifications/:number/revisions/:label/notes/:noteId',
+    summary: 'Take an own note away',
+    access: DRAFT_READERS,
+    success: 204,
+  }),
+} as const;
