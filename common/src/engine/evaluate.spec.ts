@@ -132,6 +132,7 @@ describe(evaluate.name, () => {
       'exponent',
       'parallelStrings',
       'rodsInSeries',
+      'voltageSharing',
     ]);
     const named = (value: unknown): string[] =>
       numbersOf(value).map(([path]) => path.split('.').findLast((step) => Number.isNaN(Number(step)))!);

@@ -56,7 +56,6 @@ function stringOf(
   }
   const rods = unit.kind === 'ceramic-rod' ? (string.rodsInSeries ?? 1) : 1;
   const devices = { kind: string.arcingDevices ?? null, gapMm: string.arcGapMm ?? null };
-  calculation.missing('string.voltageSharing', NOT_COVERED);
   return assessString({ input, string, situation, context, unit, rods, devices }, calculation).result;
 }
 

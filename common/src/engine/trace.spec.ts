@@ -4,6 +4,7 @@ import * as clearances from './clearances/formulas';
 import * as stringFormulas from './insulator-string/formulas';
 import * as overvoltage from './overvoltage';
 import * as pollution from './pollution';
+import * as stringVoltage from './string-voltage';
 import { unitOf } from './quantities';
 import { cite, DEFINITION } from './sources';
 import { IEC_TS_60815_USCD } from './standards';
@@ -12,7 +13,7 @@ import { Calculation, figureText, formula, type Formula } from './trace';
 
 type AnyFormula = Formula<Record<string, number>>;
 
-const ROOMS = { airGaps, atmosphere, clearances, overvoltage, pollution, stringFormulas };
+const ROOMS = { airGaps, atmosphere, clearances, overvoltage, pollution, stringFormulas, stringVoltage };
 
 const FORMULAS: AnyFormula[] = Object.values(ROOMS)
   .flatMap((room) => Object.values(room) as unknown[])

@@ -2,8 +2,9 @@ import { ATMOSPHERE } from './atmosphere';
 import { CREEPAGE } from './creepage';
 import { LEVELS_AND_CLEARANCES } from './levels-and-clearances';
 import { COUNTS_IN_SERVICE } from './rules-of-thumb';
+import { STRING_VOLTAGE } from './string-voltage';
 
-const TOPICS = { ATMOSPHERE, CREEPAGE, LEVELS_AND_CLEARANCES, COUNTS_IN_SERVICE };
+const TOPICS = { ATMOSPHERE, CREEPAGE, LEVELS_AND_CLEARANCES, COUNTS_IN_SERVICE, STRING_VOLTAGE };
 
 describe.each(Object.entries(TOPICS))('published examples: %s', (_topic, examples) => {
   it('are there', () => {

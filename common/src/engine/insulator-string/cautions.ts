@@ -1,5 +1,6 @@
 import type { Criterion, StringResult } from '../model';
 import { isKnown } from '../quantities';
+import { infoRings } from '../string-voltage';
 import type { Calculation } from '../trace';
 import type { StringCase } from './assess';
 import { isAssessed } from './demand';
@@ -171,4 +172,6 @@ export function cautionString(given: StringCase, parts: Parts, result: StringRes
   cautionCreepage(given, result, calculation);
   infoSoundSystem(given, parts, calculation);
   infoArrangement(given, calculation);
+  const { unit, devices, situation } = given;
+  infoRings({ unit, devices, highestVoltageKv: situation.highestVoltageKv }, calculation);
 }

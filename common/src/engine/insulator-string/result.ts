@@ -2,6 +2,7 @@ import type { Criterion, CriterionResult, StringResult } from '../model';
 import { inFromMm } from '../quantities';
 import type { CreepageRequirement } from '../pollution';
 import { cite, DEFINITION } from '../sources';
+import { voltageSharing } from '../string-voltage';
 import type { Calculation } from '../trace';
 import type { StringCase } from './assess';
 import { coordination } from './coordination';
@@ -140,8 +141,7 @@ export function putTogether(given: StringCase, parts: Parts, calculation: Calcul
     unitsOut: disc && units !== null ? unitsOut(demands, units) : [],
     coordination: coordination(given, dryArcMm, calculation),
     testLevels,
-    voltageSharing: [],
-    efficiencyPercent: null,
+    ...voltageSharing(unit, units, calculation),
   };
   cautionString(given, parts, result, calculation);
   return result;

@@ -1,0 +1,4 @@
+export * from './assess';
+export * from './equalise';
+export * from './formulas';
+export * from './network';
