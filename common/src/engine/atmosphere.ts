@@ -116,14 +116,14 @@ export interface FactorReading {
  * Factor on the strength of external insulation in North American practice; a distance is divided by it. The next
  * higher printed altitude holds; 1 up to 3300 ft.
  */
-export function dielectricFactor(altitudeM: number, calculation: Calculation): FactorReading {
+export function dielectricFactor(altitudeM: number, calculation: Calculation, as?: string): FactorReading {
   const { row } = nextHigherRow(C37_30_ALTITUDE, (one) => one.altitudeM, altitudeM);
   const last = C37_30_ALTITUDE.rows.at(-1) as (typeof C37_30_ALTITUDE.rows)[number];
   const read = row ?? last;
   const source = calculation.row(C37_30_ALTITUDE, read);
   if (row !== null) {
     calculation.note(() => ({
-      id: 'atmosphere.dielectric-factor',
+      id: as === undefined ? 'atmosphere.dielectric-factor' : `atmosphere.dielectric-factor:${as}`,
       heading: 'Factor on the strength in thin air',
       formula: 'F(H), next higher altitude printed',
       substitution: `F(${altitudeM} m), row of ${row.altitudeM} m`,
@@ -154,7 +154,7 @@ const LINE_COLUMNS: readonly (readonly [upToKv: number, factorOf: (row: TableRow
  * Example printed in Annex F: 1000 m and 385 kV give 0.946; 1550 kV give 0.978.
  */
 export function lineAltitudeFactor(
-  { altitudeM, gapKvPeak, use }: { altitudeM: number; gapKvPeak: number; use: string },
+  { altitudeM, gapKvPeak, use, as = use }: { altitudeM: number; gapKvPeak: number; use: string; as?: string },
   calculation: Calculation,
 ): FactorReading {
   const [upToKv, factorOf] = LINE_COLUMNS.find(
@@ -170,7 +170,7 @@ export function lineAltitudeFactor(
   const interpolated = reading.found === 'interpolated';
   if (reading.value !== null) {
     calculation.note(() => ({
-      id: `atmosphere.line-altitude-factor:${use}`,
+      id: `atmosphere.line-altitude-factor:${as}`,
       heading: `Altitude factor of the strength, ${use}`,
       formula: 'ka(H, U), linear between printed altitudes',
       substitution: `ka(${altitudeM} m, ${Number(gapKvPeak.toPrecision(7))} kV), ${

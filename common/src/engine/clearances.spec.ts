@@ -322,13 +322,6 @@ describe('one method fills the headline', () => {
     expect(rows.filter(({ governs }) => governs).every(({ method }) => method === 'en-empirical')).toBe(true);
   });
 
-  it.each(['en-theoretical', 'north-american'] as const)('has no figure by %s in this edition', (method) => {
-    const { phaseToEarthMm, phaseToPhaseMm, rows, calculation } = assess({ clearance: { method } });
-    expect([phaseToEarthMm, phaseToPhaseMm]).toEqual([null, null]);
-    expect(rows.some(({ governs }) => governs)).toBe(false);
-    expect(calculation.notAssessed).toContainEqual({ part: 'clearances', why: 'Not covered by this method edition.' });
-  });
-
   it('waits for the choice of the method, the altitude, the voltage and the level', () => {
     expect(assess({ clearance: { method: null } })).toMatchObject({ method: null, phaseToEarthMm: null });
     expect(assess({ altitudeM: null })).toMatchObject({ phaseToEarthMm: null, rows: [] });

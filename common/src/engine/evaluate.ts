@@ -1,9 +1,10 @@
-import { assessClearances } from './clearances';
+import { assessClearances, type StringBeside } from './clearances';
 import { assessString } from './insulator-string';
 import { METHOD_EDITION } from './method-edition';
 import type {
   Evaluation,
   EvaluationContext,
+  InsulatorUnit,
   PollutionClass,
   SpecificationInput,
   StringInput,
@@ -42,6 +43,9 @@ function readLevel(
   return { situation: { ...situation, level: given === null ? null : { ...given, switchingPhaseRatio } }, level };
 }
 
+const rodsOf = (string: StringInput, unit: InsulatorUnit): number =>
+  unit.kind === 'ceramic-rod' ? (string.rodsInSeries ?? 1) : 1;
+
 function stringOf(
   input: SpecificationInput,
   string: StringInput,
@@ -54,9 +58,20 @@ function stringOf(
     calculation.missing('string', 'No insulator unit is chosen.');
     return null;
   }
-  const rods = unit.kind === 'ceramic-rod' ? (string.rodsInSeries ?? 1) : 1;
+  const rods = rodsOf(string, unit);
   const devices = { kind: string.arcingDevices ?? null, gapMm: string.arcGapMm ?? null };
+  calculation.missing('string.voltageSharing', NOT_COVERED);
   return assessString({ input, string, situation, context, unit, rods, devices }, calculation).result;
+}
+
+/** The string as the gap beside it sees it. */
+function stringBeside(
+  { string }: SpecificationInput,
+  { insulator: unit }: EvaluationContext,
+  result: StringResult | null,
+): StringBeside | null {
+  if (!isKnown(string) || unit === null) return null;
+  return { string, unit, rods: rodsOf(string, unit), dryArcMm: result?.dryArcMm ?? null };
 }
 
 /** Parts that this edition does not compute: said so where given, and where a line or a bay would need them. */
@@ -72,8 +87,6 @@ function uncoveredParts(input: SpecificationInput, calculation: Calculation): vo
     if (isKnown(input[part])) calculation.missing(part, NOT_COVERED);
     else if (needed) calculation.missing(part, NOT_FILLED_IN);
   }
-  if (isKnown(input.system?.overvoltages)) calculation.missing('system.overvoltages', NOT_COVERED);
-  if (isKnown(input.clearance?.safetySource)) calculation.missing('clearance.safetySource', NOT_COVERED);
 }
 
 function cautionStatuses(calculation: Calculation): void {
@@ -102,7 +115,15 @@ export function evaluate(
   const string = isKnown(given) ? stringOf(input, given, situation, context, calculation) : null;
   if (!isKnown(given) && input.kind !== 'bay') calculation.missing('string', NOT_FILLED_IN);
   const clearances = assessClearances(
-    { situation, level, clearance: input.clearance, givenHighestVoltageKv: input.system?.highestVoltageKv },
+    {
+      situation,
+      level,
+      clearance: input.clearance,
+      givenHighestVoltageKv: input.system?.highestVoltageKv,
+      kind: input.kind,
+      overvoltages: input.system?.overvoltages,
+      beside: stringBeside(input, context, string),
+    },
     calculation,
   );
   const pollution = input.site?.pollution;

@@ -31,6 +31,8 @@ function statusOf(words: string): Status | null {
 type Cell = (text: string, row: Record<string, string>) => unknown;
 const number: Cell = (text) => (text === '' ? null : Number(text));
 const words: Cell = (text) => (text === '' ? null : text);
+/** Words joined by underscores in the file; the weather of a condition is left out. */
+const hyphens: Cell = (text) => text.replace('_6psf', '').replaceAll('_', '-');
 const yes: Cell = (text) => text === 'yes';
 const status: Cell = (text) => statusOf(text);
 const numbers: Cell = (text) => (text === '' ? null : text.split('/').map(Number));
@@ -192,6 +194,42 @@ const TRANSCRIPTIONS = [
     groundRecommendedMm: ['ground_clearance_recommended_mm', number],
     phaseSpacingIn: ['phase_spacing_vertical_break_and_bus_in', number],
     phaseSpacingMm: ['phase_spacing_vertical_break_and_bus_mm', number],
+    status: ['status', status],
+  }),
+  transcribed('rus-1724e-200-swing-clearances', standards.RUS_SWING_CLEARANCES, {
+    condition: ['condition', hyphens],
+    nominalVoltageKv: ['nominal_voltage_kv', number],
+    maximumVoltageKv: ['max_operating_voltage_kv', number],
+    units: ['suspension_units_254x146', number],
+    clearanceTo: ['clearance_to', hyphens],
+    clearanceIn: ['rus_value_in', number],
+    nescIn: ['nesc_table_235_6_value_in', number],
+    nescRoundedUpIn: ['nesc_rounded_up_in', number],
+    nescAdderIn: ['nesc_altitude_adder_in_per_1000ft', number],
+    status: ['status', status],
+    statusNesc: ['status_nesc', status],
+  }),
+  transcribed('safety-distances', standards.SAFETY_DISTANCES, {
+    source: ['source', words],
+    kind: ['kind', words],
+    symbol: ['symbol', words],
+    additionMm: ['addition_mm', number],
+    leastMm: ['least_mm', number],
+    overVoltageKv: ['um_over_kv', number],
+    upToVoltageKv: ['um_up_to_kv', number],
+    status: ['status', status],
+  }),
+  transcribed('national-altitude-rules', standards.NATIONAL_ALTITUDE_RULES, {
+    rule: ['rule', words],
+    title: ['title', words],
+    appliesTo: ['applies_to', words],
+    increasePercent: ['increase_percent', number],
+    stepM: ['step_m', number],
+    wholeSteps: ['whole_steps', yes],
+    originM: ['origin_m', number],
+    validUpToM: ['valid_up_to_m', number],
+    at2000Factor: ['factor_2000m', number],
+    at3000Factor: ['factor_3000m', number],
     status: ['status', status],
   }),
   transcribed('trade-disc-counts', standards.TRADE_DISC_COUNTS, {

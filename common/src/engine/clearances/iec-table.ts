@@ -1,24 +1,14 @@
 import { levelAltitudeCorrection, LEVEL_ALTITUDE_RULES, type LevelStress } from '../atmosphere';
-import type { ClearanceInput, ClearanceRow, ShapePhaseToEarth, ShapePhaseToPhase, Status } from '../model';
+import type { ClearanceInput, ClearanceRow, ShapePhaseToEarth, Status } from '../model';
 import { SHAPES_PHASE_TO_EARTH, SHAPES_PHASE_TO_PHASE } from '../model';
 import { ALTITUDE_LIMITS_M } from '../quantities';
 import { switchingBetweenPhases, type InsulationLevelRow } from '../overvoltage';
 import type { Situation } from '../situation';
-import {
-  IEC_60071_1_TABLE_A1,
-  IEC_60071_1_TABLE_A2,
-  IEC_60071_1_TABLE_A3,
-  leastKnown,
-  linearBetweenRows,
-  type LightningClearanceRow,
-  type StandardTable,
-  type SwitchingEarthClearanceRow,
-  type SwitchingPhaseClearanceRow,
-  type TableRow,
-} from '../standards';
+import { leastKnown, linearBetweenRows } from '../standards';
 import { figureText, type Calculation } from '../trace';
 import { correctedWithstand } from './formulas';
 import { DISTANCE_WORDS, noAnswer, rounded, type MethodAnswer, type MethodDistance } from './method-rows';
+import { lightningColumn, phaseColumn, switchingColumn, type Column } from './table-columns';
 
 /** Switching levels above which the fixed exponent is very heavy at great altitude, kV peak. */
 const HEAVY_EXPONENT_ABOVE_KV = 1300;
@@ -31,41 +21,6 @@ export interface TableMethodInput {
 }
 
 type Site = { altitudeM: number; holdsToM: number };
-
-/** A column of a table: how it is entered, what it gives, how well each of its figures is known. */
-interface Column<Row extends object> {
-  table: StandardTable<Row>;
-  voltageKv: (row: TableRow<Row>) => number;
-  distanceMm: (row: TableRow<Row>) => number;
-  status: (row: TableRow<Row>) => Status;
-  firstRowBelow: boolean;
-}
-
-/** Table A.1: one column of figures up to 750 kV, which serves both shapes. */
-const lightningColumn = (shape: ShapePhaseToEarth): Column<LightningClearanceRow> => ({
-  table: IEC_60071_1_TABLE_A1,
-  voltageKv: (row) => row.lightningKv,
-  distanceMm: (row) =>
-    shape === 'rod-structure' ? row.rodStructureMm : (row.conductorStructureMm ?? row.rodStructureMm),
-  status: (row) => (shape === 'rod-structure' ? row.status : (row.statusConductorStructure ?? row.status)),
-  firstRowBelow: false,
-});
-
-const switchingColumn = (shape: ShapePhaseToEarth): Column<SwitchingEarthClearanceRow> => ({
-  table: IEC_60071_1_TABLE_A2,
-  voltageKv: (row) => row.switchingKv,
-  distanceMm: (row) => (shape === 'rod-structure' ? row.rodStructureMm : row.conductorStructureMm),
-  status: (row) => (shape === 'rod-structure' ? row.status : row.statusConductorStructure),
-  firstRowBelow: true,
-});
-
-const phaseColumn = (shape: ShapePhaseToPhase): Column<SwitchingPhaseClearanceRow> => ({
-  table: IEC_60071_1_TABLE_A3,
-  voltageKv: (row) => row.switchingPhaseToPhaseKv,
-  distanceMm: (row) => (shape === 'rod-conductor' ? row.rodConductorMm : row.conductorConductorMm),
-  status: (row) => (shape === 'rod-conductor' ? row.status : row.statusConductorConductor),
-  firstRowBelow: true,
-});
 
 interface Asked {
   distance: MethodDistance['distance'];

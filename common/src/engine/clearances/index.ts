@@ -1,12 +1,16 @@
-import type { ClearanceInput, ClearanceRow, ClearancesResult } from '../model';
+import type { ClearanceInput, ClearanceRow, ClearancesResult, OvervoltagesInput, SpecificationKind } from '../model';
 import type { InsulationLevelRow } from '../overvoltage';
 import type { Situation } from '../situation';
 import type { Calculation } from '../trace';
 import { empiricalMethod } from './en-empirical';
+import { theoreticalMethod, type StringBeside } from './en-theoretical';
 import { tableMethod } from './iec-table';
 import { DISTANCE_WORDS, type MethodAnswer, type MethodDistance } from './method-rows';
+import { northAmericanMethod } from './north-american';
+import { safetyDistances } from './safety';
 
 export { EN_ALTITUDE_LIMIT_M } from './en-empirical';
+export type { StringBeside } from './en-theoretical';
 
 export interface ClearancesCase {
   situation: Situation;
@@ -16,6 +20,10 @@ export interface ClearancesCase {
   clearance: Partial<ClearanceInput> | null | undefined;
   /** Um as it was given; the line tables print 525 and 765 kV themselves. */
   givenHighestVoltageKv?: number | null;
+  kind?: SpecificationKind | null;
+  overvoltages?: Partial<OvervoltagesInput> | null;
+  /** The string, from which the fast-front voltage may be taken; null where there is none. */
+  beside?: StringBeside | null;
 }
 
 const PART = { 'phase-to-earth': 'clearances.phaseToEarthMm', 'phase-to-phase': 'clearances.phaseToPhaseMm' } as const;
@@ -50,34 +58,56 @@ function headlines(answer: MethodAnswer, calculation: Calculation): Record<Metho
   return { 'phase-to-earth': earth ?? null, 'phase-to-phase': phase ?? null };
 }
 
-/**
- * Clearances by the method chosen, with the rows of the other method beside them. Distances between phases, to earth, to
- * a section and for safety are four different things; one is never computed from another.
- */
-export function assessClearances(
-  { situation, level, clearance, givenHighestVoltageKv = null }: ClearancesCase,
+const answers = (
+  { situation, level, clearance, givenHighestVoltageKv = null, kind = null, overvoltages, beside }: ClearancesCase,
+  method: ClearancesResult['method'],
   calculation: Calculation,
-): ClearancesResult {
-  const leftOut = clearance === null || clearance === undefined;
-  const method = leftOut ? 'iec-table' : (clearance.method ?? null);
-  const shapePhaseToEarth = clearance?.shapePhaseToEarth ?? null;
-  const shapePhaseToPhase = clearance?.shapePhaseToPhase ?? null;
-  const answers = [
+): [MethodAnswer, ...MethodAnswer[]] => {
+  const { shapePhaseToEarth = null, shapePhaseToPhase = null, fastFrontFrom = null, enGap = null } = clearance ?? {};
+  const northAmerican = method === 'north-american';
+  return [
     tableMethod({ situation, level, shapePhaseToEarth, shapePhaseToPhase }, calculation),
     empiricalMethod({ situation, givenHighestVoltageKv }, calculation),
+    theoreticalMethod(
+      {
+        situation,
+        clearance: { fastFrontFrom, enGap },
+        overvoltages: overvoltages ?? null,
+        beside: beside ?? null,
+        chosen: method === 'en-theoretical',
+      },
+      calculation,
+    ),
+    // The factor that divides a distance is for the North American basis only.
+    ...(northAmerican || situation.basis === 'north-american'
+      ? [northAmericanMethod({ situation, kind }, calculation)]
+      : []),
   ];
-  const chosen = answers.find((answer) => answer.method === method);
+};
+
+/**
+ * Clearances by the method chosen, with the rows of the other methods beside them where their inputs are there.
+ * Distances between phases, to earth, to a section and for safety are four different things; one is never computed from
+ * another.
+ */
+export function assessClearances(given: ClearancesCase, calculation: Calculation): ClearancesResult {
+  const { situation, clearance } = given;
+  const leftOut = clearance === null || clearance === undefined;
+  const method = leftOut ? 'iec-table' : (clearance.method ?? null);
+  const all = answers(given, method, calculation);
+  const chosen = all.find((answer) => answer.method === method);
   let found: Record<MethodDistance['distance'], number | null> = { 'phase-to-earth': null, 'phase-to-phase': null };
   if (chosen !== undefined) found = headlines(chosen, calculation);
-  else {
-    const why = method === null ? 'The clearance method is not chosen.' : 'Not covered by this method edition.';
-    calculation.missing('clearances', why);
-  }
-  const ordered = [...answers].sort((one, other) => Number(other === chosen) - Number(one === chosen));
+  else calculation.missing('clearances', 'The clearance method is not chosen.');
+  const ordered = [...all].sort((one, other) => Number(other === chosen) - Number(one === chosen));
+  const safety = safetyDistances({ situation, clearance: clearance ?? {}, table: all[0] }, calculation);
   return {
     method,
     phaseToEarthMm: found['phase-to-earth'],
     phaseToPhaseMm: found['phase-to-phase'],
-    rows: ordered.flatMap(({ distances, beside }) => [...distances.flatMap(({ rows }) => rows), ...beside]),
+    rows: [
+      ...ordered.flatMap(({ distances, beside }) => [...distances.flatMap(({ rows }) => rows), ...beside]),
+      ...safety,
+    ],
   };
 }

@@ -41,7 +41,12 @@ export function noAnswer(method: ClearanceMethod, whyNot: string): MethodAnswer 
 }
 
 /** The words of a distance. */
-export const DISTANCE_WORDS = { 'phase-to-earth': 'phase to earth', 'phase-to-phase': 'between phases' } as const;
+export const DISTANCE_WORDS = {
+  'phase-to-earth': 'phase to earth',
+  'phase-to-phase': 'between phases',
+  section: 'to a section',
+  safety: 'for people',
+} as const satisfies Record<ClearanceRow['distance'], string>;
 
 /** Rounds a required distance up to 10 mm and shows that it did. */
 export function rounded(
@@ -52,9 +57,9 @@ export function rounded(
   const valueMm = unroundedMm === null ? null : requiredDistanceMm(unroundedMm);
   calculation.note(() => ({
     id: `clearances.row:${row.method}:${row.distance}:${row.stress}${row.shape === null ? '' : `:${row.shape}`}`,
-    heading: `Distance ${DISTANCE_WORDS[row.distance === 'phase-to-phase' ? 'phase-to-phase' : 'phase-to-earth']}, ${row.stress}${
-      row.shape === null ? '' : `, ${row.shape}`
-    }`,
+    heading: [`Distance ${DISTANCE_WORDS[row.distance]}`, row.stress, ...(row.shape === null ? [] : [row.shape])].join(
+      ', ',
+    ),
     formula: 'D, up to the next 10 mm',
     substitution: unroundedMm === null ? 'no figure' : `${Number(unroundedMm.toPrecision(7))} mm`,
     result: valueMm,

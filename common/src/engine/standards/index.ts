@@ -6,7 +6,9 @@ import { IEC_60071_1_RANGE_I, IEC_60071_1_RANGE_II } from './iec-60071-1-levels'
 import { IEC_60305_UNITS } from './iec-60305';
 import { IEC_61936_1_CLEARANCES } from './iec-61936-1';
 import { IEC_TS_60815_USCD } from './iec-ts-60815';
-import { RUS_CONTAMINATION, RUS_SUSPENSION_LEVELS } from './rus-1724e-200';
+import { NATIONAL_ALTITUDE_RULES } from './national-altitude-rules';
+import { RUS_CONTAMINATION, RUS_SUSPENSION_LEVELS, RUS_SWING_CLEARANCES } from './rus-1724e-200';
+import { SAFETY_DISTANCES } from './safety-distances';
 import { STRING_FLASHOVER_254X146 } from './string-flashover';
 import { TRADE_DISC_COUNTS } from './trade-disc-counts';
 
@@ -19,7 +21,9 @@ export * from './iec-60305';
 export * from './iec-61936-1';
 export * from './iec-ts-60815';
 export * from './look-up';
+export * from './national-altitude-rules';
 export * from './rus-1724e-200';
+export * from './safety-distances';
 export * from './string-flashover';
 export * from './table';
 export * from './trade-disc-counts';
@@ -39,9 +43,12 @@ export const ALL_TABLES = [
   EN_50341_1_ALTITUDE,
   EN_50341_1_GAP_FACTORS,
   IEC_61936_1_CLEARANCES,
+  SAFETY_DISTANCES,
+  NATIONAL_ALTITUDE_RULES,
   C37_30_ALTITUDE,
   C37_32_BUS_CLEARANCES,
   RUS_SUSPENSION_LEVELS,
   RUS_CONTAMINATION,
+  RUS_SWING_CLEARANCES,
   TRADE_DISC_COUNTS,
 ] as const;

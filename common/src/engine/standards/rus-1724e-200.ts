@@ -130,3 +130,104 @@ export const RUS_CONTAMINATION: StandardTable<ContaminationRow> = {
     leakage('B', 'heavy', 0.1, null, 1.19, 1.19, 'V-string', 'memory'),
   ],
 };
+
+export const SWING_CONDITIONS = ['no-wind', 'moderate-wind', 'high-wind'] as const;
+export const SWING_PARTS = ['structure-or-guy', 'structure', 'jointly-used-structure', 'anchor-guy'] as const;
+
+/** Least distance from a conductor to what it swings toward, measured from the live part. */
+export interface SwingClearanceRow {
+  condition: (typeof SWING_CONDITIONS)[number];
+  /** Line to line, kV r.m.s. */
+  nominalVoltageKv: number;
+  /** Maximum operating voltage, line to line, kV r.m.s. */
+  maximumVoltageKv: number;
+  /** Units of 254 x 146 mm that the row is written for. */
+  units: number;
+  clearanceTo: (typeof SWING_PARTS)[number];
+  clearanceIn: number;
+  /** NESC Table 235-6 at the maximum operating voltage; moderate wind only. */
+  nescIn: number | null;
+  /** The same, up to the next inch. */
+  nescRoundedUpIn: number | null;
+  /** Adder for every 1,000 ft or part above 3,300 ft, in. */
+  nescAdderIn: number | null;
+  /** How well the NESC figures are known; `status` stands for the bulletin's. */
+  statusNesc: Status | null;
+}
+
+const swing = (
+  condition: SwingClearanceRow['condition'],
+  nominalVoltageKv: number,
+  maximumVoltageKv: number,
+  units: number,
+  clearanceTo: SwingClearanceRow['clearanceTo'],
+  clearanceIn: number,
+  nescIn: number | null,
+  nescRoundedUpIn: number | null,
+  nescAdderIn: number | null,
+): SwingClearanceRow & { status: Status } => ({
+  condition,
+  nominalVoltageKv,
+  maximumVoltageKv,
+  units,
+  clearanceTo,
+  clearanceIn,
+  nescIn,
+  nescRoundedUpIn,
+  nescAdderIn,
+  status: 'memory',
+  statusNesc: nescIn === null ? null : 'derived',
+});
+
+// Condition; nominal, maximum; units; to; bulletin; NESC, rounded up, adder.
+/** Clearances of a swung conductor to structure and guys; nothing is recalled above 230 kV. */
+export const RUS_SWING_CLEARANCES: StandardTable<SwingClearanceRow> = {
+  key: 'rus-1724e-200:swing-clearances',
+  title: 'Clearances of a swung conductor to structure and guys',
+  ...RUS_1724E_200,
+  clause: 'chapter 7',
+  reproducedIn: 'NESC (IEEE C2-1997) Table 235-6 (rule of the moderate-wind rows)',
+  rule: 'next-higher-row',
+  identifiedBy: ['condition', 'nominalVoltageKv', 'clearanceTo'],
+  remarks: [
+    'All 21 moderate-wind figures equal NESC Table 235-6, rounded up to the inch; the others were not read.',
+    'At 46 and 69 kV the high-wind figures are an inch below what the other rows suggest.',
+  ],
+  rows: [
+    swing('no-wind', 34.5, 36.2, 3, 'structure-or-guy', 19, null, null, null),
+    swing('no-wind', 46, 48.3, 3, 'structure-or-guy', 19, null, null, null),
+    swing('no-wind', 69, 72.5, 4, 'structure-or-guy', 25, null, null, null),
+    swing('no-wind', 115, 121, 7, 'structure-or-guy', 42, null, null, null),
+    swing('no-wind', 138, 145, 8, 'structure-or-guy', 48, null, null, null),
+    swing('no-wind', 161, 169, 10, 'structure-or-guy', 60, null, null, null),
+    swing('no-wind', 230, 242, 12, 'structure-or-guy', 71, null, null, null),
+    swing('moderate-wind', 34.5, 36.2, 3, 'structure', 9, 8.5, 9, 0),
+    swing('moderate-wind', 46, 48.3, 3, 'structure', 11, 10.92, 11, 0),
+    swing('moderate-wind', 69, 72.5, 4, 'structure', 16, 15.5, 16, 0.14),
+    swing('moderate-wind', 115, 121, 7, 'structure', 26, 25.2, 26, 0.43),
+    swing('moderate-wind', 138, 145, 8, 'structure', 30, 30, 30, 0.57),
+    swing('moderate-wind', 161, 169, 10, 'structure', 35, 34.8, 35, 0.71),
+    swing('moderate-wind', 230, 242, 12, 'structure', 50, 49.4, 50, 1.15),
+    swing('moderate-wind', 34.5, 36.2, 3, 'jointly-used-structure', 11, 10.5, 11, 0),
+    swing('moderate-wind', 46, 48.3, 3, 'jointly-used-structure', 13, 12.92, 13, 0),
+    swing('moderate-wind', 69, 72.5, 4, 'jointly-used-structure', 18, 17.5, 18, 0.14),
+    swing('moderate-wind', 115, 121, 7, 'jointly-used-structure', 28, 27.2, 28, 0.43),
+    swing('moderate-wind', 138, 145, 8, 'jointly-used-structure', 32, 32, 32, 0.57),
+    swing('moderate-wind', 161, 169, 10, 'jointly-used-structure', 37, 36.8, 37, 0.71),
+    swing('moderate-wind', 230, 242, 12, 'jointly-used-structure', 52, 51.4, 52, 1.15),
+    swing('moderate-wind', 34.5, 36.2, 3, 'anchor-guy', 13, 12.88, 13, 0),
+    swing('moderate-wind', 46, 48.3, 3, 'anchor-guy', 16, 15.9, 16, 0),
+    swing('moderate-wind', 69, 72.5, 4, 'anchor-guy', 22, 21.62, 22, 0.17),
+    swing('moderate-wind', 115, 121, 7, 'anchor-guy', 34, 33.75, 34, 0.53),
+    swing('moderate-wind', 138, 145, 8, 'anchor-guy', 40, 39.75, 40, 0.71),
+    swing('moderate-wind', 161, 169, 10, 'anchor-guy', 46, 45.75, 46, 0.89),
+    swing('moderate-wind', 230, 242, 12, 'anchor-guy', 64, 64, 64, 1.44),
+    swing('high-wind', 34.5, 36.2, 3, 'structure-or-guy', 3, null, null, null),
+    swing('high-wind', 46, 48.3, 3, 'structure-or-guy', 3, null, null, null),
+    swing('high-wind', 69, 72.5, 4, 'structure-or-guy', 5, null, null, null),
+    swing('high-wind', 115, 121, 7, 'structure-or-guy', 10, null, null, null),
+    swing('high-wind', 138, 145, 8, 'structure-or-guy', 12, null, null, null),
+    swing('high-wind', 161, 169, 10, 'structure-or-guy', 14, null, null, null),
+    swing('high-wind', 230, 242, 12, 'structure-or-guy', 20, null, null, null),
+  ],
+};

@@ -1,4 +1,4 @@
-import { countUp } from '../quantities';
+import { roundUp } from '../quantities';
 
 /** Evaluates what a formula shows, so that a test can compare it with what is run. */
 
@@ -9,7 +9,7 @@ const FUNCTIONS: Record<string, (...args: number[]) => number> = {
   min: Math.min,
   max: Math.max,
   round: (value) => Math.round(Math.round(value * 1e6) / 1e6),
-  ceil: countUp,
+  ceil: (value) => roundUp(value, 1),
 };
 
 function tokens(text: string): string[] {
