@@ -60,7 +60,6 @@ function stringOf(
   }
   const rods = rodsOf(string, unit);
   const devices = { kind: string.arcingDevices ?? null, gapMm: string.arcGapMm ?? null };
-  calculation.missing('string.voltageSharing', NOT_COVERED);
   return assessString({ input, string, situation, context, unit, rods, devices }, calculation).result;
 }
 
