@@ -77,13 +77,39 @@ export const FIELDS = {
     above: 0,
   },
   'clearance.safetySource': { label: 'Safety distances from' },
+  mechanical: { label: 'Mechanical loads' },
+  'mechanical.basis': { label: 'Strength basis' },
+  'mechanical.subconductors': { label: 'Sub-conductors', atLeast: 1, atMost: 12, whole: true },
+  'mechanical.crossing': { label: 'Crossing' },
+  'mechanical.acceptedStatistically': { label: 'Batch accepted statistically' },
+  'mechanical.windSpanM': { label: 'Wind span', unit: 'm', quantity: 'length-m', atLeast: 0 },
+  'mechanical.weightSpanM': { label: 'Weight span', unit: 'm', quantity: 'length-m' },
+  'mechanical.lineAngleDeg': { label: 'Line angle', unit: '°', atLeast: -180, atMost: 180 },
+  'mechanical.cases': { label: 'Load cases' },
+  'mechanical.cases.name': { label: 'Name' },
+  'mechanical.cases.kind': { label: 'Kind of case' },
+  'mechanical.cases.conductorWeightNPerM': { label: 'Conductor weight', unit: 'N/m', above: 0 },
+  'mechanical.cases.windPressurePa': { label: 'Wind pressure', unit: 'Pa', atLeast: 0 },
+  'mechanical.cases.conductorDiameterMm': {
+    label: 'Conductor diameter',
+    unit: 'mm',
+    quantity: 'length-mm',
+    above: 0,
+  },
+  'mechanical.cases.conductorTensionN': { label: 'Conductor tension', unit: 'N', quantity: 'force-n', atLeast: 0 },
+  'mechanical.cases.stringWindN': { label: 'Wind on the string', unit: 'N', quantity: 'force-n', atLeast: 0 },
+  'mechanical.cases.stringWeightN': { label: 'Weight of the string', unit: 'N', quantity: 'force-n', atLeast: 0 },
+  'mechanical.cases.hardwareWeightN': { label: 'Weight of the fittings', unit: 'N', quantity: 'force-n', atLeast: 0 },
 } as const satisfies Record<string, Field>;
 
 export type FieldPath = keyof typeof FIELDS;
 
-/** The field of a path, or undefined where the path names none. Widened, so that every property can be asked. */
+/**
+ * The field of a path, or undefined where the path names none. Widened, so that every property can be asked. Rows of a
+ * list share their fields: "mechanical.cases[2].kind" is that of "mechanical.cases.kind".
+ */
 export function fieldOf(path: string): Field | undefined {
-  return (FIELDS as Record<string, Field>)[path];
+  return (FIELDS as Record<string, Field>)[path.replace(/\[\d+\]/g, '')];
 }
 
 /** The words of every choice, by field name. */
@@ -122,6 +148,33 @@ export const CHOICE_LABELS = {
   fastFrontFrom: { level: 'Insulation level', string: 'String' },
   enGap: { window: 'Tower window', structure: 'Tower structure', obstacle: 'Obstacle' },
   safetySource: { 'rd-337': 'RD 337/2014 ITC-RAT 15', 'iec-61936-1': 'IEC 61936-1' },
+  mechanicalBasis: {
+    'rd-223': 'RD 223/2008',
+    'en-50341': 'EN 50341-1',
+    nesc: 'NESC',
+    rus: 'RUS 1724E-200',
+  },
+  loadCaseKind: {
+    everyday: 'Everyday',
+    wind: 'Wind',
+    ice: 'Ice',
+    district: 'District load',
+    extreme: 'Extreme wind or ice',
+    'broken-string': 'One string broken',
+  },
+  yesNo: { yes: 'Yes', no: 'No' },
+  bridgeCause: {
+    'rule-to-method': 'Rule to method',
+    pollution: 'Pollution',
+    'earth-fault': 'Earth fault',
+    altitude: 'Altitude',
+    'insulation-level': 'Insulation level',
+    surroundings: 'Surroundings',
+    'arcing-devices': 'Arcing devices',
+    unit: 'Unit',
+    minimum: 'Minimum',
+    'extra-units': 'Extra units',
+  },
   insulatorKind: {
     'cap-and-pin': 'Cap and pin',
     'ceramic-rod': 'Ceramic long rod',

@@ -5,7 +5,7 @@ import { fieldOf, type Field, type FieldPath } from './fields';
 
 type Limits = Pick<Field, 'above' | 'atLeast' | 'atMost' | 'whole'>;
 
-function labelOf(labelOrPath: string): string {
+export function labelOf(labelOrPath: string): string {
   return fieldOf(labelOrPath)?.label ?? labelOrPath;
 }
 

@@ -26,7 +26,9 @@ import {
   SURROUNDINGS,
   SWING_STATES,
 } from '../engine/model';
-import { dateText, list, oneOf, part, measure, measureOf, text, truth } from './parts';
+import { dateText, labelOf, list, oneOf, part, measure, measureOf, text, truth } from './parts';
+
+export const MOST_LOAD_CASES = 20;
 
 /**
  * The schema of a draft: what can be read at all. Every input may be missing or null; what the method makes of a
@@ -113,27 +115,27 @@ const clearance = part({
 });
 
 const mechanical = part({
-  basis: oneOf('Strength basis', MECHANICAL_BASES),
-  subconductors: measure('Sub-conductors', { atLeast: 1, atMost: 12, whole: true }),
-  crossing: truth('Crossing'),
-  acceptedStatistically: truth('Accepted statistically'),
-  windSpanM: measure('Wind span', { atLeast: 0 }),
-  weightSpanM: measure('Weight span', {}),
-  lineAngleDeg: measure('Line angle', { atLeast: -180, atMost: 180 }),
+  basis: oneOf('mechanical.basis', MECHANICAL_BASES),
+  subconductors: measureOf('mechanical.subconductors'),
+  crossing: truth(labelOf('mechanical.crossing')),
+  acceptedStatistically: truth(labelOf('mechanical.acceptedStatistically')),
+  windSpanM: measureOf('mechanical.windSpanM'),
+  weightSpanM: measureOf('mechanical.weightSpanM'),
+  lineAngleDeg: measureOf('mechanical.lineAngleDeg'),
   cases: list(
-    'Load cases',
+    labelOf('mechanical.cases'),
     part({
-      name: text('Name', 80),
-      kind: oneOf('Kind', LOAD_CASE_KINDS),
-      conductorWeightNPerM: measure('Conductor weight', { above: 0 }),
-      windPressurePa: measure('Wind pressure', { atLeast: 0 }),
-      conductorDiameterMm: measure('Conductor diameter', { above: 0 }),
-      conductorTensionN: measure('Conductor tension', { atLeast: 0 }),
-      stringWindN: measure('Wind on the string', { atLeast: 0 }),
-      stringWeightN: measure('Weight of the string', { atLeast: 0 }),
-      hardwareWeightN: measure('Weight of the fittings', { atLeast: 0 }),
+      name: text('mechanical.cases.name', 80),
+      kind: oneOf('mechanical.cases.kind', LOAD_CASE_KINDS),
+      conductorWeightNPerM: measureOf('mechanical.cases.conductorWeightNPerM'),
+      windPressurePa: measureOf('mechanical.cases.windPressurePa'),
+      conductorDiameterMm: measureOf('mechanical.cases.conductorDiameterMm'),
+      conductorTensionN: measureOf('mechanical.cases.conductorTensionN'),
+      stringWindN: measureOf('mechanical.cases.stringWindN'),
+      stringWeightN: measureOf('mechanical.cases.stringWeightN'),
+      hardwareWeightN: measureOf('mechanical.cases.hardwareWeightN'),
     }),
-    20,
+    MOST_LOAD_CASES,
   ),
 });
 

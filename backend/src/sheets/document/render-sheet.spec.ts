@@ -147,6 +147,22 @@ describe('the sheet as PDF', () => {
     expect(words.join(' ')).not.toMatch(/undefined|null|NaN/);
   });
 
+  it('carries the bridge from the rule to the count, with signs', () => {
+    const { evaluation } = suspensionCase;
+    const bridge = [
+      { cause: 'rule-to-method', units: -1 },
+      { cause: 'pollution', units: 3 },
+      { cause: 'altitude', units: 0 },
+    ];
+    const ruleOfThumb = { ...evaluation.ruleOfThumb, bridge };
+    const sheet = layOutSheet(contentOf({ ...suspensionCase, evaluation: { ...evaluation, ruleOfThumb } }));
+    const words = flat(sheet.elements)
+      .map(({ marks }) => wordsOf(marks))
+      .join('|');
+    expect(words).toMatch(/Rule, 15 kV a disc.*15.*Rule to method.*−1.*14.*Pollution.*\+3.*17.*Specified.*17/);
+    expect(words).toContain('never the count');
+  });
+
   // Reading a PDF needs a program that not every machine has; what it reads is laid out and checked above in any case.
   if (PDFTOTEXT)
     it('says on paper what the content says', async () => {

@@ -28,6 +28,9 @@ export function plain(value: number | null | undefined): string {
   return /^\d+(\.\d+)?$/.test(text) ? figure(value, decimals) : String(value);
 }
 
+/** A difference with its sign; nothing has none. */
+export const signed = (value: number): string => (value > 0 ? `+${plain(value)}` : plain(value));
+
 /** A figure with its unit, or the words for a missing one. */
 export const withUnit = (text: string, unit: string): string =>
   text === UNKNOWN || unit === '' ? text : `${text} ${unit}`;

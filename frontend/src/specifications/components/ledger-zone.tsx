@@ -1,6 +1,7 @@
 import type { InsulatorUnit } from '@bellgap/common/api';
 import { memo } from 'react';
 import type { Answer } from '../hooks/use-live-evaluation';
+import { BridgeBlock } from './bridge-block';
 import { CautionsBlock, NotAssessedBlock, StandingCautions } from './cautions-block';
 import { ClearanceBlocks } from './clearance-blocks';
 import { CreepageBlock } from './creepage-block';
@@ -8,6 +9,7 @@ import { CriteriaBlock } from './criteria-block';
 import { LengthsBlock } from './lengths-block';
 import { TestLevelsBlock, UnitsOutBlock } from './proof-blocks';
 import { RuleCards } from './rule-cards';
+import { VoltageBlock } from './voltage-block';
 
 interface Properties {
   answer: Answer;
@@ -26,6 +28,7 @@ export const LedgerZone = memo(function LedgerZone({ answer, unit }: Properties)
           <CautionsBlock evaluation={evaluation} />
           <CreepageBlock evaluation={evaluation} input={input} />
           <LengthsBlock evaluation={evaluation} />
+          <VoltageBlock evaluation={evaluation} />
         </>
       )}
       {!isLine && <CautionsBlock evaluation={evaluation} />}
@@ -33,6 +36,7 @@ export const LedgerZone = memo(function LedgerZone({ answer, unit }: Properties)
       <UnitsOutBlock evaluation={evaluation} />
       <TestLevelsBlock evaluation={evaluation} />
       <RuleCards evaluation={evaluation} />
+      <BridgeBlock evaluation={evaluation} />
       <NotAssessedBlock evaluation={evaluation} />
       <StandingCautions />
       <p className="zone-note">Method {evaluation.methodEdition}</p>

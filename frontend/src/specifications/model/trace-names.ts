@@ -32,6 +32,8 @@ const LINES: readonly (readonly [figure: RegExp, line: RegExp])[] = [
   [/^string\.sectionLengthMm$/, /^string\.section-length/],
   [/^string\.stringLengthWithFittings$/, /^string\.(spacing-tolerance|section-length|length)/],
   [/^string\.dryArcRequiredMm$/, /^air-gaps\.(lightning|switching)-dry-arc|^air-gaps\.fifty-percent-voltage/],
+  [/^string\.(voltageSharing|efficiencyPercent)$/, /^string-voltage\./],
+  [/^mechanical(\.|$)/, /^mechanical\./],
   [/^string\.coordination$/, /^string\.external-clearance/],
   [/^string\.testLevels\.lightning$/, /^(string\.test-level|atmosphere\.altitude-factor):(string-)?lightning$/],
   [/^string\.testLevels\.switching$/, /^(string\.test-level|atmosphere\.altitude-factor):(string-)?switching$/],

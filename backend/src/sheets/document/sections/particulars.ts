@@ -1,6 +1,7 @@
+import type { StringResult } from '@bellgap/common/api';
 import { heading, type Block } from '../blocks';
 import type { SheetContent } from '../content';
-import { inputWords, near, NOT_STATED } from '../words';
+import { down, inputWords, near, NOT_STATED, up } from '../words';
 
 /** What a buyer would otherwise have to ask: each a value or said to be not stated, never blank. */
 export function particulars({ input, evaluation }: SheetContent): Block[] {
@@ -22,6 +23,7 @@ export function particulars({ input, evaluation }: SheetContent): Block[] {
           label: 'Fault current and its time',
           value: fault.every((words) => words === NOT_STATED) ? NOT_STATED : fault.join(' for '),
         },
+        { label: 'Voltage along the string', value: sharingWords(evaluation.string) },
         { label: 'Puncture or steep-front test', value: NOT_STATED },
         { label: 'Locking device', value: NOT_STATED },
         { label: 'Corrosion class, for pollution type B', value: NOT_STATED },
@@ -34,4 +36,13 @@ export function particulars({ input, evaluation }: SheetContent): Block[] {
       ],
     },
   ];
+}
+
+function sharingWords(string: StringResult | null): string {
+  const lineEnd = string?.voltageSharing[0];
+  if (!string || lineEnd === undefined) return NOT_STATED;
+  const share = `${up(lineEnd, 1)} % across the unit at the line end`;
+  const efficiency =
+    string.efficiencyPercent === null ? '' : `, string efficiency ${down(string.efficiencyPercent, 1)} %`;
+  return `${share}${efficiency}; it concerns corona, radio noise and ageing, never the count`;
 }

@@ -1,0 +1,59 @@
+import { render, screen, within } from '@testing-library/react';
+import { anEvaluation } from '../testing/fake-server';
+import { BridgeBlock } from './bridge-block';
+import { VoltageBlock } from './voltage-block';
+
+const ruleOfThumb = (given: Partial<ReturnType<typeof anEvaluation>['ruleOfThumb']>) => ({
+  ruleOfThumb: { rows: [], bridge: null, bridgeWhyNot: null, ...given },
+});
+
+describe('from the rule to the count', () => {
+  const bridge = [
+    { cause: 'rule-to-method', units: -1 },
+    { cause: 'pollution', units: 7 },
+    { cause: 'altitude', units: 0 },
+    { cause: 'unit', units: -4 },
+  ];
+
+  it('is a table whose steps add up from the rule to what is specified', () => {
+    render(<BridgeBlock evaluation={anEvaluation(17, ruleOfThumb({ bridge }))} />);
+    const rows = screen.getAllByRole('row').map((row) => row.textContent);
+    expect(rows.slice(1)).toEqual([
+      'Rule1515',
+      'Rule to method−114',
+      'Pollution+721',
+      'Altitude021',
+      'Unit−417',
+      'Specified1717',
+    ]);
+  });
+
+  it('says why there is none, and stands back where there is nothing to say', () => {
+    const { rerender, container } = render(
+      <BridgeBlock evaluation={anEvaluation(1, ruleOfThumb({ bridgeWhyNot: 'The string is a rod.' }))} />,
+    );
+    expect(screen.getByText('no bridge: the string is a rod.')).toBeInTheDocument();
+    rerender(<BridgeBlock evaluation={anEvaluation(17, ruleOfThumb({}))} />);
+    expect(container).toBeEmptyDOMElement();
+  });
+});
+
+describe('voltage along the string', () => {
+  it('names the line end, the efficiency and what they concern', () => {
+    render(<VoltageBlock evaluation={anEvaluation(17)} />);
+    const [lineEnd] = anEvaluation(17).string!.voltageSharing;
+    const row = screen.getByText('Across the unit at the line end').closest('div')!;
+    expect(within(row).getByText((Math.ceil(lineEnd! * 10) / 10).toFixed(1))).toBeInTheDocument();
+    expect(screen.getByText('Concerns corona, radio noise and ageing, never the count.')).toBeInTheDocument();
+  });
+
+  it('says why it was not assessed', () => {
+    const { string } = anEvaluation(17);
+    const evaluation = anEvaluation(17, {
+      string: string && { ...string, voltageSharing: [], efficiencyPercent: null },
+      notAssessed: [{ part: 'string.voltageSharing', why: 'The network describes cap and pin units.' }],
+    });
+    render(<VoltageBlock evaluation={evaluation} />);
+    expect(screen.getByText(/not assessed: the network describes/)).toBeInTheDocument();
+  });
+});
