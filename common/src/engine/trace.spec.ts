@@ -1,23 +1,10 @@
-import * as airGaps from './air-gaps';
-import * as atmosphere from './atmosphere';
-import * as clearances from './clearances/formulas';
-import * as stringFormulas from './insulator-string/formulas';
-import * as overvoltage from './overvoltage';
+import { ALL_FORMULAS, type AnyFormula } from './all-formulas';
 import * as pollution from './pollution';
-import * as stringVoltage from './string-voltage';
 import { unitOf } from './quantities';
 import { cite, DEFINITION } from './sources';
 import { IEC_TS_60815_USCD } from './standards';
 import { evaluateExpression } from './testing/expression';
-import { Calculation, figureText, formula, type Formula } from './trace';
-
-type AnyFormula = Formula<Record<string, number>>;
-
-const ROOMS = { airGaps, atmosphere, clearances, overvoltage, pollution, stringFormulas, stringVoltage };
-
-const FORMULAS: AnyFormula[] = Object.values(ROOMS)
-  .flatMap((room) => Object.values(room) as unknown[])
-  .filter((one): one is AnyFormula => typeof one === 'function' && 'definition' in one);
+import { Calculation, figureText, formula } from './trace';
 
 /** Figures for a formula: the ends of its range where it has one, else a few of ordinary size. */
 function samples({ definition }: AnyFormula): Record<string, number>[] {
@@ -35,10 +22,10 @@ function samples({ definition }: AnyFormula): Record<string, number>[] {
 
 describe('formulas', () => {
   it('are found', () => {
-    expect(FORMULAS.length).toBeGreaterThan(25);
+    expect(ALL_FORMULAS.length).toBeGreaterThan(25);
   });
 
-  it.each(FORMULAS.map((one) => [one.definition.id, one] as const))('%s runs what it shows', (_id, one) => {
+  it.each(ALL_FORMULAS.map((one) => [one.definition.id, one] as const))('%s runs what it shows', (_id, one) => {
     const { expression, symbols, result } = one.definition;
     const [, ...right] = expression.split(' = ');
     for (const figures of samples(one)) {
@@ -53,7 +40,7 @@ describe('formulas', () => {
   });
 
   it('have ids of their own', () => {
-    const ids = FORMULAS.map(({ definition }) => definition.id);
+    const ids = ALL_FORMULAS.map(({ definition }) => definition.id);
     expect(new Set(ids).size).toBe(ids.length);
   });
 });
