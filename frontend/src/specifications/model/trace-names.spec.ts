@@ -27,6 +27,11 @@ const lines = [
   'clearances.empirical:phase-to-earth:Del',
   'atmosphere.line-altitude-factor:Del phase to earth at the site',
   'clearances.row:en-empirical:phase-to-earth:Del',
+  'clearances.fast-front-voltage:en-theoretical:fast-front',
+  'atmosphere.line-altitude-factor:en-theoretical:phase-to-earth:fast-front',
+  'air-gaps.fast-front-distance:en-theoretical:phase-to-earth:fast-front',
+  'clearances.row:en-theoretical:phase-to-earth:fast-front:window',
+  'air-gaps.fast-front-distance:en-theoretical:phase-to-phase:fast-front',
 ].map(line);
 const ids = (name: string) => traceLinesOf(name, lines).map(({ id }) => id);
 
@@ -55,6 +60,8 @@ describe('the working behind a figure', () => {
     ]);
     const empirical = clearanceName({ method: 'en-empirical', distance: 'phase-to-earth', stress: 'Del', shape: null });
     expect(ids(empirical)).toHaveLength(3);
+    const gap = { method: 'en-theoretical', distance: 'phase-to-earth', stress: 'fast-front', shape: 'window' } as const;
+    expect(ids(clearanceName(gap))).toHaveLength(4);
   });
 
   it('knows which figures have working', () => {

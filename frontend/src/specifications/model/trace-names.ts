@@ -70,14 +70,18 @@ function isOfRow(name: string, id: string): boolean {
   const [method = '', distance = '', stress = '', shape] = name.slice(ROW.length).split(':');
   const use = id.slice(id.indexOf(':') + 1);
   const words = DISTANCE_WORDS[distance] ?? distance;
-  if (method === 'iec-table') {
+  if (method === 'iec-table' && distance !== 'safety') {
     return (
       use === [distance, stress, shape].join(':') ||
       use === `clearance ${words}, ${stress}, ${shape}` ||
       (id === 'overvoltage.switching-between-phases' && distance === 'phase-to-phase' && stress === 'switching')
     );
   }
-  return use === `${distance}:${stress}` || use.startsWith(`${stress} ${words}`);
+  if (method === 'en-empirical') return use === `${distance}:${stress}` || use.startsWith(`${stress} ${words}`);
+  const rest = [stress, ...(shape === undefined ? [] : [shape])].join(':');
+  const uses = [`${method}:${distance}:${rest}`, `${method}:${distance}:${stress}`, `${method}:${stress}`];
+  const isOfDecree = distance === 'safety' && use.startsWith('safety');
+  return uses.includes(use) || isOfDecree;
 }
 
 export function hasTrace(name: string): boolean {

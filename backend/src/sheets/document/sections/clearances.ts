@@ -50,8 +50,8 @@ function clearanceRow(row: ClearanceRow): Row {
     governs: row.governs,
     cells: [
       cell(row.governs ? `${method}, governs` : method),
-      cell(STRESS_WORDS[row.stress] ?? row.stress),
-      cell(row.shape === null ? '–' : (SHAPE_WORDS[row.shape] ?? row.shape)),
+      cell(STRESS_WORDS[row.stress] ?? row.stress.replaceAll('-', ' ')),
+      cell(row.shape === null ? '–' : (SHAPE_WORDS[row.shape] ?? row.shape.replaceAll('-', ' '))),
       figures(plain(row.withstandKv)),
       figures(near(row.altitudeFactor, 3)),
       figures(value),
