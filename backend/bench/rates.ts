@@ -22,7 +22,8 @@ export function inTurn(work: (step: number) => unknown): Side {
   };
 }
 
-const WARM_UP_MS = 1500;
+/** A server is warm after some thousand requests. */
+const WARM_UP_MS = 4000;
 const ROUNDS = 5;
 const STRETCH_MS = 1200;
 

@@ -1,5 +1,5 @@
 import { execFileSync } from 'node:child_process';
-import { existsSync, mkdirSync, mkdtempSync, readdirSync, rmSync } from 'node:fs';
+import { chmodSync, existsSync, mkdirSync, mkdtempSync, readdirSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import type { Figure } from './harness';
@@ -49,6 +49,8 @@ export const startFigures: readonly Figure[] = [
     aim: { valueAtMost: 10 },
     measure: () => {
       const folder = mkdtempSync(path.join(tmpdir(), 'bellgap-start-'));
+      // The database's user must be able to pass through.
+      chmodSync(folder, 0o755);
       try {
         copyTo(folder);
         make(folder, 'start');

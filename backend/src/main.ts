@@ -1,13 +1,14 @@
 import { NestFactory } from '@nestjs/core';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { AppModule } from './app.module';
+import { ApiAdapter } from './platform/api-adapter';
 import { loadConfig } from './platform/config';
 import { ConfigError } from './platform/config-values';
 import { configureApp } from './platform/configure-app';
 
 async function main(): Promise<void> {
   const config = loadConfig(process.env);
-  const app = await NestFactory.create<NestExpressApplication>(AppModule.with({ config }), {
+  const app = await NestFactory.create<NestExpressApplication>(AppModule.with({ config }), new ApiAdapter(), {
     bodyParser: false,
     logger: ['error', 'warn'],
   });

@@ -11,6 +11,8 @@ import { SessionsRepository, type SessionRow, type StoredSession } from './sessi
 const MINUTE_MS = 60_000;
 export const SESSION = { idleMs: 60 * MINUTE_MS, absoluteMs: 12 * 60 * MINUTE_MS, touchMs: MINUTE_MS } as const;
 
+const TOKENS_AT_MOST = 5000;
+
 export interface Client {
   address: string | null;
   userAgent: string | null;
@@ -19,6 +21,8 @@ export interface Client {
 @Injectable()
 export class SessionsService {
   private readonly cache = new SessionCache();
+  /** Tokens whose signature was found good: it stays good until they expire. */
+  private readonly tokens = new Map<string, { id: string; expiresAtS: number }>();
 
   constructor(
     private readonly sessions: SessionsRepository,
@@ -73,12 +77,18 @@ export class SessionsService {
   }
 
   private idOf(token: string, now: Date): string | null {
+    const known = this.tokens.get(token);
+    if (known && known.expiresAtS > seconds(now)) return known.id;
+    this.tokens.delete(token);
     try {
-      const { sid } = this.jwt.verify<{ sid?: unknown }>(token, {
+      const { sid, exp } = this.jwt.verify<{ sid?: unknown; exp?: unknown }>(token, {
         algorithms: ['HS256'],
         clockTimestamp: seconds(now),
       });
-      return typeof sid === 'string' && isUuid(sid) ? sid : null;
+      if (typeof sid !== 'string' || !isUuid(sid) || typeof exp !== 'number') return null;
+      if (this.tokens.size >= TOKENS_AT_MOST) this.tokens.clear();
+      this.tokens.set(token, { id: sid, expiresAtS: exp });
+      return sid;
     } catch {
       return null;
     }

@@ -5,6 +5,7 @@ import express from 'express';
 import helmet from 'helmet';
 import type { Config } from './config';
 import { refuseForeignRequests, refuseUnreadableAddresses } from './request-guards';
+import { lineBatch } from './line-batch';
 import { requestLog } from './request-log';
 import { staticPages } from './static-pages';
 
@@ -17,7 +18,7 @@ export function configureApp(app: NestExpressApplication, config: Config): void 
   app.set('etag', false);
   app.set('query parser', 'simple');
   if (config.trustProxy) app.set('trust proxy', config.trustProxy);
-  app.use(requestLog(config.requestLog ? (line) => process.stdout.write(line) : null));
+  app.use(requestLog(config.requestLog ? lineBatch((text) => process.stdout.write(text)) : null));
   app.use(headers(config));
   app.use(compression({ threshold: 1024 }));
   app.use(refuseUnreadableAddresses);

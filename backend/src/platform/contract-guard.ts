@@ -1,43 +1,34 @@
-import { Injectable, type CallHandler, type ExecutionContext, type NestInterceptor } from '@nestjs/common';
-import { Reflector } from '@nestjs/core';
-import type { Response } from 'express';
-import { map, type Observable } from 'rxjs';
+import type { CanActivate, ExecutionContext } from '@nestjs/common';
+import type { Request, Response } from 'express';
 import * as yup from 'yup';
 import type { EndpointDefinition } from '@bellgap/common/api';
 import { invalidAt } from './domain-error';
-import { ENDPOINT, type VersionedRequest } from './route';
-import { Versioned, etagOf, readIfMatch } from './versions';
+import { readIfMatch } from './versions';
 import { assertValid } from './yup-validation';
 
 const NOTHING = yup.object({}).noUnknown();
 
-/** Holds each request against its endpoint of the contract, and gives versioned answers their ETag. */
-@Injectable()
-export class ContractInterceptor implements NestInterceptor {
-  constructor(private readonly reflector: Reflector) {}
+/** A request whose If-Match has been read. */
+export type VersionedRequest = Request & { ifMatchVersion?: number };
 
-  intercept(context: ExecutionContext, next: CallHandler): Observable<unknown> {
-    const endpoint = this.reflector.get<EndpointDefinition | undefined>(ENDPOINT, context.getHandler());
-    if (!endpoint) return next.handle();
+/** Holds each request against its endpoint of the contract. It stands on the route, so that access is decided before. */
+export class ContractGuard implements CanActivate {
+  constructor(private readonly endpoint: EndpointDefinition) {}
+
+  canActivate(context: ExecutionContext): boolean {
     const request = context.switchToHttp().getRequest<VersionedRequest>();
-    const response = context.switchToHttp().getResponse<Response>();
-    if (endpoint.ifMatch) request.ifMatchVersion = readIfMatch(request.get('if-match'));
-    checkQuery(endpoint, request.query);
-    checkBody(endpoint, request.body);
-    response.setHeader('Cache-Control', 'no-store');
-    return next.handle().pipe(
-      map((answer: unknown) => {
-        if (!(answer instanceof Versioned)) return answer;
-        response.setHeader('ETag', etagOf(answer.version));
-        return answer.answer as unknown;
-      }),
-    );
+    if (this.endpoint.ifMatch) request.ifMatchVersion = readIfMatch(request.get('if-match'));
+    checkQuery(this.endpoint, request.query);
+    checkBody(this.endpoint, request.body);
+    context.switchToHttp().getResponse<Response>().setHeader('Cache-Control', 'no-store');
+    return true;
   }
 }
 
-function checkQuery({ query, file }: EndpointDefinition, given: unknown): void {
+function checkQuery({ query, file }: EndpointDefinition, given: object): void {
+  if (query) assertValid(query, { ...given });
   // Addresses of files are opened by browsers and viewers, which may add parameters of their own.
-  if (query || !file) assertValid(query ?? NOTHING, { ...(given as object) });
+  else if (!file && Object.keys(given).length > 0) assertValid(NOTHING, { ...given });
 }
 
 function checkBody({ body }: EndpointDefinition, given: unknown): void {

@@ -1,10 +1,9 @@
 import { Global, Inject, Module, type DynamicModule, type OnApplicationShutdown } from '@nestjs/common';
-import { APP_FILTER, APP_INTERCEPTOR } from '@nestjs/core';
+import { APP_FILTER } from '@nestjs/core';
 import type { Knex } from 'knex';
 import { createKnex } from '@bellgap/database';
 import { Clock, SystemClock } from './clock';
 import { CONFIG, type Config } from './config';
-import { ContractInterceptor } from './contract-interceptor';
 import { KNEX } from './knex';
 import { ProblemFilter } from './problem-filter';
 
@@ -27,7 +26,6 @@ export class PlatformModule implements OnApplicationShutdown {
         { provide: Clock, useValue: clock },
         { provide: KNEX, useFactory: () => createKnex({ url: config.databaseUrl, poolMax: config.databasePoolMax }) },
         { provide: APP_FILTER, useClass: ProblemFilter },
-        { provide: APP_INTERCEPTOR, useClass: ContractInterceptor },
       ],
       exports: [CONFIG, Clock, KNEX],
     };

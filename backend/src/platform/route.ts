@@ -3,12 +3,13 @@ import {
   RequestMapping,
   RequestMethod,
   SetMetadata,
+  UseGuards,
   createParamDecorator,
   type ExecutionContext,
   type StreamableFile,
 } from '@nestjs/common';
-import type { Request } from 'express';
 import { API_PREFIX, type AnswerOf, type EndpointDefinition } from '@bellgap/common/api';
+import { ContractGuard, type VersionedRequest } from './contract-guard';
 import type { Versioned } from './versions';
 
 export const ENDPOINT = Symbol('endpoint');
@@ -37,13 +38,12 @@ export function Route<E extends EndpointDefinition>(endpoint: E) {
     RequestMapping({ path, method: RequestMethod[endpoint.method] })(target, key, descriptor);
     HttpCode(endpoint.success)(target, key, descriptor);
     SetMetadata(ENDPOINT, endpoint)(target, key, descriptor);
+    UseGuards(new ContractGuard(endpoint))(target, key, descriptor);
   };
 }
 
 /** A route outside the contract that strangers may call. */
 export const Open = () => SetMetadata(OPEN, true);
-
-export type VersionedRequest = Request & { ifMatchVersion?: number };
 
 /** Version that the request was made from, of an endpoint that asks for If-Match. */
 export const IfMatch = createParamDecorator((_: unknown, context: ExecutionContext): number => {

@@ -7,6 +7,7 @@ import type { NestExpressApplication } from '@nestjs/platform-express';
 import { createTestDatabase, type TestDatabase } from '@bellgap/database';
 import { contract } from '@bellgap/common/api';
 import { AppModule } from '../../src/app.module';
+import { ApiAdapter } from '../../src/platform/api-adapter';
 import { loadConfig } from '../../src/platform/config';
 import { configureApp } from '../../src/platform/configure-app';
 import { People, type NewPerson, type TestPerson } from './people';
@@ -38,7 +39,7 @@ export class TestApp {
       FRONTEND_FOLDER: frontendFolder,
       ...env,
     });
-    const app = await NestFactory.create<NestExpressApplication>(AppModule.with({ config, clock }), {
+    const app = await NestFactory.create<NestExpressApplication>(AppModule.with({ config, clock }), new ApiAdapter(), {
       bodyParser: false,
       logger: ['error', 'warn'],
       abortOnError: false,
