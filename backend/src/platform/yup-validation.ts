@@ -1,14 +1,12 @@
 import { ValidationError, type AnySchema } from 'yup';
 import type { FieldError } from '@bellgap/common/api';
 import { invalid } from './domain-error';
-import { isPlainlyValid } from './quick-check';
 
 /** More would help nobody, and a large body must not make a larger answer. */
 const FAULTS_AT_MOST = 100;
 
 /** Every fault of a value, one entry per unknown field with its full path; nothing is converted. */
 export function faultsOf(schema: AnySchema, value: unknown): FieldError[] {
-  if (isPlainlyValid(schema, value)) return [];
   const faults = unknownFields(schema, value, '', []);
   try {
     schema.validateSync(value, { strict: true, abortEarly: false });
