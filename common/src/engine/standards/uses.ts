@@ -7,12 +7,7 @@ export const TABLE_USES: Record<string, string> = {
   'iec-60071-1:a3': 'Clearances by the table method: switching, between phases, above 245 kV',
   'iec-ts-60815:uscd': 'Required creepage and with it the units that pollution asks for',
   'iec-60305:units': 'Catalogue: cap and pin units and their strength classes',
-  'iec-60433:classes': 'Next strength class and coupling of ceramic long rods',
-  'iec-61466-1:classes': 'Next strength class and end fittings of composite units',
   'ansi-c29.2:units': 'Catalogue: suspension units and their strength classes, North American basis',
-  'iec-60433:classes': 'Strength class that a string of ceramic long rods calls for',
-  'iec-61466-1:classes': 'Strength class that a composite string calls for',
-  'rus-1724e-200:insulator-strength': 'Allowed load of a string by NESC and RUS, and routine test load of composite',
   'string-flashover-254x146': 'Units that the power-frequency withstand asks for, discs of 254 x 146 mm',
   'en-50341-1:clearances': 'Clearances of a line by the empirical method',
   'en-50341-1:altitude': 'Strength of air gaps at altitude, line methods only',
@@ -25,7 +20,6 @@ export const TABLE_USES: Record<string, string> = {
   'rus-1724e-200:suspension-levels': 'Least number of units by voltage, North American basis',
   'rus-1724e-200:contamination': 'Required leakage by contamination level, North American basis',
   'rus-1724e-200:swing-clearances': 'Clearances of a swung conductor, North American basis',
-  'rus-1724e-200:insulator-strength': 'Load that the strength bases NESC and RUS allow on an insulator',
   'trade:disc-counts': 'Rule-of-thumb cards, for checking only',
 };
 
