@@ -60,7 +60,12 @@ describe('the working behind a figure', () => {
     ]);
     const empirical = clearanceName({ method: 'en-empirical', distance: 'phase-to-earth', stress: 'Del', shape: null });
     expect(ids(empirical)).toHaveLength(3);
-    const gap = { method: 'en-theoretical', distance: 'phase-to-earth', stress: 'fast-front', shape: 'window' } as const;
+    const gap = {
+      method: 'en-theoretical',
+      distance: 'phase-to-earth',
+      stress: 'fast-front',
+      shape: 'window',
+    } as const;
     expect(ids(clearanceName(gap))).toHaveLength(4);
   });
 
