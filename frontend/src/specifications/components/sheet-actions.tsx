@@ -1,6 +1,6 @@
 import { contract, type Revision } from '@bellgap/common/api';
 import { Button } from 'antd';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { failureText } from '../../api/api-error';
 import { addressOf, call } from '../../api/client';
 import { paramsOf, type RevisionAddress } from '../queries/use-revision';
@@ -12,6 +12,8 @@ interface Properties {
   beforeDrawing: () => Promise<boolean>;
   /** The content as it stands in the form; another one makes the last sheet an older one. */
   contentKey: string;
+  /** Further acts, beside drawing the sheet. */
+  children?: ReactNode;
 }
 
 function openFile(href: string, name: string): void {
@@ -24,7 +26,7 @@ function openFile(href: string, name: string): void {
 }
 
 /** Draws the sheet as PDF on request and downloads it; the last one drawn stays to be had. */
-export function SheetActions({ address, lastSheet, beforeDrawing, contentKey }: Properties) {
+export function SheetActions({ address, lastSheet, beforeDrawing, contentKey, children }: Properties) {
   const [isDrawing, setDrawing] = useState(false);
   const [failure, setFailure] = useState<string | null>(null);
   const [drawnKey, setDrawnKey] = useState(lastSheet?.current ? contentKey : null);
@@ -58,6 +60,7 @@ export function SheetActions({ address, lastSheet, beforeDrawing, contentKey }: 
           last sheet{drawnKey !== contentKey && ', before the latest changes'}
         </a>
       )}
+      {children}
       <Button type="primary" loading={isDrawing} onClick={() => void draw()}>
         Preview sheet
       </Button>

@@ -26,6 +26,7 @@ import { KeptNotice, NewerBasis } from './notices';
 import { SavingWords } from './saving-words';
 import { SheetActions } from './sheet-actions';
 import { TitleBlock } from './title-block';
+import { WhatIfAction } from './what-if';
 import './specification.css';
 
 const NOT_SAVED = 'The draft has to be saved before it can rest on the newer basis; see what is marked.';
@@ -166,7 +167,9 @@ export function SpecificationEditor({ first }: Properties) {
                 lastSheet={first.lastSheet}
                 beforeDrawing={() => (readOnly ? Promise.resolve(true) : save(false))}
                 contentKey={key}
-              />
+              >
+                {input.kind !== 'bay' && <WhatIfAction address={address} answer={live.answer} unit={unit} />}
+              </SheetActions>
             </div>
             {offered && (
               <KeptNotice

@@ -1,4 +1,4 @@
-import type { Evaluation, Revision, SpecificationInput } from '@bellgap/common/api';
+import type { Evaluation, Revision, RevisionNote, SpecificationInput, Sweep, WhatIf } from '@bellgap/common/api';
 import { suspensionCase, discUnit } from '@bellgap/common/drawing/fixtures';
 import { aDesignBasis, aPerson } from '../../testing/builders';
 
@@ -69,6 +69,9 @@ export class FakeServer {
   /** Null stands for a server that takes the draft. */
   refuseSave: (() => Answered) | null = null;
   isCutOff = false;
+  whatIf: WhatIf = { cases: [] };
+  sweep: Sweep = { cells: [] };
+  notes: RevisionNote[] = [];
 
   saves(): Asked[] {
     return this.asked.filter(({ method }) => method === 'PUT');
@@ -111,6 +114,9 @@ export class FakeServer {
       const answer = await this.evaluate(body as EvaluationBody);
       return 'status' in answer ? answer : { status: 200, body: answer };
     }
+    if (path === '/evaluations/what-if') return { status: 200, body: this.whatIf };
+    if (path === '/evaluations/sweep') return { status: 200, body: this.sweep };
+    if (path.includes('/notes')) return this.answerNotes(method, path, body as Partial<RevisionNote>);
     if (method === 'PUT') return this.refuseSave?.() ?? this.take(body as Partial<Revision>);
     if (path.endsWith('/basis')) {
       this.revision = {
@@ -121,6 +127,17 @@ export class FakeServer {
       };
     }
     return { status: 200, body: this.revision };
+  }
+
+  private answerNotes(method: string, path: string, body: Partial<RevisionNote>): Answered {
+    if (method === 'GET') return { status: 200, body: this.notes };
+    if (method === 'DELETE') {
+      this.notes = this.notes.filter(({ id }) => !path.endsWith(`/${id}`));
+      return { status: 204, body: undefined };
+    }
+    const note = { id: 'note-1', writtenBy: 'Tamsin Orvelle', writtenAt: '2026-03-12T10:00:00Z', own: true, ...body };
+    this.notes = [note as RevisionNote, ...this.notes];
+    return { status: 201, body: note };
   }
 
   private take(body: Partial<Revision>): Answered {
