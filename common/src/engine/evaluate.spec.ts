@@ -2,6 +2,7 @@ import { evaluate } from './evaluate';
 import { METHOD_EDITION } from './method-edition';
 import type { Evaluation, EvaluationContext } from './model';
 import { unitOf } from './quantities';
+import { mechanicalLoads } from './testing/loads';
 import { aContext, aLine, companySettings, rangeOneLevel, rangeTwoLevel } from './testing/specifications';
 
 const isStopped = ({ cautions }: Evaluation): boolean => cautions.some(({ severity }) => severity === 'stop');
@@ -133,10 +134,16 @@ describe(evaluate.name, () => {
       'parallelStrings',
       'rodsInSeries',
       'voltageSharing',
+      'subconductors',
+      'factorRequired',
+      'factorProvided',
     ]);
     const named = (value: unknown): string[] =>
       numbersOf(value).map(([path]) => path.split('.').findLast((step) => Number.isNaN(Number(step)))!);
-    const input = aLine({ system: { insulationLevel: rangeOneLevel(275, 650) }, string: { hardwareLengthMm: 400 } });
+    const input = aLine(
+      { system: { insulationLevel: rangeOneLevel(275, 650) }, string: { hardwareLengthMm: 400 } },
+      { mechanical: mechanicalLoads() },
+    );
     const unnamed = [...named(input), ...named(evaluate(input, aContext()))].filter(
       (name) => unitOf(name) === null && !exceptions.has(name),
     );

@@ -1,10 +1,12 @@
 import { assessClearances, type StringBeside } from './clearances';
 import { assessString } from './insulator-string';
+import { assessMechanical } from './mechanical';
 import { METHOD_EDITION } from './method-edition';
 import type {
   Evaluation,
   EvaluationContext,
   InsulatorUnit,
+  MechanicalResult,
   PollutionClass,
   SpecificationInput,
   StringInput,
@@ -73,11 +75,25 @@ function stringBeside(
   return { string, unit, rods: rodsOf(string, unit), dryArcMm: result?.dryArcMm ?? null };
 }
 
+/** Loads and strength; null where no loads are filled in, which a line's sheet says. */
+function mechanicalOf(
+  input: SpecificationInput,
+  situation: Situation,
+  { insulator: unit }: EvaluationContext,
+  calculation: Calculation,
+): MechanicalResult | null {
+  const { mechanical } = input;
+  if (isKnown(mechanical)) {
+    return assessMechanical({ mechanical, string: input.string ?? null, unit, situation }, calculation);
+  }
+  if (input.kind !== 'bay') calculation.missing('mechanical', NOT_FILLED_IN);
+  return null;
+}
+
 /** Parts that this edition does not compute: said so where given, and where a line or a bay would need them. */
 function uncoveredParts(input: SpecificationInput, calculation: Calculation): void {
   const line = input.kind !== 'bay';
   const parts = [
-    ['mechanical', line],
     ['towerHead', line],
     ['midSpan', line],
     ['bay', input.kind === 'bay'],
@@ -127,6 +143,7 @@ export function evaluate(
   );
   const pollution = input.site?.pollution;
   const pollutionClass: PollutionClass | null = isKnown(pollution) && 'class' in pollution ? pollution.class : null;
+  const mechanical = mechanicalOf(input, situation, context, calculation);
   uncoveredParts(input, calculation);
   const cards = ruleOfThumb(
     { situation, pollutionClass, unit: context.insulator, string, clearances, settings: context.settings },
@@ -138,6 +155,7 @@ export function evaluate(
     notAssessed: calculation.notAssessed,
     string,
     clearances,
+    mechanical,
     ruleOfThumb: cards,
     cautions: calculation.cautions,
     trace: calculation.lines,

@@ -444,6 +444,37 @@ export interface ClearancesResult {
   rows: ClearanceRow[];
 }
 
+/** One load case: loads of the whole set, and what one string of it carries. */
+export interface MechanicalCaseResult {
+  name: string;
+  kind: LoadCaseInput['kind'];
+  verticalN: number | null;
+  /** Across the line for suspension, along it for tension. */
+  horizontalN: number | null;
+  loadPerStringN: number | null;
+  /** With one string of the set missing; null where the set has none to lose. */
+  loadOneStringMissingN: number | null;
+  /** Strength over load that the basis asks for. */
+  factorRequired: number | null;
+  /** Strength of the chosen unit over the larger of the two loads. */
+  factorProvided: number | null;
+  /** The lee leg of a V carries nothing. */
+  slackLeg: boolean;
+  verdict: Verdict;
+}
+
+export interface MechanicalResult {
+  cases: MechanicalCaseResult[];
+  /** Name of the case that asks for the highest strength. */
+  governedBy: string | null;
+  /** Unrounded; null as long as one case has no figure. */
+  strengthRequiredKn: number | null;
+  /** The next standard class; null beyond the last one. */
+  classRequiredKn: number | null;
+  /** Coupling of that class. */
+  coupling: string | null;
+}
+
 export interface RuleOfThumbRow {
   id: string;
   rule: string;
@@ -485,6 +516,8 @@ export interface Evaluation {
   notAssessed: { part: string; why: string }[];
   string: StringResult | null;
   clearances: ClearancesResult | null;
+  /** Null where no mechanical loads are filled in. */
+  mechanical?: MechanicalResult | null;
   ruleOfThumb: {
     rows: RuleOfThumbRow[];
     bridge: { cause: string; units: number }[] | null;

@@ -16,6 +16,7 @@ export const IEC_TS_60815_3 = { document: 'IEC TS 60815-3', edition: '2008' } as
 export const IEC_60815 = { document: 'IEC 60815', edition: '1986' } as const;
 export const IEC_60305 = { document: 'IEC 60305', edition: '1995' } as const;
 export const IEC_60433 = { document: 'IEC 60433', edition: '1998' } as const;
+export const IEC_61466_1 = { document: 'IEC 61466-1', edition: '1997' } as const;
 export const IEC_60383_1 = { document: 'IEC 60383-1', edition: '1993' } as const;
 export const IEC_61936_1 = { document: 'IEC 61936-1', edition: '2010' } as const;
 export const ISO_2533 = { document: 'ISO 2533', edition: '1975' } as const;

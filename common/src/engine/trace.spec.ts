@@ -25,14 +25,14 @@ describe('formulas', () => {
     expect(ALL_FORMULAS.length).toBeGreaterThan(25);
   });
 
-  it.each(ALL_FORMULAS.map((one) => [one.definition.id, one] as const))('%s runs what it shows', (_id, one) => {
+  it.each(ALL_FORMULAS.map((one) => [one.definition.id, one] as const))('%s runs what it shows', async (_id, one) => {
     const { expression, symbols, result } = one.definition;
     const [, ...right] = expression.split(' = ');
     for (const figures of samples(one)) {
       const bySymbol = Object.fromEntries(
         Object.entries(symbols).map(([symbol, name]) => [symbol, figures[name] as number]),
       );
-      const shown = evaluateExpression(right.join(' = '), bySymbol);
+      const shown = await evaluateExpression(right.join(' = '), bySymbol);
       const run = one(figures);
       if (Number.isFinite(shown)) expect(run).toBeCloseTo(shown, 9);
     }

@@ -2,10 +2,19 @@ import { ATMOSPHERE } from './atmosphere';
 import { CREEPAGE } from './creepage';
 import { LEVELS_AND_CLEARANCES } from './levels-and-clearances';
 import { LINE_CLEARANCES } from './line-clearances';
+import { LOADS } from './loads';
 import { COUNTS_IN_SERVICE } from './rules-of-thumb';
 import { STRING_VOLTAGE } from './string-voltage';
 
-const TOPICS = { ATMOSPHERE, CREEPAGE, LEVELS_AND_CLEARANCES, LINE_CLEARANCES, COUNTS_IN_SERVICE, STRING_VOLTAGE };
+const TOPICS = {
+  ATMOSPHERE,
+  CREEPAGE,
+  LEVELS_AND_CLEARANCES,
+  LINE_CLEARANCES,
+  LOADS,
+  COUNTS_IN_SERVICE,
+  STRING_VOLTAGE,
+};
 
 describe.each(Object.entries(TOPICS))('published examples: %s', (_topic, examples) => {
   it('are there', () => {

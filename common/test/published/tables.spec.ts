@@ -119,6 +119,27 @@ const TRANSCRIPTIONS = [
     punctureKv: ['puncture_kv_rms', number],
     status: ['status', status],
   }),
+  transcribed('iec-60433-classes', standards.IEC_60433_CLASSES, {
+    failingLoadKn: ['failing_load_kn', number],
+    couplingIec60120: ['ball_socket', words],
+    status: ['status', status],
+  }),
+  transcribed('iec-61466-1-classes', standards.IEC_61466_1_CLASSES, {
+    failingLoadKn: ['sml_kn', number],
+    couplingIec60120: ['ball_socket', words],
+    clevisTongue: ['clevis_tongue', words],
+    yClevis: ['y_clevis', words],
+    eye: ['eye', words],
+    status: ['status', status],
+  }),
+  transcribed('insulator-strength', standards.INSULATOR_STRENGTH, {
+    rule: ['rule', words],
+    insulator: ['insulator', words],
+    action: ['action', words],
+    loadCase: ['load_case', words],
+    maximumRatio: ['max_fraction_of_rating', number],
+    status: ['status', status],
+  }),
   transcribed('string-flashover-254x146', standards.STRING_FLASHOVER_254X146, {
     units: ['units', number],
     stringLengthMm: ['string_length_mm', number],

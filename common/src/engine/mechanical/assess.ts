@@ -1,0 +1,183 @@
+import type {
+  InsulatorUnit,
+  LoadCaseInput,
+  MechanicalCaseResult,
+  MechanicalInput,
+  MechanicalResult,
+  StringInput,
+} from '../model';
+import { isKnown, reaches } from '../quantities';
+import type { Situation } from '../situation';
+import type { Calculation } from '../trace';
+import { strengthClass } from './classes';
+import { requiredFactor, routineTestRatio } from './factors';
+import { factorOnLoad, strengthForRoutineTest, strengthNeeded } from './formulas';
+import { caseLoads } from './loads';
+
+export interface Mechanical {
+  mechanical: MechanicalInput;
+  string: StringInput | null;
+  unit: InsulatorUnit | null;
+  situation: Situation;
+}
+
+interface Assessed {
+  result: MechanicalCaseResult;
+  strengthKn: number | null;
+}
+
+const PART = 'mechanical';
+const UNIT_FIELD = 'string.insulatorCode';
+
+const emptyCase = (name: string, kind: LoadCaseInput['kind']): MechanicalCaseResult => ({
+  name,
+  kind,
+  verticalN: null,
+  horizontalN: null,
+  loadPerStringN: null,
+  loadOneStringMissingN: null,
+  factorRequired: null,
+  factorProvided: null,
+  slackLeg: false,
+  verdict: 'unknown',
+});
+
+/** Strength that a load asks for by the factor, and for composite by its routine test load. */
+function strengthOf(
+  {
+    loadN,
+    factor,
+    testRatio,
+    name,
+    as,
+  }: {
+    loadN: number;
+    factor: number;
+    testRatio: number | null;
+    name: string;
+    as: string;
+  },
+  calculation: Calculation,
+): number {
+  const byFactor = calculation.run(
+    strengthNeeded,
+    { safetyFactor: factor, loadN },
+    { as, heading: `Strength needed, ${name}` },
+  );
+  if (testRatio === null) return byFactor;
+  const byTest = calculation.run(strengthForRoutineTest, { loadN, routineTestRatio: testRatio }, { as });
+  return Math.max(byFactor, byTest);
+}
+
+function assessCase(
+  { mechanical, string, unit }: Mechanical & { string: StringInput },
+  loadCase: LoadCaseInput,
+  { index, testRatio }: { index: number; testRatio: number | null },
+  calculation: Calculation,
+): Assessed {
+  const name = loadCase.name ?? `case ${index + 1}`;
+  const as = `case-${index + 1}`;
+  const { whyNot, upliftN, ...loads } = caseLoads({ mechanical, string, loadCase, name, as }, calculation);
+  const known: MechanicalCaseResult = { ...emptyCase(name, loadCase.kind), ...loads };
+  if (upliftN !== null) {
+    calculation.caution('mechanical-uplift', 'stop', `Load case "${name}": ${whyNot}`, 'mechanical.weightSpanM');
+  }
+  const factor = requiredFactor(mechanical, { kind: loadCase.kind, unit, as }, calculation);
+  const missing = whyNot ?? (typeof factor === 'string' ? factor : null);
+  if (missing !== null) calculation.missing(PART, `Load case "${name}": ${missing}`);
+  if (loads.slackLeg) {
+    const text = `Load case "${name}": the leeward leg of the V goes slack, and the windward leg carries the whole load.`;
+    calculation.caution('v-leg-slack', 'caution', text, 'string.vAngleWindwardDeg');
+  }
+  if (typeof factor === 'string' || loads.loadPerStringN === null) {
+    return { result: { ...known, factorRequired: typeof factor === 'string' ? null : factor }, strengthKn: null };
+  }
+  const loadN = Math.max(loads.loadPerStringN, loads.loadOneStringMissingN ?? 0);
+  const strengthKn = strengthOf({ loadN, factor, testRatio, name, as }, calculation);
+  if (unit === null) return { result: { ...known, factorRequired: factor }, strengthKn };
+  const factorProvided = calculation.run(
+    factorOnLoad,
+    { strengthKn: unit.failingLoadKn, loadN },
+    { as, heading: `Factor provided, ${name}` },
+  );
+  const met = reaches(unit.failingLoadKn, strengthKn);
+  return {
+    result: { ...known, factorRequired: factor, factorProvided, verdict: met ? 'met' : 'short' },
+    strengthKn,
+  };
+}
+
+/** Says where the chosen unit does not carry the loads, and what stands in the way of saying so. */
+function cautionStrength(
+  { unit }: Mechanical,
+  assessed: readonly Assessed[],
+  { strengthKn, classKn }: { strengthKn: number | null; classKn: number | null },
+  calculation: Calculation,
+): void {
+  if (assessed.some(({ result }) => result.verdict === 'unknown') && unit !== null) {
+    const text = 'A load case is filled in that could not be assessed; the strength of the string is not shown for it.';
+    calculation.caution('mechanical-not-assessed', 'acceptance', text, PART);
+  }
+  const short = assessed.filter(({ result }) => result.verdict === 'short');
+  if (short.length > 0 && unit !== null) {
+    const mostKn = Math.max(...short.map((one) => one.strengthKn ?? 0));
+    const cases = short.map(({ result }) => `"${result.name}"`).join(', ');
+    const text = `${unit.code} has ${unit.failingLoadKn} kN; ${cases} ${short.length === 1 ? 'asks' : 'ask'} for ${mostKn.toFixed(1)} kN.`;
+    calculation.caution('strength-short', 'fail', text, UNIT_FIELD);
+  }
+  if (strengthKn !== null && classKn === null) {
+    const text = `The strength of ${strengthKn.toFixed(1)} kN lies above the last class that is held; more strings in parallel share the load.`;
+    calculation.caution('strength-beyond-classes', 'caution', text, 'string.parallelStrings');
+  }
+  if (unit !== null && strengthKn !== null) {
+    const text = `Fittings and their couplings have to carry at least the class of the string, ${unit.failingLoadKn} kN.`;
+    calculation.caution('fittings-strength', 'info', text, UNIT_FIELD);
+  }
+}
+
+const NOTHING: MechanicalResult = {
+  cases: [],
+  governedBy: null,
+  strengthRequiredKn: null,
+  classRequiredKn: null,
+  coupling: null,
+};
+
+/**
+ * Loads on the string by case, the strength they ask for and whether the chosen unit has it. Factors of one basis only,
+ * with loads of that basis; the same factor with one string of a set missing.
+ */
+export function assessMechanical(given: Mechanical, calculation: Calculation): MechanicalResult {
+  const { mechanical, string, unit, situation } = given;
+  const cases = mechanical.cases ?? [];
+  const unassessed = cases.map((one, index) => emptyCase(one.name ?? `case ${index + 1}`, one.kind));
+  if (!isKnown(string)) {
+    calculation.missing(PART, 'The string that carries the loads is not filled in.');
+    return { ...NOTHING, cases: unassessed };
+  }
+  if (cases.length === 0) {
+    calculation.missing(PART, 'No load case is filled in.');
+    return NOTHING;
+  }
+  if (unit?.kind === 'line-post') {
+    const text = 'A line post is loaded in bending; its strength is not that of a string and is not assessed here.';
+    calculation.missing(PART, text);
+    calculation.caution('mechanical-not-assessed', 'acceptance', text, UNIT_FIELD);
+    return { ...NOTHING, cases: unassessed };
+  }
+  if (unit === null) calculation.missing(PART, 'No insulator unit is chosen whose strength could be compared.');
+  const testRatio = unit === null ? null : routineTestRatio(unit, calculation);
+  const assessed = cases.map((one, index) => assessCase({ ...given, string }, one, { index, testRatio }, calculation));
+  const complete = assessed.every(({ strengthKn }) => strengthKn !== null);
+  const most = assessed.reduce((one, other) => ((other.strengthKn ?? 0) > (one.strengthKn ?? 0) ? other : one));
+  const strengthKn = complete ? most.strengthKn : null;
+  const next = strengthKn === null ? null : strengthClass(strengthKn, { unit, basis: situation.basis }, calculation);
+  cautionStrength(given, assessed, { strengthKn, classKn: next?.failingLoadKn ?? null }, calculation);
+  return {
+    cases: assessed.map(({ result }) => result),
+    governedBy: strengthKn === null ? null : most.result.name,
+    strengthRequiredKn: strengthKn,
+    classRequiredKn: next?.failingLoadKn ?? null,
+    coupling: next?.coupling ?? null,
+  };
+}

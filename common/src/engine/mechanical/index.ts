@@ -1,0 +1,7 @@
+export * from './assess';
+export * from './classes';
+export * from './factors';
+export * from './formulas';
+export * from './ice';
+export * from './loads';
+export * from './v-string';
