@@ -10,6 +10,7 @@ import { OpenApiModule } from './openapi/openapi.module';
 import { PlatformModule, type PlatformOptions } from './platform/platform.module';
 import { ProjectsModule } from './projects/projects.module';
 import { ReferenceModule } from './reference/reference.module';
+import { RevisionNotesModule } from './revision-notes/revision-notes.module';
 import { SheetsModule } from './sheets/sheets.module';
 import { SpecificationsModule } from './specifications/specifications.module';
 import { UsersModule } from './users/users.module';
@@ -30,6 +31,7 @@ export class AppModule {
         CatalogueModule,
         EvaluationsModule,
         SpecificationsModule,
+        RevisionNotesModule,
         SheetsModule,
         DeskModule,
         HealthModule,

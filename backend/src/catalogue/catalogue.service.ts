@@ -36,6 +36,11 @@ export class CatalogueService implements OnApplicationBootstrap {
     return this.units.newestOf(code, db);
   }
 
+  /** Units of the same family, kind and strength in their newest versions, the unit itself among them. */
+  unitsLike(unit: CatalogueUnit): Promise<CatalogueUnit[]> {
+    return this.units.newestLike(unit);
+  }
+
   conductors(): Promise<Conductor[]> {
     return this.conductorsRepository.newest();
   }

@@ -55,6 +55,13 @@ export class InsulatorsRepository {
     return rows.map(toUnit);
   }
 
+  async newestLike({ family, kind, failingLoadKn }: CatalogueUnit): Promise<CatalogueUnit[]> {
+    const rows = (await this.newest(this.knex)
+      .where({ 'i.family': family, 'i.kind': kind, 'i.failing_load_kn': failingLoadKn })
+      .select(...INSULATOR_COLUMNS)) as InsulatorRow[];
+    return rows.map(toUnit);
+  }
+
   /** A version that another process has added in the meantime is left as it is. */
   async add(units: readonly CatalogueUnit[], db: Database): Promise<void> {
     if (units.length === 0) return;

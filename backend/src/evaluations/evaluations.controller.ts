@@ -17,4 +17,14 @@ export class EvaluationsController {
   evaluateBatch(@Body() { inputs, trace = true }: BodyOf<typeof contract.evaluateBatch>) {
     return this.evaluations.evaluateAll(inputs as SpecificationInput[], { trace });
   }
+
+  @Route(contract.sweep)
+  sweep(@Body() { input, ...asked }: BodyOf<typeof contract.sweep>) {
+    return this.evaluations.sweep(input as SpecificationInput, asked);
+  }
+
+  @Route(contract.whatIf)
+  whatIf(@Body() { input, otherCode }: BodyOf<typeof contract.whatIf>) {
+    return this.evaluations.whatIf(input as SpecificationInput, otherCode);
+  }
 }

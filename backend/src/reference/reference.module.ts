@@ -3,11 +3,13 @@ import { CompanySettingsModule } from '../company-settings/company-settings.modu
 import { ConfirmationsRepository } from './confirmations.repository';
 import { ReferenceController } from './reference.controller';
 import { ReferenceService } from './reference.service';
+import { TablesController } from './tables.controller';
+import { TablesService } from './tables.service';
 
 @Module({
   imports: [CompanySettingsModule],
-  controllers: [ReferenceController],
-  providers: [ReferenceService, ConfirmationsRepository],
+  controllers: [ReferenceController, TablesController],
+  providers: [ReferenceService, TablesService, ConfirmationsRepository],
   exports: [ReferenceService],
 })
 export class ReferenceModule {}

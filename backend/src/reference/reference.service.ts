@@ -1,9 +1,9 @@
 import { Injectable } from '@nestjs/common';
-import type { Basis, InsulationLevelRow } from '@bellgap/common/api';
+import type { Basis, InsulationLevelRow, TableConfirmation } from '@bellgap/common/api';
 import { insulationLevelsFor } from '@bellgap/common/engine';
 import { CompanySettingsService } from '../company-settings/company-settings.service';
 import type { Database } from '../platform/knex';
-import { ConfirmationsRepository, type TableConfirmation } from './confirmations.repository';
+import { ConfirmationsRepository } from './confirmations.repository';
 
 /** Printed tables, the company's rows beside them, and what owners of the print have confirmed. */
 @Injectable()
@@ -23,7 +23,9 @@ export class ReferenceService {
     ];
   }
 
-  confirmations(db?: Database): Promise<TableConfirmation[]> {
-    return this.confirmationsRepository.inForce(db);
+  /** What the engine takes into account of each word: no more than stands on a sheet. */
+  async confirmations(db?: Database): Promise<TableConfirmation[]> {
+    const inForce = await this.confirmationsRepository.inForce(db);
+    return inForce.map(({ key, outcome, edition, page, on, by }) => ({ key, outcome, edition, page, on, by }));
   }
 }
