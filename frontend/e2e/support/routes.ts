@@ -42,6 +42,10 @@ export const SIGNED_IN_STOPS: readonly Stop[] = [
   { name: 'catalogue', route: 'catalogue', path: paths.catalogue.to() },
   { name: 'catalogue-unit', route: 'catalogueUnit', path: paths.catalogueUnit.to('U160BL') },
   { name: 'catalogue-rod', route: 'catalogueUnit', path: paths.catalogueUnit.to('C120-132') },
+  { name: 'tables', route: 'tables', path: paths.tables.to() },
+  { name: 'table', route: 'table', path: paths.table.to('iec-60071-1:a1') },
+  { name: 'formula', route: 'table', path: paths.table.to('atmosphere.altitude-factor') },
+  { name: 'known-answers', route: 'knownAnswers', path: paths.knownAnswers.to() },
   { name: 'account', route: 'account', path: paths.account.to() },
   { name: 'administration', route: 'administration', path: paths.administration.to(), roles: ['administrator'] },
 ];

@@ -14,6 +14,9 @@ export const paths = {
   },
   catalogue: { pattern: '/catalogue', to: () => '/catalogue' },
   catalogueUnit: { pattern: '/catalogue/:code', to: (code: string) => `/catalogue/${encodeURIComponent(code)}` },
+  tables: { pattern: '/tables', to: () => '/tables' },
+  table: { pattern: '/tables/:key', to: (key: string) => `/tables/${encodeURIComponent(key)}` },
+  knownAnswers: { pattern: '/known-answers', to: () => '/known-answers' },
   administration: { pattern: '/administration', to: () => '/administration' },
   account: { pattern: '/account', to: () => '/account' },
   signIn: {

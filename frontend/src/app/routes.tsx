@@ -59,6 +59,20 @@ export const routes: RouteObject[] = [
                 }),
               },
               {
+                path: paths.tables.pattern,
+                lazy: async () => ({ Component: (await import('../reference/pages/tables-page')).TablesPage }),
+              },
+              {
+                path: paths.table.pattern,
+                lazy: async () => ({ Component: (await import('../reference/pages/table-page')).TablePage }),
+              },
+              {
+                path: paths.knownAnswers.pattern,
+                lazy: async () => ({
+                  Component: (await import('../reference/pages/known-answers-page')).KnownAnswersPage,
+                }),
+              },
+              {
                 path: paths.administration.pattern,
                 lazy: async () => ({
                   Component: (await import('../administration/pages/administration-page')).AdministrationPage,

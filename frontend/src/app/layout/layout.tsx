@@ -15,6 +15,7 @@ function Navigation() {
     { to: paths.desk.to(), label: 'Desk', end: true },
     { to: paths.projects.to(), label: 'Projects' },
     { to: paths.catalogue.to(), label: 'Catalogue' },
+    { to: paths.tables.to(), label: 'Tables' },
     ...(holds(person, ['administrator']) ? [{ to: paths.administration.to(), label: 'Administration' }] : []),
   ];
   return (
