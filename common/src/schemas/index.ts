@@ -7,3 +7,4 @@ export * from './people';
 export * from './projects';
 export * from './specifications';
 export * from './standing-cautions';
+export * from './worksheet';

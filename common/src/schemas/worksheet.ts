@@ -1,0 +1,107 @@
+import * as yup from 'yup';
+import {
+  EXTERNAL_INSULATIONS,
+  POWER_FREQUENCY_SURFACES,
+  SUBCONDUCTOR_COUNTS,
+  WORKSHEET_PLACES,
+} from '../engine/worksheet-model';
+import { list, measure, oneOf, part } from './parts';
+import type { Field } from './fields';
+
+/** Every input of the insulation level worksheet by its path: words, unit and limits. */
+export const WORKSHEET_FIELDS = {
+  highestVoltageKv: { label: 'Highest voltage', basis: 'line to line', unit: 'kV rms', above: 0 },
+  altitudeM: { label: 'Altitude', unit: 'm', quantity: 'length-m', atLeast: -430 },
+  earthFaultFactor: { label: 'Earth-fault factor', atLeast: 1, atMost: 1.9 },
+  loadRejectionFactor: { label: 'Load-rejection factor', atLeast: 1, atMost: 2 },
+  powerFrequencySurface: { label: 'Surface at power frequency' },
+  externalInsulation: { label: 'External insulation' },
+  switchingPhaseToEarthExponent: { label: 'Altitude exponent, switching to earth', atLeast: 0, atMost: 1 },
+  'arrester.switchingProtectionKvPeak': { label: 'Switching protection level', unit: 'kV peak', above: 0 },
+  'arrester.lightningProtectionKvPeak': { label: 'Lightning protection level', unit: 'kV peak', above: 0 },
+  'places.place': { label: 'Place' },
+  'places.slowFrontPhaseToEarthPu': { label: 'Slow front to earth, exceeded in 2 %, p.u.', atLeast: 1, atMost: 6 },
+  'places.slowFrontPhaseToPhasePu': {
+    label: 'Slow front between phases, exceeded in 2 %, p.u.',
+    atLeast: 1,
+    atMost: 9,
+  },
+  'places.phaseToEarthCoordinationFactor': { label: 'Co-ordination factor to earth', atLeast: 1, atMost: 1.1 },
+  'places.phaseToPhaseCoordinationFactor': { label: 'Co-ordination factor between phases', atLeast: 1, atMost: 1.1 },
+  'fastFront.subconductorsCount': { label: 'Sub-conductors of the line' },
+  'fastFront.linesConnectedCount': { label: 'Lines that stay connected', atLeast: 1, atMost: 20, whole: true },
+  'fastFront.spanM': { label: 'Span of the line', unit: 'm', quantity: 'length-m', above: 0 },
+  'fastFront.lineOutageRatePerKmYear': { label: 'Line outages per km and year', above: 0 },
+  'fastFront.acceptedFailureRatePerYear': { label: 'Accepted failures per year', above: 0 },
+  'fastFront.arresterToInternalM': {
+    label: 'Arrester to internal insulation',
+    unit: 'm',
+    quantity: 'length-m',
+    atLeast: 0,
+  },
+  'fastFront.arresterToExternalM': {
+    label: 'Arrester to external insulation',
+    unit: 'm',
+    quantity: 'length-m',
+    atLeast: 0,
+  },
+} as const satisfies Record<string, Field>;
+
+/** The words of every choice of the worksheet. */
+export const WORKSHEET_CHOICES = {
+  powerFrequencySurface: {
+    'dry-or-clean': 'Dry or clean',
+    'polluted-standard': 'Polluted, standard profile',
+    'polluted-anti-fog': 'Polluted, anti-fog profile',
+  },
+  externalInsulation: { 'air-or-dry': 'Air gaps and dry insulators', 'wet-insulators': 'Wet insulators' },
+  place: { 'line-entrance': 'Line entrance', 'other-equipment': 'Other equipment' },
+} as const;
+
+const label = (path: keyof typeof WORKSHEET_FIELDS): string => WORKSHEET_FIELDS[path].label;
+const figure = (path: keyof typeof WORKSHEET_FIELDS) => measure(label(path), WORKSHEET_FIELDS[path] as Field);
+
+/** What can be read at all of a worksheet; every input may be null, what depends on it is then not assessed. */
+export const worksheetInputSchema = yup
+  .object({
+    highestVoltageKv: figure('highestVoltageKv'),
+    altitudeM: figure('altitudeM'),
+    earthFaultFactor: figure('earthFaultFactor'),
+    loadRejectionFactor: figure('loadRejectionFactor'),
+    powerFrequencySurface: oneOf(label('powerFrequencySurface'), POWER_FREQUENCY_SURFACES),
+    externalInsulation: oneOf(label('externalInsulation'), EXTERNAL_INSULATIONS),
+    switchingPhaseToEarthExponent: figure('switchingPhaseToEarthExponent'),
+    arrester: part({
+      switchingProtectionKvPeak: figure('arrester.switchingProtectionKvPeak'),
+      lightningProtectionKvPeak: figure('arrester.lightningProtectionKvPeak'),
+    }),
+    places: list(
+      'Places',
+      part({
+        place: oneOf(label('places.place'), WORKSHEET_PLACES),
+        slowFrontPhaseToEarthPu: figure('places.slowFrontPhaseToEarthPu'),
+        slowFrontPhaseToPhasePu: figure('places.slowFrontPhaseToPhasePu'),
+        phaseToEarthCoordinationFactor: figure('places.phaseToEarthCoordinationFactor'),
+        phaseToPhaseCoordinationFactor: figure('places.phaseToPhaseCoordinationFactor'),
+      }),
+      WORKSHEET_PLACES.length,
+    ).test('each-place-once', 'Places: each place once', (places) => {
+      const named = (places ?? []) as ({ place?: string | null } | null)[];
+      const given = named.flatMap((one) => (one?.place ? [one.place] : []));
+      return new Set(given).size === given.length;
+    }),
+    fastFront: part({
+      subconductorsCount: figure('fastFront.subconductorsCount').oneOf(
+        [...SUBCONDUCTOR_COUNTS, null],
+        `${label('fastFront.subconductorsCount')}: choose one of ${SUBCONDUCTOR_COUNTS.join(', ')}`,
+      ),
+      linesConnectedCount: figure('fastFront.linesConnectedCount'),
+      spanM: figure('fastFront.spanM'),
+      lineOutageRatePerKmYear: figure('fastFront.lineOutageRatePerKmYear'),
+      acceptedFailureRatePerYear: figure('fastFront.acceptedFailureRatePerYear'),
+      arresterToInternalM: figure('fastFront.arresterToInternalM'),
+      arresterToExternalM: figure('fastFront.arresterToExternalM'),
+    }),
+  })
+  .noUnknown()
+  .required();
