@@ -1,4 +1,5 @@
 export * from './all-formulas';
+export * from './altitude-conventions';
 export * from './evaluate';
 export * from './input-faults';
 export * from './method-edition';
