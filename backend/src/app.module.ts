@@ -6,6 +6,7 @@ import { CompanySettingsModule } from './company-settings/company-settings.modul
 import { DeskModule } from './desk/desk.module';
 import { EvaluationsModule } from './evaluations/evaluations.module';
 import { HealthModule } from './health/health.module';
+import { KnownAnswersModule } from './known-answers/known-answers.module';
 import { OpenApiModule } from './openapi/openapi.module';
 import { PlatformModule, type PlatformOptions } from './platform/platform.module';
 import { ProjectsModule } from './projects/projects.module';
@@ -28,6 +29,7 @@ export class AppModule {
         CompanySettingsModule,
         ProjectsModule,
         ReferenceModule,
+        KnownAnswersModule,
         CatalogueModule,
         EvaluationsModule,
         SpecificationsModule,

@@ -159,9 +159,8 @@ export const knownAnswersAnswer = yup
             id: words(),
             topic: words(),
             title: words(),
-            document: words(),
-            edition: words(),
-            clause: words(),
+            /** Document, edition and clause, page or example. */
+            source: words(),
             status: status(),
             figures: yup
               .array()

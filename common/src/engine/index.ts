@@ -2,6 +2,7 @@ export * from './all-formulas';
 export * from './altitude-conventions';
 export * from './evaluate';
 export * from './input-faults';
+export * from './known-answers';
 export * from './method-edition';
 export * from './model';
 export * from './names';

@@ -1,22 +1,6 @@
-import { ATMOSPHERE } from './atmosphere';
-import { CREEPAGE } from './creepage';
-import { LEVELS_AND_CLEARANCES } from './levels-and-clearances';
-import { LINE_CLEARANCES } from './line-clearances';
-import { LOADS } from './loads';
-import { COUNTS_IN_SERVICE } from './rules-of-thumb';
-import { STRING_VOLTAGE } from './string-voltage';
+import { KNOWN_ANSWERS, LEFT_OUT, runKnownAnswer, type KnownAnswer } from '../../src/engine/known-answers';
 
-const TOPICS = {
-  ATMOSPHERE,
-  CREEPAGE,
-  LEVELS_AND_CLEARANCES,
-  LINE_CLEARANCES,
-  LOADS,
-  COUNTS_IN_SERVICE,
-  STRING_VOLTAGE,
-};
-
-describe.each(Object.entries(TOPICS))('published examples: %s', (_topic, examples) => {
+describe.each(Object.entries(KNOWN_ANSWERS))('published examples: %s', (_topic, examples) => {
   it('are there', () => {
     expect(examples.length).toBeGreaterThan(0);
   });
@@ -24,17 +8,45 @@ describe.each(Object.entries(TOPICS))('published examples: %s', (_topic, example
   it.each(examples.map((example) => [`${example.source}: ${example.title}`, example] as const))(
     '%s',
     (_title, example) => {
-      const computed = example.computed();
-      expect(Object.keys(computed)).toEqual(Object.keys(example.printed));
-      for (const [name, printed] of Object.entries(example.printed)) {
-        const within = typeof example.within === 'number' ? example.within : (example.within[name] ?? 0);
-        const value = computed[name];
-        expect([name, value !== null && value !== undefined && Math.abs(value - printed) <= within, value]).toEqual([
-          name,
-          true,
-          value,
-        ]);
+      expect(Object.keys(example.computed())).toEqual(Object.keys(example.printed));
+      for (const { name, met, obtained } of runKnownAnswer(example)) {
+        expect([name, met, obtained]).toEqual([name, true, obtained]);
       }
     },
   );
+
+  it('say where from and why the tolerance is what it is', () => {
+    for (const { source, why, status, title } of examples) {
+      expect(source.length).toBeGreaterThan(10);
+      expect(title.length).toBeGreaterThan(3);
+      expect(why.length).toBeGreaterThan(3);
+      if (/from memory/.test(source)) expect([source, status]).toEqual([source, 'memory']);
+      if (/computed by hand|derived/.test(source)) expect([source, status]).toEqual([source, 'derived']);
+    }
+  });
+});
+
+describe('the runner of published examples', () => {
+  const example: KnownAnswer = {
+    source: 'arithmetic',
+    title: 'two and two',
+    computed: () => ({ sumM: 4.05, lostM: null }),
+    printed: { sumM: 4, lostM: 1 },
+    within: { sumM: 0.1 },
+    why: 'printed to 0.1',
+  };
+
+  it('holds each figure against its own tolerance, and misses what is not obtained', () => {
+    expect(runKnownAnswer(example).map(({ met, unit, tolerance }) => [met, unit, tolerance])).toEqual([
+      [true, 'm', 0.1],
+      [false, 'm', 0],
+    ]);
+    expect(runKnownAnswer({ ...example, within: 0.01 })[0]?.met).toBe(false);
+  });
+});
+
+describe('examples left out', () => {
+  it('say what they are, where they stand and why', () => {
+    for (const texts of LEFT_OUT) for (const text of Object.values(texts)) expect(text.length).toBeGreaterThan(8);
+  });
 });

@@ -1,6 +1,6 @@
 import type { LoadCaseInput, MechanicalInput } from '../model';
 
-/** Builders of mechanical loads for tests: fixed defaults, overrides by name. */
+/** Builders of mechanical loads for tests and for known answers: fixed defaults, overrides by name. */
 export function aLoadCase(overrides: Partial<LoadCaseInput> = {}): LoadCaseInput {
   return {
     name: 'wind',

@@ -7,7 +7,7 @@ import type {
   StringInput,
 } from '../model';
 
-/** Builders for tests: fixed defaults, overrides by name. */
+/** Builders for tests and for known answers: fixed defaults, overrides by name. */
 
 const SOURCE = { document: 'Test catalogue', edition: '1', clause: 'invented', status: 'practice' } as const;
 

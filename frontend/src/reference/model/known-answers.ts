@@ -17,9 +17,6 @@ export function verdictText({ met, obtained }: Figure): string {
   return obtained === null ? 'missed, no figure obtained' : 'missed';
 }
 
-export const itemSource = ({ document, edition, clause }: Item): string =>
-  [document, edition, clause].filter((part) => part !== '' && part !== 'none').join(', ');
-
 /** What a run found, in one sentence. */
 export function runText({ items, leftOut }: KnownAnswers): string {
   const missed = items.filter(({ verdict }) => verdict === 'missed').length;

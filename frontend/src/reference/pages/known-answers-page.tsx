@@ -15,7 +15,7 @@ import { Page } from '../../ui/page/page';
 import { Sheet } from '../../ui/page/sheet';
 import { EmptyState } from '../../ui/states/empty-state';
 import { LoadingState } from '../../ui/states/loading-state';
-import { figuresOf, itemSource, runText, verdictText, type KnownFigure } from '../model/known-answers';
+import { figuresOf, runText, verdictText, type KnownFigure } from '../model/known-answers';
 import './reference.css';
 
 const COLUMNS: Column<KnownFigure>[] = [
@@ -52,7 +52,7 @@ const COLUMNS: Column<KnownFigure>[] = [
     sortable: true,
   },
   { key: 'why', title: 'Why so much', value: ({ item }) => item.why, wraps: true },
-  { key: 'source', title: 'Source', value: ({ item }) => itemSource(item), wraps: true },
+  { key: 'source', title: 'Source', value: ({ item }) => item.source, wraps: true },
   { key: 'status', title: 'Status', value: ({ item }) => CHOICE_LABELS.status[item.status], wraps: true },
 ];
 

@@ -1,15 +1,9 @@
-import {
-  caseLoads,
-  iceWeight,
-  loadAngleLimitsDeg,
-  loadPerMetre,
-  windOnIcedConductor,
-} from '../../src/engine/mechanical';
-import { MM_PER_IN } from '../../src/engine/quantities';
-import { aLoadCase, mechanicalLoads } from '../../src/engine/testing/loads';
-import { aLine } from '../../src/engine/testing/specifications';
-import { Calculation } from '../../src/engine/trace';
-import type { PublishedExample } from './examples';
+import { caseLoads, iceWeight, loadAngleLimitsDeg, loadPerMetre, windOnIcedConductor } from '../mechanical';
+import { MM_PER_IN } from '../quantities';
+import { aLoadCase, mechanicalLoads } from '../testing/loads';
+import { aLine } from '../testing/specifications';
+import { Calculation } from '../trace';
+import type { KnownAnswer } from './known-answer';
 
 /** Standard gravity, by which the books turn kilograms and pounds into forces. */
 const G = 9.80665;
@@ -22,7 +16,7 @@ const HANDBOOK_ICE_KG_PER_M3 = (57 * KG_PER_LB) / M_PER_FT ** 3;
 
 const RIGHT_ANGLED_V = { windwardLegM: 3, leewardLegM: 3, attachmentSpacingM: 3 * Math.SQRT2, levelDifferenceM: 0 };
 
-export const LOADS: PublishedExample[] = [
+export const LOADS: KnownAnswer[] = [
   {
     source: 'T. Gonen, Electric Power Transmission System Engineering, example 13.2, p. 697',
     title: 'conductor of 1.093 in with 0.5 in of ice and 4 lb per square foot of wind, pounds per foot',
@@ -58,6 +52,7 @@ export const LOADS: PublishedExample[] = [
   },
   {
     source: 'statics of a V of two legs; rule published, figures worked out by hand',
+    status: 'derived',
     title: 'right-angled V: angles of the load between which no leg is slack',
     computed: () => {
       const { leastDeg = null, mostDeg = null } = loadAngleLimitsDeg(RIGHT_ANGLED_V) ?? {};

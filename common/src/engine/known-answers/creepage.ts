@@ -1,8 +1,8 @@
-import { evaluate } from '../../src/engine/evaluate';
-import type { InsulatorUnit, PollutionClass, StringResult } from '../../src/engine/model';
-import { IEC_TS_60815_USCD } from '../../src/engine/standards';
-import { aContext, aDisc, aLine } from '../../src/engine/testing/specifications';
-import type { PublishedExample } from './examples';
+import { evaluate } from '../evaluate';
+import type { InsulatorUnit, PollutionClass, StringResult } from '../model';
+import { IEC_TS_60815_USCD } from '../standards';
+import { aContext, aDisc, aLine } from '../testing/specifications';
+import type { KnownAnswer } from './known-answer';
 
 interface Given {
   highestVoltageKv: number;
@@ -31,7 +31,7 @@ const UNITS_160_KN = [
   ['U160BLP', 525, 170, 330, 12, 2040, 6300],
 ] as const;
 
-export const CREEPAGE: PublishedExample[] = [
+export const CREEPAGE: KnownAnswer[] = [
   {
     source: 'public question and answer on creepage, IEC 60815:1986 level IV',
     title: '33 kV line (Um 36 kV), very heavy pollution, 31 mm per kV of Um',
@@ -60,8 +60,9 @@ export const CREEPAGE: PublishedExample[] = [
     why: 'exact',
   },
   ...UNITS_160_KN.map(
-    ([code, creepageMm, spacingMm, diameterMm, units, sectionLengthMm, creepageProvidedMm]): PublishedExample => ({
+    ([code, creepageMm, spacingMm, diameterMm, units, sectionLengthMm, creepageProvidedMm]): KnownAnswer => ({
       source: 'IEC 60305 units of 160 kN; IEC TS 60815-2:2008 class d; result computed by hand',
+      status: 'derived',
       title: `Um 245 kV, class d, ${code}`,
       computed: () => {
         const string = byPollution({

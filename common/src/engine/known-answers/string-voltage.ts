@@ -7,8 +7,8 @@ import {
   stringVoltageFromLineEnd,
   voltageShareRatios,
   type StringNetwork,
-} from '../../src/engine/string-voltage';
-import type { PublishedExample } from './examples';
+} from '../string-voltage';
+import type { KnownAnswer } from './known-answer';
 
 /** Shares and efficiency as the books print them: percent, tower end first. */
 function string(network: StringNetwork): { shares: number[]; lineEndRatio: number; efficiencyPercent: number } {
@@ -36,15 +36,7 @@ interface Shares {
   why?: string;
 }
 
-const sharesExample = ({
-  source,
-  title,
-  network,
-  shares,
-  efficiencyPercent,
-  within,
-  why,
-}: Shares): PublishedExample => ({
+const sharesExample = ({ source, title, network, shares, efficiencyPercent, within, why }: Shares): KnownAnswer => ({
   source,
   title,
   computed: () => {
@@ -67,7 +59,7 @@ interface LineVoltage {
   efficiencyWithin: number;
 }
 
-const lineExample = (given: LineVoltage): PublishedExample => {
+const lineExample = (given: LineVoltage): KnownAnswer => {
   const { source, title, network, lineKv, unitsKv, efficiencyPercent, within, efficiencyWithin } = given;
   return {
     source,
@@ -106,7 +98,7 @@ interface UnitLimit {
   efficiencyWithin: number;
 }
 
-const limitExample = (given: UnitLimit): PublishedExample => ({
+const limitExample = (given: UnitLimit): KnownAnswer => ({
   source: given.source,
   title: given.title,
   computed: () => {
@@ -124,7 +116,7 @@ const CHAKRABARTI = 'Chakrabarti, Soni, Gupta, Bhatnagar, A Textbook on Power Sy
 const RAY = 'S. Ray, Electrical Power Systems: Concepts, Theory and Practice';
 const THERAJA = 'B. L. Theraja, A Textbook of Electrical Technology, vol. III';
 
-export const STRING_VOLTAGE: PublishedExample[] = [
+export const STRING_VOLTAGE: KnownAnswer[] = [
   lineExample({
     source: `${MEHTA}, example 8.1, p. 171`,
     title: '3 units on 33 kV, c = 0.11',

@@ -1,12 +1,12 @@
-import { altitudeFactor, relativeAirDensity } from '../../src/engine/atmosphere';
-import type { PublishedExample } from './examples';
+import { altitudeFactor, relativeAirDensity } from '../atmosphere';
+import type { KnownAnswer } from './known-answer';
 
 /** 1 mmHg in kPa. */
 const KPA_PER_MMHG = 101.325 / 760;
 const density = (pressureMmhg: number, temperatureC: number): number =>
   relativeAirDensity({ pressureKpa: pressureMmhg * KPA_PER_MMHG, referencePressureKpa: 101.325, temperatureC });
 
-export const ATMOSPHERE: PublishedExample[] = [
+export const ATMOSPHERE: KnownAnswer[] = [
   {
     source: 'IEC 62271-1:2011, altitude correction, as quoted in a public article on switchgear',
     title: 'a level that holds to 1000 m, used at 2000 m',

@@ -1,6 +1,6 @@
-import { evaluate } from '../../src/engine/evaluate';
-import { aContext, aLine, rangeOneLevel } from '../../src/engine/testing/specifications';
-import type { PublishedExample } from './examples';
+import { evaluate } from '../evaluate';
+import { aContext, aLine, rangeOneLevel } from '../testing/specifications';
+import type { KnownAnswer } from './known-answer';
 
 const units = (nominalVoltageKv: number, highestVoltageKv: number, powerFrequencyKv: number, lightningKv: number) =>
   evaluate(
@@ -11,7 +11,7 @@ const units = (nominalVoltageKv: number, highestVoltageKv: number, powerFrequenc
   ).string?.units ?? null;
 
 /** Counts in service on clean sites, standard discs of 146 mm, cross-arm, up to 1000 m. */
-export const COUNTS_IN_SERVICE: PublishedExample[] = [
+export const COUNTS_IN_SERVICE: KnownAnswer[] = [
   {
     source: 'examination question bank (seen): five discs for 66 kV, ten for 132 kV; common practice 9 to 10',
     title: 'ordinary 66 and 132 kV strings',

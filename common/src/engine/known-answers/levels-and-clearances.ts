@@ -1,14 +1,9 @@
-import { evaluate } from '../../src/engine/evaluate';
-import type {
-  ClearancesResult,
-  InsulationLevelInput,
-  ShapePhaseToEarth,
-  ShapePhaseToPhase,
-} from '../../src/engine/model';
-import { insulationLevelsFor } from '../../src/engine/overvoltage';
-import { C37_32_BUS_CLEARANCES, EN_50341_1_CLEARANCES } from '../../src/engine/standards';
-import { aContext, aLine, rangeOneLevel, rangeTwoLevel } from '../../src/engine/testing/specifications';
-import type { PublishedExample } from './examples';
+import { evaluate } from '../evaluate';
+import type { ClearancesResult, InsulationLevelInput, ShapePhaseToEarth, ShapePhaseToPhase } from '../model';
+import { insulationLevelsFor } from '../overvoltage';
+import { C37_32_BUS_CLEARANCES, EN_50341_1_CLEARANCES } from '../standards';
+import { aContext, aLine, rangeOneLevel, rangeTwoLevel } from '../testing/specifications';
+import type { KnownAnswer } from './known-answer';
 
 function clearances(
   highestVoltageKv: number,
@@ -73,8 +68,8 @@ const hasLevel = (highestVoltageKv: number, lightningKv: number, switchingKv: nu
     (row) => row.lightningKv === lightningKv && row.switchingKv === switchingKv,
   ).length;
 
-export const LEVELS_AND_CLEARANCES: PublishedExample[] = [
-  ...RANGE_I.map(([highestVoltageKv, powerFrequencyKv, lightningKv, clearanceMm]): PublishedExample => ({
+export const LEVELS_AND_CLEARANCES: KnownAnswer[] = [
+  ...RANGE_I.map(([highestVoltageKv, powerFrequencyKv, lightningKv, clearanceMm]): KnownAnswer => ({
     source: 'RD 337/2014 ITC-RAT 12, Tables 1 and 2',
     title: `Um ${highestVoltageKv} kV, ${lightningKv} kV lightning`,
     computed: () => {
