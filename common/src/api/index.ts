@@ -6,3 +6,5 @@ export * from './method-answers';
 export * from './roles';
 export * from './states';
 export type * from '../engine/model';
+export type * from '../engine/worksheet-model';
+export type * from '../engine/worksheet-model';

@@ -143,6 +143,9 @@ describe('the theoretical method of EN 50341-1', () => {
     expect(standing?.withstandKv).toBeCloseTo(245 * Math.SQRT2, 9);
     expect(standing?.valueMm).toBeGreaterThan(1.5 * (cleared?.valueMm ?? 0));
     expect(standing?.governs).toBe(false);
+    const empirical = range1({ earthFault: 'sustained', clearance: { method: 'en-empirical' } });
+    expect(why(empirical, 'clearances.powerFrequencyPhaseToEarth')).toBeUndefined();
+    expect(rowOf(empirical, 'power-frequency')?.valueMm).toBe(standing?.valueMm);
     const unknown = range1({ earthFault: null });
     expect(rowOf(unknown, 'power-frequency')).toBeUndefined();
     expect(why(unknown, 'clearances.powerFrequencyPhaseToEarth')).toBeDefined();

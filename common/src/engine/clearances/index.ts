@@ -28,6 +28,8 @@ export interface ClearancesCase {
 
 const PART = { 'phase-to-earth': 'clearances.phaseToEarthMm', 'phase-to-phase': 'clearances.phaseToPhaseMm' } as const;
 
+const POWER_FREQUENCY_TO_EARTH = 'clearances.powerFrequencyPhaseToEarth';
+
 /** The largest row of a distance, with the rows that reach it marked; null where the method has no figure. */
 function headline({ distance, rows, whyNot }: MethodDistance, calculation: Calculation): number | null {
   if (whyNot !== null) {
@@ -85,6 +87,15 @@ const answers = (
   ];
 };
 
+/** Where an earth fault may stand, the theoretical method has the power-frequency distance that the table has not. */
+function withoutAnswered(chosen: MethodAnswer, all: readonly MethodAnswer[]): MethodAnswer {
+  const answered = all
+    .flatMap(({ beside }) => beside)
+    .some((row) => row.distance === 'phase-to-earth' && row.stress === 'power-frequency' && row.valueMm !== null);
+  if (!answered) return chosen;
+  return { ...chosen, missing: chosen.missing.filter(({ part }) => part !== POWER_FREQUENCY_TO_EARTH) };
+}
+
 /**
  * Clearances by the method chosen, with the rows of the other methods beside them where their inputs are there.
  * Distances between phases, to earth, to a section and for safety are four different things; one is never computed from
@@ -97,7 +108,7 @@ export function assessClearances(given: ClearancesCase, calculation: Calculation
   const all = answers(given, method, calculation);
   const chosen = all.find((answer) => answer.method === method);
   let found: Record<MethodDistance['distance'], number | null> = { 'phase-to-earth': null, 'phase-to-phase': null };
-  if (chosen !== undefined) found = headlines(chosen, calculation);
+  if (chosen !== undefined) found = headlines(withoutAnswered(chosen, all), calculation);
   else calculation.missing('clearances', 'The clearance method is not chosen.');
   const ordered = [...all].sort((one, other) => Number(other === chosen) - Number(one === chosen));
   const safety = safetyDistances({ situation, clearance: clearance ?? {}, table: all[0] }, calculation);

@@ -1,0 +1,2 @@
+export * from './representative';
+export * from './withstand';
