@@ -1,5 +1,5 @@
 import { assessClearances, type StringBeside } from './clearances';
-import { assessString } from './insulator-string';
+import { assessString, type StringAssessment } from './insulator-string';
 import { assessMechanical } from './mechanical';
 import { METHOD_EDITION } from './method-edition';
 import type {
@@ -54,7 +54,7 @@ function stringOf(
   situation: Situation,
   context: EvaluationContext,
   calculation: Calculation,
-): StringResult | null {
+): StringAssessment | null {
   const unit = context.insulator;
   if (unit === null) {
     calculation.missing('string', 'No insulator unit is chosen.');
@@ -62,7 +62,7 @@ function stringOf(
   }
   const rods = rodsOf(string, unit);
   const devices = { kind: string.arcingDevices ?? null, gapMm: string.arcGapMm ?? null };
-  return assessString({ input, string, situation, context, unit, rods, devices }, calculation).result;
+  return assessString({ input, string, situation, context, unit, rods, devices }, calculation);
 }
 
 /** The string as the gap beside it sees it. */
@@ -127,7 +127,8 @@ export function evaluate(
   const calculation = new Calculation(trace, context.confirmations);
   const { situation, level } = readLevel(input, readSituation(input, calculation), context, calculation);
   const given = input.string;
-  const string = isKnown(given) ? stringOf(input, given, situation, context, calculation) : null;
+  const assessment = isKnown(given) ? stringOf(input, given, situation, context, calculation) : null;
+  const string = assessment?.result ?? null;
   if (!isKnown(given) && input.kind !== 'bay') calculation.missing('string', NOT_FILLED_IN);
   const clearances = assessClearances(
     {
@@ -146,7 +147,15 @@ export function evaluate(
   const mechanical = mechanicalOf(input, situation, context, calculation);
   uncoveredParts(input, calculation);
   const cards = ruleOfThumb(
-    { situation, pollutionClass, unit: context.insulator, string, clearances, settings: context.settings },
+    {
+      situation,
+      pollutionClass,
+      unit: context.insulator,
+      string,
+      assessment,
+      clearances,
+      settings: context.settings,
+    },
     calculation,
   );
   cautionStatuses(calculation);

@@ -352,6 +352,19 @@ export type Verdict = (typeof VERDICTS)[number];
 export const SEVERITIES = ['info', 'caution', 'acceptance', 'fail', 'stop'] as const;
 export type Severity = (typeof SEVERITIES)[number];
 export const DISTANCES = ['phase-to-earth', 'phase-to-phase', 'section', 'safety'] as const;
+export const BRIDGE_CAUSES = [
+  'rule-to-method',
+  'pollution',
+  'earth-fault',
+  'altitude',
+  'insulation-level',
+  'surroundings',
+  'arcing-devices',
+  'unit',
+  'minimum',
+  'extra-units',
+] as const;
+export type BridgeCause = (typeof BRIDGE_CAUSES)[number];
 export const RULE_VERDICTS = ['within', 'explain', 'out-of-range'] as const;
 
 export interface CriterionResult {
@@ -520,7 +533,8 @@ export interface Evaluation {
   mechanical?: MechanicalResult | null;
   ruleOfThumb: {
     rows: RuleOfThumbRow[];
-    bridge: { cause: string; units: number }[] | null;
+    /** From the count of the rule of discs to the specified one, step by step in the order of the causes. */
+    bridge: { cause: BridgeCause; units: number }[] | null;
     bridgeWhyNot: string | null;
   };
   cautions: Caution[];

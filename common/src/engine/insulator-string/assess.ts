@@ -38,8 +38,17 @@ export interface StringCase {
 }
 
 export interface StringAssessment {
+  given: StringCase;
   result: StringResult;
   demands: readonly Demand[];
+}
+
+const UNITS_BY_POLLUTION = { as: 'pollution', heading: 'Units by pollution' } as const;
+
+/** Discs that a creepage calls for. */
+export function unitsByPollution(requiredMm: number, { creepageMm }: InsulatorUnit, calculation: Calculation): number {
+  const quotientRatio = calculation.run(unitsByCreepage, { requiredMm, creepageMm });
+  return calculation.run(countOf, { quotientRatio }, UNITS_BY_POLLUTION);
 }
 
 function pollutionDemand({ unit }: StringCase, requirement: CreepageRequirement, calculation: Calculation): Demand {
@@ -53,9 +62,7 @@ function pollutionDemand({ unit }: StringCase, requirement: CreepageRequirement,
     provided: (units: number) => units * unit.creepageMm,
   } as const;
   if (!isDisc(unit)) return demand(common);
-  const quotientRatio = calculation.run(unitsByCreepage, { requiredMm, creepageMm: unit.creepageMm });
-  const requiredUnits = calculation.run(countOf, { quotientRatio }, { as: 'pollution', heading: 'Units by pollution' });
-  return demand({ ...common, requiredUnits });
+  return demand({ ...common, requiredUnits: unitsByPollution(requiredMm, unit, calculation) });
 }
 
 function siteFactors({ situation }: StringCase, calculation: Calculation): SiteFactors {
@@ -122,6 +129,7 @@ export function assessString(given: StringCase, calculation: Calculation): Strin
   const levels = testLevels(given, factors, calculation);
   const inOrder = Object.values(demands);
   return {
+    given,
     result: putTogether(given, { demands: inOrder, creepage, testLevels: levels }, calculation),
     demands: inOrder,
   };

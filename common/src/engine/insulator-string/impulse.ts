@@ -23,6 +23,15 @@ export interface Devices {
   gapMm: number | null;
 }
 
+/** How the lines of the working are told apart and headed; made once, since counts are taken by the thousand. */
+const LIGHTNING_FLASHOVER = { as: 'lightning', heading: 'Lightning flashover (50 %) needed' } as const;
+const SWITCHING_FLASHOVER = { as: 'switching', heading: 'Switching flashover (50 %) needed' } as const;
+const OF_STRING = { as: 'string' } as const;
+const UNITS_BY = {
+  lightning: { quotient: { as: 'lightning' }, count: { as: 'lightning', heading: 'Units by lightning' } },
+  switching: { quotient: { as: 'switching' }, count: { as: 'switching', heading: 'Units by switching' } },
+} as const;
+
 /** K of the string by what stands around it; says what "open" means. Null where the surroundings are not known. */
 export function stringGapFactor(surroundings: Surroundings | null, calculation: Calculation): number | null {
   if (surroundings === null) return null;
@@ -50,6 +59,47 @@ interface ImpulseCase {
   /** Null where the surroundings are not known. */
   gapFactor: number | null;
   devices: Devices;
+}
+
+/** A level at the site, with what stands around the string. */
+export interface LevelAtSite {
+  withstandKvPeak: number;
+  altitudeFactor: number;
+  gapFactor: number;
+}
+
+/** Dry arc that a lightning level calls for, m. */
+export function lightningArcM({ withstandKvPeak, altitudeFactor, gapFactor }: LevelAtSite, calculation: Calculation) {
+  const fiftyPercentKvPeak = calculation.run(
+    fiftyPercentVoltage,
+    { withstandKvPeak, altitudeFactor, ...SCATTER.fastFront },
+    LIGHTNING_FLASHOVER,
+  );
+  const fastFrontFactor = calculation.run(fastFrontGapFactor, { gapFactor }, OF_STRING);
+  return calculation.run(lightningDryArc, { fiftyPercentKvPeak, fastFrontGapFactor: fastFrontFactor });
+}
+
+/** Dry arc that a switching level calls for, m. */
+export function switchingArcM({ withstandKvPeak, altitudeFactor, gapFactor }: LevelAtSite, calculation: Calculation) {
+  const fiftyPercentKvPeak = calculation.run(
+    fiftyPercentVoltage,
+    { withstandKvPeak, altitudeFactor, ...SCATTER.slowFront },
+    SWITCHING_FLASHOVER,
+  );
+  const withInsulator = calculation.run(insulatorGapFactor, { gapFactor }, OF_STRING);
+  return calculation.run(switchingDryArc, { fiftyPercentKvPeak, insulatorGapFactor: withInsulator });
+}
+
+/** Discs that a dry arc calls for. */
+export function unitsByArc(
+  criterion: 'lightning' | 'switching',
+  dryArcM: number,
+  unit: InsulatorUnit,
+  calculation: Calculation,
+): number {
+  const figures = { dryArcM, allowanceMm: arcAllowanceMm(unit), spacingMm: unit.spacingMm };
+  const quotientRatio = calculation.run(unitsByDryArc, figures, UNITS_BY[criterion].quotient);
+  return calculation.run(countOf, { quotientRatio }, UNITS_BY[criterion].count);
 }
 
 /** What an arc path asks of string and devices once its length is known. */
@@ -82,13 +132,7 @@ function arcDemand(
     if (unit.dryArcMm === null) return notAssessed(criterion, 'mm', 'The dry arc of the rod is not known.');
     return demand({ ...common, providedUnknown });
   }
-  const figures = { dryArcM, allowanceMm: arcAllowanceMm(unit), spacingMm: unit.spacingMm };
-  const quotientRatio = calculation.run(unitsByDryArc, figures, { as: criterion });
-  const requiredUnits = calculation.run(
-    countOf,
-    { quotientRatio },
-    { as: criterion, heading: `Units by ${criterion}` },
-  );
+  const requiredUnits = unitsByArc(criterion, dryArcM, unit, calculation);
   return demand({ ...common, requiredUnits, providedUnknown });
 }
 
@@ -114,13 +158,7 @@ export function lightningDemand(given: ImpulseCase, altitudeFactor: number | nul
   if (lightningKvPeak === null || altitudeFactor === null)
     return notAssessed('lightning', 'mm', 'The lightning level is not filled in.');
   if (gapFactor === null) return notAssessed('lightning', 'mm', SURROUNDINGS_MISSING);
-  const fiftyPercentKvPeak = calculation.run(
-    fiftyPercentVoltage,
-    { withstandKvPeak: lightningKvPeak, altitudeFactor, ...SCATTER.fastFront },
-    { as: 'lightning', heading: 'Lightning flashover (50 %) needed' },
-  );
-  const fastFrontFactor = calculation.run(fastFrontGapFactor, { gapFactor }, { as: 'string' });
-  const dryArcM = calculation.run(lightningDryArc, { fiftyPercentKvPeak, fastFrontGapFactor: fastFrontFactor });
+  const dryArcM = lightningArcM({ withstandKvPeak: lightningKvPeak, altitudeFactor, gapFactor }, calculation);
   if (dryArcM > GAP_LIMITS_M.fastFront) return beyondLaw('lightning', dryArcM, GAP_LIMITS_M.fastFront, calculation);
   return arcDemand('lightning', dryArcM, given, calculation);
 }
@@ -135,13 +173,7 @@ export function switchingDemand(given: ImpulseCase, altitudeFactor: number | nul
   if (switchingKvPeak === null || altitudeFactor === null)
     return notAssessed('switching', 'mm', 'The switching level is not filled in.');
   if (gapFactor === null) return notAssessed('switching', 'mm', SURROUNDINGS_MISSING);
-  const fiftyPercentKvPeak = calculation.run(
-    fiftyPercentVoltage,
-    { withstandKvPeak: switchingKvPeak, altitudeFactor, ...SCATTER.slowFront },
-    { as: 'switching', heading: 'Switching flashover (50 %) needed' },
-  );
-  const withInsulator = calculation.run(insulatorGapFactor, { gapFactor }, { as: 'string' });
-  const dryArcM = calculation.run(switchingDryArc, { fiftyPercentKvPeak, insulatorGapFactor: withInsulator });
+  const dryArcM = switchingArcM({ withstandKvPeak: switchingKvPeak, altitudeFactor, gapFactor }, calculation);
   if (dryArcM > GAP_LIMITS_M.slowFront) return beyondLaw('switching', dryArcM, GAP_LIMITS_M.slowFront, calculation);
   const text =
     'The switching count holds no figure for rain; the wet switching withstand of the complete string is proved by test.';

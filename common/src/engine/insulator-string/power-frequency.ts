@@ -1,4 +1,4 @@
-import type { InsulatorUnit } from '../model';
+import type { InsulatorUnit, StringFlashover } from '../model';
 import type { Situation } from '../situation';
 import { STRING_FLASHOVER_254X146 } from '../standards';
 import type { Calculation } from '../trace';
@@ -21,6 +21,15 @@ function noteRow(unit: InsulatorUnit, units: number, wetKvRms: number, calculati
     unit: 'units',
     source,
   }));
+}
+
+/** The shortest string whose wet flashover reaches what is needed, kV r.m.s.; null where none of them does. */
+export function leastString(strings: readonly StringFlashover[], neededKvRms: number): StringFlashover | null {
+  let least: StringFlashover | null = null;
+  for (const one of strings) {
+    if (one.wetKvRms >= neededKvRms && (least === null || one.units < least.units)) least = one;
+  }
+  return least;
 }
 
 /**
@@ -61,13 +70,9 @@ export function powerFrequencyDemand(
     }
     return demand(common);
   }
-  let least: { units: number; wetKvRms: number } | null = null;
-  let most = 0;
-  for (const one of strings) {
-    most = Math.max(most, one.units);
-    if (one.wetKvRms >= requiredValue && (least === null || one.units < least.units)) least = one;
-  }
+  const least = leastString(strings, requiredValue);
   if (least === null) {
+    const most = Math.max(...strings.map(({ units }) => units));
     return notAssessed(
       'power-frequency',
       UNIT,

@@ -1,3 +1,4 @@
+import type { StringAssessment } from '../insulator-string';
 import { isDisc } from '../insulator-string/unit';
 import type {
   ClearancesResult,
@@ -15,6 +16,8 @@ export interface Checked {
   pollutionClass: PollutionClass | null;
   unit: InsulatorUnit | null;
   string: StringResult | null;
+  /** The string with what each criterion asks of it, for the bridge. */
+  assessment: StringAssessment | null;
   clearances: ClearancesResult | null;
   settings: CompanySettings;
 }

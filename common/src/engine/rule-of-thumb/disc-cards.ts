@@ -4,6 +4,8 @@ import { nextHigherRow, RUS_SUSPENSION_LEVELS, TRADE_DISC_COUNTS } from '../stan
 import type { Calculation } from '../trace';
 import { complete, discReason, NOTHING_TO_COMPARE, roundHalfUp, type Checked } from './card';
 
+/** The card that the bridge starts from. */
+export const DISCS_BY_KV = 'discs-by-15-kv';
 const KV_PER_DISC = 15;
 const DISC_RANGE_KV = { least: 33, most: 230 } as const;
 const DISC_BAND_UNITS = 1;
@@ -23,7 +25,7 @@ export function kvPerDisc(checked: Checked): RuleOfThumbRow[] {
   const units = string?.units ?? null;
   return [
     complete({
-      id: 'discs-by-15-kv',
+      id: DISCS_BY_KV,
       rule: `Discs times ${KV_PER_DISC} kV is about the line voltage`,
       estimate: why === null && nominalKv !== null ? roundHalfUp(nominalKv / KV_PER_DISC) : null,
       given: units,

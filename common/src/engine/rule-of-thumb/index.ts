@@ -1,13 +1,12 @@
 import type { Evaluation } from '../model';
 import type { Calculation } from '../trace';
 import type { Checked } from './card';
+import { bridge } from './bridge';
 import { companyCard } from './company-card';
-import { kvPerDisc, suspensionLevel, usualCounts } from './disc-cards';
+import { DISCS_BY_KV, kvPerDisc, suspensionLevel, usualCounts } from './disc-cards';
 import { gradient, specificCreepage } from './length-cards';
 
 export { companyCardUnits } from './company-card';
-
-const NO_BRIDGE = 'The bridge from the rule to the count is not covered by this method edition.';
 
 /** Every card, with what the sheet has beside it. */
 export function ruleOfThumb(checked: Checked, calculation: Calculation): Evaluation['ruleOfThumb'] {
@@ -19,5 +18,6 @@ export function ruleOfThumb(checked: Checked, calculation: Calculation): Evaluat
     gradient(checked),
     ...checked.settings.ruleCards.map((card) => companyCard(card, checked)),
   ];
-  return { rows, bridge: null, bridgeWhyNot: NO_BRIDGE };
+  const rule = rows.find(({ id }) => id === DISCS_BY_KV);
+  return { rows, ...bridge(checked, rule) };
 }
