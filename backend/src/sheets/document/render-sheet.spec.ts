@@ -153,14 +153,78 @@ describe('the sheet as PDF', () => {
       { cause: 'rule-to-method', units: -1 },
       { cause: 'pollution', units: 3 },
       { cause: 'altitude', units: 0 },
-    ];
-    const ruleOfThumb = { ...evaluation.ruleOfThumb, bridge };
+    ] as const;
+    const ruleOfThumb = { ...evaluation.ruleOfThumb, bridge: [...bridge] };
     const sheet = layOutSheet(contentOf({ ...suspensionCase, evaluation: { ...evaluation, ruleOfThumb } }));
     const words = flat(sheet.elements)
       .map(({ marks }) => wordsOf(marks))
       .join('|');
     expect(words).toMatch(/Rule, 15 kV a disc.*15.*Rule to method.*−1.*14.*Pollution.*\+3.*17.*Specified.*17/);
     expect(words).toContain('never the count');
+  });
+
+  it('carries the mechanical loads by case, with the class they need', () => {
+    const input: SpecificationInput = {
+      ...suspensionCase.input,
+      mechanical: {
+        basis: 'rd-223',
+        subconductors: 2,
+        crossing: true,
+        acceptedStatistically: false,
+        windSpanM: 400,
+        weightSpanM: 480,
+        lineAngleDeg: 0,
+        cases: [
+          {
+            name: 'Wind at -5 degrees',
+            kind: 'wind',
+            conductorWeightNPerM: 14.2,
+            windPressurePa: 600,
+            conductorDiameterMm: 28,
+            conductorTensionN: 30000,
+            stringWindN: 300,
+            stringWeightN: 1200,
+            hardwareWeightN: 400,
+          },
+        ],
+      },
+    };
+    const loads = {
+      name: 'Wind at -5 degrees',
+      kind: 'wind' as const,
+      verticalN: 15232,
+      horizontalN: 13740,
+      loadPerStringN: 20513,
+      loadOneStringMissingN: null,
+      factorRequired: 3.75,
+      factorProvided: 7.8,
+      slackLeg: false,
+      verdict: 'met' as const,
+    };
+    const mechanical = {
+      cases: [loads],
+      governedBy: loads.name,
+      strengthRequiredKn: 76.92,
+      classRequiredKn: 80,
+      coupling: '16',
+    };
+    const evaluation = { ...suspensionCase.evaluation, mechanical };
+    const sheet = layOutSheet(contentOf({ ...suspensionCase, input, evaluation }));
+    const words = flat(sheet.elements)
+      .map(({ marks }) => wordsOf(marks))
+      .join('|');
+    for (const part of [
+      'RD 223/2008',
+      'Wind span',
+      '400 m',
+      '20.6 kN',
+      '3.75',
+      '7.80',
+      '77.0 kN',
+      '80 kN',
+      'coupling 16',
+    ])
+      expect(words).toContain(part);
   });
 
   // Reading a PDF needs a program that not every machine has; what it reads is laid out and checked above in any case.

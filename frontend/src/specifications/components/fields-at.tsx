@@ -1,6 +1,6 @@
-import { fieldOf, type FieldPath } from '@bellgap/common/schemas';
+import { CHOICE_LABELS, fieldOf, type FieldPath } from '@bellgap/common/schemas';
 import type { ReactNode } from 'react';
-import { ChoiceField, DateField, NumberField, type Choice, type FieldWords } from '../../ui/fields';
+import { ChoiceField, DateField, NumberField, TextField, type Choice, type FieldWords } from '../../ui/fields';
 import { useForm, type SpecificationForm } from '../hooks/form-context';
 import { applies } from '../model/applies';
 import { faultAt } from '../model/faults';
@@ -10,7 +10,9 @@ import { choicesOf, valueWords } from '../model/words';
 import { CautionMark } from './caution-mark';
 import { OverrideNote } from './override-note';
 
-export const idOf = (path: string): string => `field-${path.replaceAll('.', '-')}`;
+const YES_NO: Choice[] = Object.entries(CHOICE_LABELS.yesNo).map(([value, label]) => ({ value, label }));
+
+export const idOf = (path: string): string => `field-${path.replace(/[.[\]]+/g, '-')}`;
 
 function marksAt({ marks }: SpecificationForm, path: string): ReactNode {
   const own = marks.filter(({ field }) => field === path);
@@ -56,8 +58,10 @@ function isCarrier(path: string, inheritedPath: string): boolean {
   return path === inheritedPath || path === 'system.overvoltages.slowFrontPhaseToEarthKvPeak';
 }
 
+type RowPath = `mechanical.cases[${number}].${string}`;
+
 interface At {
-  path: FieldPath;
+  path: FieldPath | RowPath;
   note?: ReactNode;
 }
 
@@ -87,6 +91,36 @@ export function DateAt({ path, note }: At) {
       unread={form.values.unread[path]}
       onChange={form.setFigure}
       onLeave={form.leave}
+    />
+  );
+}
+
+export function TextAt({ path, note, maxLength }: At & { maxLength: number }) {
+  const form = useForm();
+  if (!applies(path, form.values, form.unit)) return null;
+  return (
+    <TextField
+      {...wordsAt(form, path, note)}
+      path={path}
+      value={valueAt<string>(form.values, path) ?? ''}
+      maxLength={maxLength}
+      onChange={(at, text) => form.setChoice(at, text === '' ? null : text)}
+      onLeave={form.leave}
+    />
+  );
+}
+
+/** Yes, no, or not known. */
+export function YesNoAt({ path, note }: At) {
+  const { values, setFigure } = useForm();
+  const value = valueAt<boolean>(values, path);
+  return (
+    <ChoiceAt
+      path={path}
+      note={note}
+      choices={YES_NO}
+      value={value === null ? null : value ? 'yes' : 'no'}
+      onChoose={(at, key) => setFigure(at, key === null ? null : key === 'yes')}
     />
   );
 }

@@ -5,6 +5,7 @@ import { fieldPath } from '../model/faults';
 import { valueAt } from '../model/form';
 import { useCatalogue } from '../queries/use-catalogue';
 import { ChoiceAt, DateAt, NumberAt } from './fields-at';
+import { MechanicalGroup } from './mechanical-group';
 import { InsulatorAt, LevelAt, ParallelStringsAt, FrequencyAt } from './looked-up-fields';
 
 const CLOSE = { token: { controlHeight: 28 } };
@@ -19,6 +20,7 @@ export const InputsZone = memo(function InputsZone() {
           <SystemGroup />
           <SiteGroup />
           <StringGroup />
+          <MechanicalGroup />
           <ClearanceGroup />
         </Form>
       </ConfigProvider>
@@ -30,7 +32,7 @@ export const InputsZone = memo(function InputsZone() {
 function OtherFaults() {
   const { faults } = useForm();
   const unclaimed = faults.filter(({ path }) =>
-    /^$|^(input\.)?(mechanical|towerHead|midSpan|bay|kind)/.test(fieldPath(path)),
+    /^$|^(input\.)?(mechanical(\.cases)?$|towerHead|midSpan|bay|kind)/.test(fieldPath(path)),
   );
   if (unclaimed.length === 0) return null;
   return (

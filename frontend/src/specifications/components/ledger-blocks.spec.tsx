@@ -1,6 +1,7 @@
 import { render, screen, within } from '@testing-library/react';
 import { anEvaluation } from '../testing/fake-server';
 import { BridgeBlock } from './bridge-block';
+import { MechanicalBlock } from './mechanical-block';
 import { VoltageBlock } from './voltage-block';
 
 const ruleOfThumb = (given: Partial<ReturnType<typeof anEvaluation>['ruleOfThumb']>) => ({
@@ -13,10 +14,10 @@ describe('from the rule to the count', () => {
     { cause: 'pollution', units: 7 },
     { cause: 'altitude', units: 0 },
     { cause: 'unit', units: -4 },
-  ];
+  ] as const;
 
   it('is a table whose steps add up from the rule to what is specified', () => {
-    render(<BridgeBlock evaluation={anEvaluation(17, ruleOfThumb({ bridge }))} />);
+    render(<BridgeBlock evaluation={anEvaluation(17, ruleOfThumb({ bridge: [...bridge] }))} />);
     const rows = screen.getAllByRole('row').map((row) => row.textContent);
     expect(rows.slice(1)).toEqual([
       'Rule1515',
@@ -55,5 +56,40 @@ describe('voltage along the string', () => {
     });
     render(<VoltageBlock evaluation={evaluation} />);
     expect(screen.getByText(/not assessed: the network describes/)).toBeInTheDocument();
+  });
+});
+
+describe('mechanical loads', () => {
+  const loads = {
+    name: 'Wind',
+    kind: 'wind' as const,
+    verticalN: 15232,
+    horizontalN: 13740,
+    loadPerStringN: 20513,
+    loadOneStringMissingN: 41026,
+    factorRequired: 3.75,
+    factorProvided: 3.1,
+    slackLeg: false,
+    verdict: 'short' as const,
+  };
+
+  it('stand by case with factor, verdict and the class they need', () => {
+    const mechanical = {
+      cases: [loads],
+      governedBy: 'Wind',
+      strengthRequiredKn: 76.92,
+      classRequiredKn: 80,
+      coupling: '16',
+    };
+    render(<MechanicalBlock evaluation={anEvaluation(17, { mechanical })} />);
+    const row = screen.getByRole('row', { name: /Wind/ });
+    expect(row).toHaveTextContent('Wind governswind20.6 kN3.753.10 ✕ short');
+    expect(screen.getByText(/one string missing/)).toHaveTextContent('41.1 kN');
+    expect(screen.getByText('coupling 16').closest('div')).toHaveTextContent('80 kN');
+  });
+
+  it('are not there where none are filled in', () => {
+    const { container } = render(<MechanicalBlock evaluation={anEvaluation(17)} />);
+    expect(container).toBeEmptyDOMElement();
   });
 });

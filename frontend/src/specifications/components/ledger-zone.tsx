@@ -8,6 +8,7 @@ import { CreepageBlock } from './creepage-block';
 import { CriteriaBlock } from './criteria-block';
 import { LengthsBlock } from './lengths-block';
 import { TestLevelsBlock, UnitsOutBlock } from './proof-blocks';
+import { MechanicalBlock } from './mechanical-block';
 import { RuleCards } from './rule-cards';
 import { VoltageBlock } from './voltage-block';
 
@@ -28,6 +29,7 @@ export const LedgerZone = memo(function LedgerZone({ answer, unit }: Properties)
           <CautionsBlock evaluation={evaluation} />
           <CreepageBlock evaluation={evaluation} input={input} />
           <LengthsBlock evaluation={evaluation} />
+          <MechanicalBlock evaluation={evaluation} />
           <VoltageBlock evaluation={evaluation} />
         </>
       )}

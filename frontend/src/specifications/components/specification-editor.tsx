@@ -92,7 +92,7 @@ export function SpecificationEditor({ first }: Properties) {
     [evaluation],
   );
   const leave = useCallback(() => void save(false), [save]);
-  const { setFigure, setChoice, setReason, setTitle, backToBasis } = setters;
+  const { change, setFigure, setChoice, setReason, setTitle, backToBasis } = setters;
   const context = useMemo<SpecificationForm>(
     () => ({
       values,
@@ -102,13 +102,28 @@ export function SpecificationEditor({ first }: Properties) {
       faults,
       marks,
       leave,
+      change,
       setFigure,
       setChoice,
       setReason,
       setTitle,
       backToBasis,
     }),
-    [values, basis, unit, readOnly, faults, marks, leave, setFigure, setChoice, setReason, setTitle, backToBasis],
+    [
+      values,
+      basis,
+      unit,
+      readOnly,
+      faults,
+      marks,
+      leave,
+      change,
+      setFigure,
+      setChoice,
+      setReason,
+      setTitle,
+      backToBasis,
+    ],
   );
 
   /** Begins anew from a version of the server, with the form holding `next`. */

@@ -17,6 +17,8 @@ export interface SpecificationForm {
   setReason: (path: string, reason: string) => void;
   setTitle: (title: string) => void;
   backToBasis: (path: string) => void;
+  /** Any other change of the form, such as rows that come and go. */
+  change: (next: (now: FormValues) => FormValues) => void;
   leave: () => void;
 }
 

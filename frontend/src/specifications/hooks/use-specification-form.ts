@@ -51,5 +51,5 @@ export function useSpecificationForm(revision: Revision, basis: PinnedBasis | nu
     [basis, change],
   );
   const replace = useCallback((next: FormValues) => change(() => next), [change]);
-  return { values, setFigure, setChoice, setReason, setTitle, backToBasis, replace };
+  return { values, change, setFigure, setChoice, setReason, setTitle, backToBasis, replace };
 }

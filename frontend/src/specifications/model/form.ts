@@ -110,7 +110,8 @@ function pollutionOf(input: Tree, given: Tree): Tree {
 export function inputOf(values: FormValues, unit: InsulatorUnit | null): SpecificationInput {
   let input = values.input as Tree;
   for (const path of CONDITIONAL_PATHS) {
-    if (getIn(input, path) !== null && !applies(path, values, unit)) input = setIn(input, path, null) as Tree;
+    if (((getIn(input, path) as unknown) ?? null) !== null && !applies(path, values, unit))
+      input = setIn(input, path, null) as Tree;
   }
   const system = { ...(input.system as Tree) };
   if (allNull(system.overvoltages)) delete system.overvoltages;
@@ -122,6 +123,7 @@ export function inputOf(values: FormValues, unit: InsulatorUnit | null): Specifi
   };
   if (input.kind === 'bay' && allNull(input.string)) delete next.string;
   if (allNull(input.clearance)) delete next.clearance;
+  if (input.kind === 'bay' || (input.mechanical ?? null) === null) delete next.mechanical;
   return next as unknown as SpecificationInput;
 }
 

@@ -33,7 +33,7 @@ const LINES: readonly (readonly [figure: RegExp, line: RegExp])[] = [
   [/^string\.stringLengthWithFittings$/, /^string\.(spacing-tolerance|section-length|length)/],
   [/^string\.dryArcRequiredMm$/, /^air-gaps\.(lightning|switching)-dry-arc|^air-gaps\.fifty-percent-voltage/],
   [/^string\.(voltageSharing|efficiencyPercent)$/, /^string-voltage\./],
-  [/^mechanical(\.|$)/, /^mechanical\./],
+  [/^mechanical\.class$/, /^mechanical\.(class|strength)/],
   [/^string\.coordination$/, /^string\.external-clearance/],
   [/^string\.testLevels\.lightning$/, /^(string\.test-level|atmosphere\.altitude-factor):(string-)?lightning$/],
   [/^string\.testLevels\.switching$/, /^(string\.test-level|atmosphere\.altitude-factor):(string-)?switching$/],
@@ -49,6 +49,7 @@ const LINES: readonly (readonly [figure: RegExp, line: RegExp])[] = [
 const NOT_OF_CRITERIA = /^string\.test-level/;
 
 const ROW = 'clearances.row:';
+const CASE = 'mechanical.case-';
 const DISTANCE_WORDS: Record<string, string> = {
   'phase-to-earth': 'phase to earth',
   'phase-to-phase': 'between phases',
@@ -62,6 +63,15 @@ export function clearanceName({
   shape,
 }: Pick<ClearanceRow, 'method' | 'distance' | 'stress' | 'shape'>): string {
   return ROW + [method, distance, stress, ...(shape === null ? [] : [shape])].join(':');
+}
+
+/** Name of the loads of a case, by its place in the list. */
+export const caseName = (index: number): string => `${CASE}${index + 1}`;
+
+function isOfCase(name: string, id: string): boolean {
+  const use = id.slice(id.indexOf(':') + 1);
+  const own = name.slice('mechanical.'.length);
+  return id.startsWith('mechanical.') && (use === own || use.startsWith(`${own}-`));
 }
 
 /** All lines of one row: what reads the table or the formula, the altitude, and the distance itself. */
@@ -85,11 +95,12 @@ function isOfRow(name: string, id: string): boolean {
 }
 
 export function hasTrace(name: string): boolean {
-  return name.startsWith(ROW) || LINES.some(([figure]) => figure.test(name));
+  return name.startsWith(ROW) || name.startsWith(CASE) || LINES.some(([figure]) => figure.test(name));
 }
 
 export function traceLinesOf(name: string, lines: readonly TraceLine[]): TraceLine[] {
   if (name.startsWith(ROW)) return lines.filter(({ id }) => isOfRow(name, id));
+  if (name.startsWith(CASE)) return lines.filter(({ id }) => isOfCase(name, id));
   const wanted = LINES.filter(([figure]) => figure.test(name)).map(([, line]) => line);
   const isCriterion = name.startsWith('string.criteria.');
   return lines.filter(({ id }) => wanted.some((line) => line.test(id)) && !(isCriterion && NOT_OF_CRITERIA.test(id)));

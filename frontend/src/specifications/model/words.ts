@@ -1,7 +1,7 @@
 import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
 import type { Criterion, Evaluation, InsulatorUnit, SpecificationInput } from '@bellgap/common/api';
 import { levelWords } from './levels';
-import type { InsulationLevelInput } from '@bellgap/common/api';
+import type { InsulationLevelInput, LoadCaseInput } from '@bellgap/common/api';
 
 const CHOICES: Record<string, Record<string, string>> = {
   kind: CHOICE_LABELS.kind,
@@ -15,6 +15,8 @@ const CHOICES: Record<string, Record<string, string>> = {
   'string.arrangement': CHOICE_LABELS.arrangement,
   'string.surroundings': CHOICE_LABELS.surroundings,
   'string.arcingDevices': CHOICE_LABELS.arcingDevices,
+  'mechanical.basis': CHOICE_LABELS.mechanicalBasis,
+  'mechanical.cases.kind': CHOICE_LABELS.loadCaseKind,
   'clearance.method': CHOICE_LABELS.clearanceMethod,
   'clearance.shapePhaseToEarth': CHOICE_LABELS.shapePhaseToEarth,
   'clearance.shapePhaseToPhase': CHOICE_LABELS.shapePhaseToPhase,
@@ -44,7 +46,7 @@ const SHORT: Record<string, Record<string, string>> = {
 
 /** The choices of a field in the order and words in which they are offered. */
 export function choicesOf(path: string): { value: string; label: string; short?: string }[] {
-  return Object.entries(CHOICES[path] ?? {}).map(([value, label]) => {
+  return Object.entries(CHOICES[path.replace(/\[\d+\]/g, '')] ?? {}).map(([value, label]) => {
     const short = SHORT[path]?.[value];
     return short === undefined ? { value, label } : { value, label, short };
   });
@@ -54,11 +56,23 @@ export function choicesOf(path: string): { value: string; label: string; short?:
 export function valueWords(path: string, value: unknown): string {
   if (value === null || value === undefined || value === '') return 'not known';
   if (path === 'system.insulationLevel') return levelWords(value as InsulationLevelInput) || 'not known';
+  if (typeof value === 'boolean') return value ? CHOICE_LABELS.yesNo.yes : CHOICE_LABELS.yesNo.no;
+  if (path === 'mechanical.cases') return caseListWords(value as LoadCaseInput[]);
   if (typeof value !== 'string' && typeof value !== 'number') return JSON.stringify(value);
   const choice = CHOICES[path]?.[value];
   if (choice !== undefined) return choice;
   const unit = fieldOf(path)?.unit;
   return unit === undefined ? String(value) : `${value} ${unit}`;
+}
+
+function caseListWords(cases: readonly LoadCaseInput[]): string {
+  const figures = (one: LoadCaseInput): string =>
+    Object.entries(one)
+      .flatMap(([name, value]) =>
+        typeof value === 'number' ? [`${fieldOf(`mechanical.cases.${name}`)?.label ?? name} ${value}`] : [],
+      )
+      .join(', ');
+  return cases.map((one, index) => `${one.name ?? `case ${index + 1}`}: ${figures(one)}`).join('; ') || 'none';
 }
 
 /** Kind of string in words: "single suspension string, 160 kN, coupling 20". */

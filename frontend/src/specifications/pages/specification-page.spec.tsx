@@ -164,6 +164,19 @@ describe('fields that apply', () => {
   });
 });
 
+describe('mechanical loads', () => {
+  it('show a fault of the server beside its row', async () => {
+    server.evaluate = () =>
+      problem(422, 'validation', {
+        errors: [{ path: 'input.mechanical.cases[0].kind', message: 'This kind is not one of the basis' }],
+      });
+    await openPage();
+    await user.click(screen.getByText('Add loads'));
+    const fault = await screen.findByText('This kind is not one of the basis');
+    expect(fault.closest('[data-field]')).toHaveAttribute('data-field', 'field-mechanical-cases-0-kind');
+  });
+});
+
 describe('a draft saves itself', () => {
   it('after a pause, passively, from the version it began with, and says when', async () => {
     await openPage();

@@ -3,6 +3,7 @@ import type { SheetContent } from '../content';
 import { calculation } from './calculation';
 import { cautions } from './cautions';
 import { clearances } from './clearances';
+import { mechanical } from './mechanical';
 import { notAssessed } from './not-assessed';
 import { overrides } from './overrides';
 import { particulars } from './particulars';
@@ -14,6 +15,7 @@ import { supplierProof } from './supplier-proof';
 /** What follows the first page, in its order. */
 const SECTIONS: ((content: SheetContent) => Block[])[] = [
   clearances,
+  mechanical,
   supplierProof,
   ruleOfThumb,
   calculation,
