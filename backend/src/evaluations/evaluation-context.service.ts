@@ -24,10 +24,15 @@ export class EvaluationContextService {
   async recent(input: SpecificationInput): Promise<EvaluationContext> {
     const code = input.string?.insulatorCode;
     const [rules, insulator] = await Promise.all([
-      this.rules.get('', () => this.readRules()),
+      this.recentRules(),
       code ? this.units.get(code, () => this.catalogue.findInsulator(code)) : null,
     ]);
     return { insulator, ...rules };
+  }
+
+  /** The company's settings and the confirmations, a few seconds old at most. */
+  recentRules(): Promise<Omit<EvaluationContext, 'insulator'>> {
+    return this.rules.get('', () => this.readRules());
   }
 
   /** For what is stored: read in the transaction of the save. */

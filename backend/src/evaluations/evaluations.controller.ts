@@ -1,5 +1,5 @@
 import { Body, Controller } from '@nestjs/common';
-import type { BodyOf, SpecificationInput } from '@bellgap/common/api';
+import type { BodyOf, SpecificationInput, WorksheetInput } from '@bellgap/common/api';
 import { contract } from '@bellgap/common/api';
 import { Route } from '../platform/route';
 import { EvaluationsService } from './evaluations.service';
@@ -16,6 +16,11 @@ export class EvaluationsController {
   @Route(contract.evaluateBatch)
   evaluateBatch(@Body() { inputs, trace = true }: BodyOf<typeof contract.evaluateBatch>) {
     return this.evaluations.evaluateAll(inputs as SpecificationInput[], { trace });
+  }
+
+  @Route(contract.insulationLevelWorksheet)
+  worksheet(@Body() body: BodyOf<typeof contract.insulationLevelWorksheet>) {
+    return this.evaluations.worksheet(body as WorksheetInput);
   }
 
   @Route(contract.sweep)

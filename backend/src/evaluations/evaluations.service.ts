@@ -6,9 +6,19 @@ import type {
   SpecificationInput,
   Sweep,
   WhatIf,
+  WorksheetAnswer,
+  WorksheetInput,
   contract,
 } from '@bellgap/common/api';
-import { evaluate, inputFaults, isPollutionClass, nextProfileOf, sweep, whatIf } from '@bellgap/common/engine';
+import {
+  evaluate,
+  inputFaults,
+  insulationLevelWorksheet,
+  isPollutionClass,
+  nextProfileOf,
+  sweep,
+  whatIf,
+} from '@bellgap/common/engine';
 import { CatalogueService } from '../catalogue/catalogue.service';
 import { invalid } from '../platform/domain-error';
 import type { Database } from '../platform/knex';
@@ -49,6 +59,12 @@ export class EvaluationsService {
   async evaluateForStore(input: SpecificationInput, db: Database): Promise<Evaluated> {
     const context = await this.contexts.now(input, db);
     return { context, evaluation: answer(input, context, true, 'input') };
+  }
+
+  /** The insulation level step by step, with the company's own rows beside the table's. */
+  async worksheet(input: WorksheetInput): Promise<WorksheetAnswer> {
+    const { settings, confirmations } = await this.contexts.recentRules();
+    return insulationLevelWorksheet(input, { companyLevels: settings.insulationLevels, confirmations });
   }
 
   /** Units by altitude and class, all from one look at the catalogue and the company's rules. */

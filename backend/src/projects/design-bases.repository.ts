@@ -3,7 +3,7 @@ import type { Knex } from 'knex';
 import type { DesignBasis } from '@bellgap/common/api';
 import { KNEX } from '../platform/knex';
 
-export type BasisContent = Pick<DesignBasis, 'number' | 'basis' | 'system' | 'rules' | 'note'>;
+export type BasisContent = Pick<DesignBasis, 'number' | 'basis' | 'system' | 'rules' | 'worksheet' | 'note'>;
 
 interface BasisRow {
   id: string;
@@ -12,6 +12,7 @@ interface BasisRow {
   basis: string;
   system: DesignBasis['system'];
   rules: DesignBasis['rules'];
+  worksheet: DesignBasis['worksheet'];
   note: string;
   created_at: Date;
   created_by: string | null;
@@ -43,6 +44,7 @@ export class DesignBasesRepository {
       basis: basis.basis,
       system: JSON.stringify(basis.system),
       rules: JSON.stringify(basis.rules),
+      worksheet: basis.worksheet ? JSON.stringify(basis.worksheet) : null,
       note: basis.note,
       created_by: basis.by,
       created_at: basis.at,
@@ -60,6 +62,7 @@ export class DesignBasesRepository {
         'b.basis',
         'b.system',
         'b.rules',
+        'b.worksheet',
         'b.note',
         'b.created_at',
         'by.name as created_by',

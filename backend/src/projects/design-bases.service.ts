@@ -47,7 +47,11 @@ export class DesignBasesService {
         });
       }
       await this.refuseUnreadable(given, db);
-      const content = { ...given, system: given.system as System };
+      const content = {
+        ...given,
+        system: given.system as System,
+        worksheet: (given.worksheet ?? null) as DesignBasis['worksheet'],
+      };
       const changes = changesBetween(before ? contentOf(before) : {}, content);
       if (before && Object.keys(changes).length === 0) return before;
       const next = { ...content, projectId: project.id, revision: revision + 1, by: person.id, at: this.clock.now() };
@@ -74,6 +78,6 @@ export class DesignBasesService {
   }
 }
 
-function contentOf({ number, basis, system, rules, note }: DesignBasis) {
-  return { number, basis, system, rules, note };
+function contentOf({ number, basis, system, rules, worksheet, note }: DesignBasis) {
+  return { number, basis, system, rules, worksheet, note };
 }

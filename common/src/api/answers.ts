@@ -7,6 +7,7 @@ import {
   INSULATOR_PROFILES,
   STATUSES,
 } from '../engine/model';
+import type { WorksheetInput } from '../engine/worksheet-model';
 import { companySettingsSchema } from '../schemas/company-settings';
 import { PAPERS, PROJECT_KINDS, basisRulesSchema } from '../schemas/projects';
 import { overrideSchema } from '../schemas/specifications';
@@ -144,6 +145,8 @@ export const designBasisAnswer = yup
     basis: yup.string().required(),
     system: engineValue<NonNullable<SpecificationInput['system']>>(),
     rules: basisRulesSchema.required(),
+    /** What the insulation level was worked out from; in the history of a basis, null where it was known. */
+    worksheet: yup.mixed<WorksheetInput & object>().nullable().optional(),
     note: words(),
     createdAt: instant(),
     createdBy: nullableText(),

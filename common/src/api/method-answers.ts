@@ -1,5 +1,7 @@
 import * as yup from 'yup';
+import type { AltitudeConvention } from '../engine/altitude-conventions';
 import { CRITERIA, SEVERITIES, STATUSES } from '../engine/model';
+import type { WorksheetAnswer } from '../engine/worksheet-model';
 import { caseFiguresSchema, CONFIRMATION_OUTCOMES, revisionNoteSchema, SWEEP_CLASSES } from '../schemas/method';
 
 /** Answers about the method itself: its tables and formulas, its known answers, and what would be if. */
@@ -148,6 +150,38 @@ export const tableAnswer = yup
   .required();
 export type TableDetails = yup.InferType<typeof tableAnswer>;
 
+/** What a factor for thin air is applied to, in words. */
+export const ALTITUDE_ACTION_LABELS: Record<AltitudeConvention['action'], string> = {
+  'multiplies-voltage': 'multiplies the required voltage',
+  'multiplies-creepage': 'multiplies the required creepage',
+  'multiplies-strength': 'multiplies the strength of the gap',
+  'multiplies-distance': 'multiplies the distance',
+  'divides-distance': 'divides the distance',
+};
+
+export const altitudeConventionAnswer = yup
+  .object({
+    id: words(),
+    title: words(),
+    action: yup
+      .string()
+      .oneOf(Object.keys(ALTITUDE_ACTION_LABELS) as AltitudeConvention['action'][])
+      .required(),
+    originM: number(),
+    /** Null where the source names no end. */
+    validUpToM: nullableNumber(),
+    /** As the source itself has it; null beyond its end. */
+    sourceFactor: nullableNumber(),
+    /** What is required at this altitude over what is required at 1000 m. */
+    increaseFactor: nullableNumber(),
+    source: yup
+      .object({ document: words(), edition: words(), clause: words(), status: status() })
+      .noUnknown()
+      .required(),
+  })
+  .noUnknown();
+export type AltitudeConventionRow = yup.InferType<typeof altitudeConventionAnswer>;
+
 export const knownAnswersAnswer = yup
   .object({
     methodEdition: words(),
@@ -266,6 +300,9 @@ export const whatIfAnswer = yup
   .noUnknown()
   .required();
 export type WhatIf = yup.InferType<typeof whatIfAnswer>;
+
+/** The worksheet of the insulation level, as the engine's own types describe it. */
+export const worksheetAnswer = yup.mixed<WorksheetAnswer & object>().required();
 
 export const revisionNoteAnswer = yup
   .object({

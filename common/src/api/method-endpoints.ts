@@ -1,7 +1,9 @@
 import * as yup from 'yup';
 import { revisionNoteSchema, sweepSchema, tableConfirmationSchema, whatIfSchema } from '../schemas/method';
+import { worksheetInputSchema } from '../schemas/worksheet';
 import { endpoint } from './endpoint';
 import {
+  altitudeConventionAnswer,
   knownAnswersAnswer,
   revisionNoteAnswer,
   sweepAnswer,
@@ -9,6 +11,7 @@ import {
   tableConfirmationAnswer,
   tableEntryAnswer,
   whatIfAnswer,
+  worksheetAnswer,
 } from './method-answers';
 import { DRAFT_READERS } from './roles';
 
@@ -49,6 +52,22 @@ export const methodEndpoints = {
     answer: tableConfirmationAnswer.required(),
     success: 201,
   }),
+  altitudeConventions: endpoint({
+    method: 'GET',
+    path: '/altitude-conventions',
+    summary: 'How each source reckons with thin air at an altitude, side by side',
+    access: 'signed-in',
+    query: yup
+      .object({
+        altitudeM: yup
+          .string()
+          .matches(/^-?\d{1,4}(\.\d{1,3})?$/, 'Altitude: a number in metres is needed')
+          .required('Altitude: is needed'),
+      })
+      .noUnknown(),
+    answer: yup.array().of(altitudeConventionAnswer.required()).required(),
+    success: 200,
+  }),
   runKnownAnswers: endpoint({
     method: 'POST',
     path: '/known-answers/runs',
@@ -73,6 +92,15 @@ export const methodEndpoints = {
     access: 'signed-in',
     body: whatIfSchema,
     answer: whatIfAnswer,
+    success: 200,
+  }),
+  insulationLevelWorksheet: endpoint({
+    method: 'POST',
+    path: '/worksheets/insulation-level',
+    summary: 'Work out an insulation level step by step; nothing is stored',
+    access: 'signed-in',
+    body: worksheetInputSchema,
+    answer: worksheetAnswer,
     success: 200,
   }),
   revisionNotes: endpoint({

@@ -2,6 +2,7 @@ import * as yup from 'yup';
 import { BASES } from '../engine/model';
 import { plainText, requiredText } from './parts';
 import { systemSchema } from './specification-input';
+import { worksheetInputSchema } from './worksheet';
 
 export const PROJECT_KINDS = ['line', 'yard'] as const;
 export const PAPERS = ['A4', 'Letter'] as const;
@@ -77,6 +78,8 @@ export const designBasisSchema = yup
       .required('Basis: is needed'),
     system: systemSchema.required(),
     rules: basisRulesSchema.required(),
+    /** What the insulation level was worked out from; left out or null where it was known. */
+    worksheet: worksheetInputSchema.nullable().optional().default(undefined),
     note: plainText('What changed and why', 2000).defined(),
   })
   .noUnknown();
