@@ -3,7 +3,7 @@ import { begin, lineInput, makeLine } from './support/line-project';
 import { TestApp } from './support/test-app';
 import type { TestClient } from './support/test-client';
 
-const { tables, table, tableConfirmations, confirmTable, evaluate, saveRevision } = contract;
+const { altitudeConventions, tables, table, tableConfirmations, confirmTable, evaluate, saveRevision } = contract;
 
 const USCD_D = 'iec-ts-60815:uscd:d';
 const CONFIRMED = {
@@ -41,6 +41,18 @@ describe('tables and formulas', () => {
       expect(Object.values(statusCounts).reduce((sum, count) => sum + count)).toBe(rowCount);
       for (const text of [usedFor, document, clause]) expect(text.length).toBeGreaterThan(2);
     }
+  });
+
+  it('sets the ways of the sources with thin air side by side, and gives no figure past the end of one', async () => {
+    const { status, answer } = await reader.call(altitudeConventions, { query: { altitudeM: '2000' } });
+    expect(status).toBe(200);
+    const at = (id: string) => answer.find((one) => one.id === id);
+    // IEC 62271-1: 1.13 at 2000 m; RD 337/2014 ITC-RAT 12, 3.3.3: 1.14.
+    expect(at('exponent-1')?.increaseFactor).toBeCloseTo(1.13, 2);
+    expect(at('rd-337')?.increaseFactor).toBeCloseTo(1.14, 9);
+    const higher = (await reader.call(altitudeConventions, { query: { altitudeM: '3500' } })).answer;
+    expect(higher.find(({ id }) => id === 'rd-337')?.increaseFactor).toBeNull();
+    expect((await reader.call(altitudeConventions, { query: { altitudeM: 'high' } })).status).toBe(422);
   });
 
   it('opens each one of the list', async () => {

@@ -1,5 +1,5 @@
-import { Body, Controller, Param } from '@nestjs/common';
-import type { BodyOf } from '@bellgap/common/api';
+import { Body, Controller, Param, Query } from '@nestjs/common';
+import type { BodyOf, QueryOf } from '@bellgap/common/api';
 import { contract } from '@bellgap/common/api';
 import { CurrentPerson, type SignedIn } from '../platform/person';
 import { Route } from '../platform/route';
@@ -17,6 +17,11 @@ export class TablesController {
   @Route(contract.table)
   get(@Param('key') key: string) {
     return this.tables.get(key);
+  }
+
+  @Route(contract.altitudeConventions)
+  altitudeConventions(@Query() { altitudeM }: QueryOf<typeof contract.altitudeConventions>) {
+    return this.tables.altitudeConventions(Number(altitudeM));
   }
 
   @Route(contract.tableConfirmations)

@@ -1,5 +1,6 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { BodyOf, RecordedConfirmation, TableDetails, TableEntry, contract } from '@bellgap/common/api';
+import { altitudeConventions, type AltitudeConvention } from '@bellgap/common/engine';
 import { AuditService } from '../audit/audit.service';
 import { Clock } from '../platform/clock';
 import { invalidAt, notFound } from '../platform/domain-error';
@@ -32,6 +33,10 @@ export class TablesService {
     const formula = FORMULAS.find((one) => one.definition.id === key);
     if (formula) return formulaDetails(formula, words);
     throw notFound('table or formula');
+  }
+
+  async altitudeConventions(altitudeM: number): Promise<AltitudeConvention[]> {
+    return altitudeConventions(altitudeM, [...(await this.words()).values()]);
   }
 
   confirmations(): Promise<RecordedConfirmation[]> {

@@ -11,11 +11,20 @@ import { Sheet } from '../../ui/page/sheet';
 import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
 import { ConfirmationDialog, type Recordable } from '../components/confirmation-dialog';
+import { ConventionsSheet } from '../components/conventions-sheet';
 import { FormulaSheet } from '../components/formula-sheet';
 import { RecordsSheet } from '../components/records-sheet';
 import { TableRows } from '../components/table-rows';
 import { countsText, documentText, KIND_LABELS, RULE_LABELS } from '../model/entries';
 import './reference.css';
+
+/** Entries of which others say something else: beside them all ways stand side by side. */
+const ABOUT_THIN_AIR: ReadonlySet<string> = new Set([
+  'atmosphere.altitude-factor',
+  'en-50341-1:altitude',
+  'national:altitude-rules',
+  'c37.30:altitude',
+]);
 
 function EntryView({ entry }: { entry: TableDetails }) {
   const mayRecord = holds(usePerson(), ['administrator']);
@@ -53,6 +62,7 @@ function EntryView({ entry }: { entry: TableDetails }) {
         </Sheet>
       )}
       {formula && <FormulaSheet entry={entry} formula={formula} record={record} />}
+      {ABOUT_THIN_AIR.has(entry.key) && <ConventionsSheet />}
       <RecordsSheet entry={entry} />
       {mayRecord && <ConfirmationDialog of={recording} close={() => setRecording(null)} />}
     </Page>

@@ -1,5 +1,5 @@
 import { contract, type TableDetails, type TableEntry } from '@bellgap/common/api';
-import { screen, waitFor, within } from '@testing-library/react';
+import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { aPerson } from '../../testing/builders';
 import { FakeServer } from '../../testing/fake-server';
 import { openPage } from '../../testing/open-page';
@@ -85,6 +85,18 @@ const serverFor = (roles: ReturnType<typeof aPerson>['roles']) =>
     .on(contract.currentSession, () => ({ user: aPerson({ roles }) }))
     .on(contract.tables, () => [USCD, ALTITUDE])
     .on(contract.table, ({ params }) => (params.key === USCD.key ? USCD_DETAILS : ALTITUDE_DETAILS))
+    .on(contract.altitudeConventions, ({ query }) => [
+      {
+        id: 'rd-337',
+        title: 'Spain',
+        action: 'multiplies-distance',
+        originM: 1000,
+        validUpToM: 3000,
+        sourceFactor: query.get('altitudeM') === '2000' ? 1.14 : null,
+        increaseFactor: query.get('altitudeM') === '2000' ? 1.14 : null,
+        source: { document: 'RD 337/2014', edition: '', clause: 'clearance', status: 'seen' },
+      },
+    ])
     .on(contract.tableConfirmations, () => []);
 
 describe('tables', () => {
@@ -118,6 +130,19 @@ describe('tables', () => {
     expect(screen.queryByRole('button', { name: /Record/ })).not.toBeInTheDocument();
   });
 
+  it('set the ways with thin air side by side, for the altitude asked', async () => {
+    const server = serverFor(['reader']);
+    const { user } = openPage('/tables/atmosphere.altitude-factor');
+    const row = async () => (await screen.findByText('Spain')).closest('tr')?.textContent;
+    expect(await row()).toBe('Spainmultiplies the distance1,0003,0001.1401.140RD 337/2014, clearanceseen');
+    await user.clear(screen.getByLabelText(/^Altitude/));
+    await user.type(screen.getByLabelText(/^Altitude/), '3500');
+    await waitFor(async () =>
+      expect(await row()).toBe('Spainmultiplies the distance1,0003,000——RD 337/2014, clearanceseen'),
+    );
+    expect(server.requestsTo(contract.altitudeConventions).at(-1)?.query.get('altitudeM')).toBe('3500');
+  });
+
   it('let the administrator record that the print differs, with what it says', async () => {
     const server = serverFor(['administrator']).on(contract.confirmTable, ({ body }) => ({
       ...(body as object),
@@ -126,19 +151,23 @@ describe('tables', () => {
       recordedAt: '2026-03-01T09:00:00Z',
     }));
     const { user } = openPage('/tables/iec-ts-60815%3Auscd');
-    await user.click(await screen.findByRole('button', { name: 'Record what the print says: Pollution class a' }));
-    const dialog = within(await screen.findByRole('dialog'));
-    await user.click(dialog.getByRole('combobox', { name: 'Outcome' }));
+    await user.click(await screen.findByLabelText('Record what the print says: Pollution class a'));
+    const dialog = within(await screen.findByLabelText('Record'));
+    const fill = async (label: string, words: string) => {
+      await user.click(dialog.getByLabelText(label));
+      await user.paste(words);
+    };
+    await user.click(dialog.getByLabelText('Outcome'));
     await user.click(await screen.findByText('The print differs'));
-    await user.type(dialog.getByLabelText('Edition'), '2008');
-    await user.type(dialog.getByLabelText('Page'), '14');
-    await user.type(dialog.getByLabelText('Date'), '2026-03-01');
-    await user.click(dialog.getByRole('button', { name: 'Record' }));
+    await fill('Edition', '2008');
+    await fill('Page', '14');
+    fireEvent.change(dialog.getByLabelText('Date'), { target: { value: '2026-03-01' } });
+    await user.click(dialog.getByText('Record'));
     expect(await dialog.findByText('What the print says is needed')).toBeInTheDocument();
     expect(server.requestsTo(contract.confirmTable)).toEqual([]);
 
-    await user.type(dialog.getByLabelText('Note'), '22.1 mm per kV');
-    await user.click(dialog.getByRole('button', { name: 'Record' }));
+    await fill('Note', '22.1 mm per kV');
+    await user.click(dialog.getByText('Record'));
     await waitFor(() => expect(server.requestsTo(contract.confirmTable)).toHaveLength(1));
     expect(server.requestsTo(contract.confirmTable)[0]?.body).toEqual({
       key: 'iec-ts-60815:uscd:a',
