@@ -9,6 +9,8 @@ export * from './names';
 export * from './overvoltage';
 export { unitOf } from './quantities';
 export * from './severity';
+export { flashoverRisk } from './risk';
+export * from './risk/model';
 export * from './sources';
 export * from './standards';
 export * from './standards/uses';

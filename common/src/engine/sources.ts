@@ -33,6 +33,8 @@ export const ANSI_C29_2 = { document: 'ANSI C29.2', edition: '1992' } as const;
 export const GB_T_16434 = { document: 'GB/T 16434', edition: '1996' } as const;
 /** Capacitance network of a string of discs as textbooks of power systems have it. */
 export const TEXTBOOK_NETWORK = { document: 'Textbooks of power systems', edition: '' } as const;
+/** Switching-surge flashover rate of lines and its estimate by a step, as handbooks of insulation co-ordination have it. */
+export const SWITCHING_SURGE_RATE = { document: 'Handbooks of insulation co-ordination', edition: '' } as const;
 /** Definitions and plain arithmetic on figures that carry their own sources. */
 export const DEFINITION = { document: 'Definition', edition: '' } as const;
 /** Common practice without a published source. */

@@ -8,3 +8,4 @@ export * from './projects';
 export * from './specifications';
 export * from './standing-cautions';
 export * from './worksheet';
+export * from './risk';

@@ -4,6 +4,7 @@ import type { KnownAnswer } from './known-answer';
 import { LEVELS_AND_CLEARANCES } from './levels-and-clearances';
 import { LINE_CLEARANCES } from './line-clearances';
 import { LOADS } from './loads';
+import { RISK } from './risk';
 import { COUNTS_IN_SERVICE } from './rules-of-thumb';
 import { STRING_VOLTAGE } from './string-voltage';
 import { WORKSHEET } from './worksheet';
@@ -21,4 +22,5 @@ export const KNOWN_ANSWERS: Readonly<Record<string, readonly KnownAnswer[]>> = {
   'Loads on the string': LOADS,
   'Units in service': COUNTS_IN_SERVICE,
   'Voltage along the string': STRING_VOLTAGE,
+  'Risk of flashover': RISK,
 };

@@ -17,8 +17,9 @@ const WORDS: Record<string, (...args: number[]) => number> = {
 
 /** Evaluates what a formula shows, by a general-purpose parser (mathjs), so that a test can compare it with what is run. */
 export async function evaluateExpression(expression: string, figures: Record<string, number>): Promise<number> {
-  const { evaluate } = await import('mathjs');
-  const value: unknown = evaluate(expression, { ...WORDS, ...figures });
+  const { evaluate, erf } = await import('mathjs');
+  const Phi = (z: number): number => (1 + erf(z / Math.SQRT2)) / 2;
+  const value: unknown = evaluate(expression, { ...WORDS, Phi, ...figures });
   if (typeof value !== 'number') throw new Error(`${expression} is no number`);
   return value;
 }

@@ -1,0 +1,3 @@
+export * from './flashover-risk';
+export * from './formulas';
+export * from './model';
