@@ -55,6 +55,7 @@ export const httpFigures: readonly Figure[] = [
         return await sideBySide(
           overHttp(Number(new URL(url).port), requests, CONNECTIONS),
           overHttp(bare.port, requests, CONNECTIONS),
+          { warmUpRuns: 10_000 },
         );
       } finally {
         bare.stop();
