@@ -162,6 +162,17 @@ export const CHOICE_LABELS = {
     extreme: 'Extreme wind or ice',
     'broken-string': 'One string broken',
   },
+  safetyKind: {
+    'mesh-or-screen': 'Behind mesh or screen',
+    'indoor-obstacle': 'Behind an obstacle, indoors',
+    'outdoor-obstacle': 'Behind an obstacle, outdoors',
+    'boundary-wall': 'Inside a boundary wall',
+    'boundary-mesh': 'Inside a boundary mesh',
+    'height-over-access': 'Height over access areas',
+    vehicle: 'Beside vehicles and loads',
+    'insulator-base-height': 'Height of the insulator base',
+    'height-outside-boundary': 'Height outside the boundary',
+  },
   yesNo: { yes: 'Yes', no: 'No' },
   bridgeCause: {
     'rule-to-method': 'Rule to method',

@@ -107,6 +107,9 @@ export const STRESS_WORDS: Record<string, string> = {
   lightning: 'lightning',
   switching: 'switching',
   'power-frequency': 'power frequency',
+  'fast-front': 'fast front',
+  'slow-front': 'slow front',
+  ...Object.fromEntries(Object.entries(CHOICE_LABELS.safetyKind).map(([kind, label]) => [kind, label.toLowerCase()])),
 };
 
 export const SHAPE_WORDS: Record<string, string> = {

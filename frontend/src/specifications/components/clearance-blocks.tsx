@@ -7,6 +7,7 @@ import { clearanceName } from '../model/trace-names';
 import { whyNot } from '../model/words';
 import { lowerFirst } from './criteria-block';
 import { LedgerBlock } from './ledger-rows';
+import { SafetyBlock } from './safety-block';
 
 const BLOCKS = [
   { distance: 'phase-to-earth', title: 'Distance to earth', missing: ['clearances.phaseToEarthMm', 'clearances'] },
@@ -16,7 +17,6 @@ const BLOCKS = [
     missing: ['clearances.phaseToPhaseMm', 'clearances'],
   },
   { distance: 'section', title: 'Section clearance', missing: ['clearances.section'] },
-  { distance: 'safety', title: 'Distance for people', missing: ['clearances.safety', 'clearance.safetySource'] },
 ] as const;
 
 const STRESSES: Record<string, string> = {
@@ -30,16 +30,20 @@ const STRESSES: Record<string, string> = {
 /** Four different distances in four blocks; none of them is worked out from another. */
 export function ClearanceBlocks({ evaluation }: { evaluation: Evaluation }) {
   const rows = evaluation.clearances?.rows ?? [];
-  return BLOCKS.map(({ distance, title, missing }) => (
-    <ClearanceBlock
-      key={distance}
-      title={title}
-      rows={rows.filter((row) => row.distance === distance)}
-      headlineMm={headlineOf(evaluation, distance)}
-      why={whyNot(evaluation, ...missing)}
-      isForPeople={distance === 'safety'}
-    />
-  ));
+  return (
+    <>
+      {BLOCKS.map(({ distance, title, missing }) => (
+        <ClearanceBlock
+          key={distance}
+          title={title}
+          rows={rows.filter((row) => row.distance === distance)}
+          headlineMm={headlineOf(evaluation, distance)}
+          why={whyNot(evaluation, ...missing)}
+        />
+      ))}
+      <SafetyBlock evaluation={evaluation} />
+    </>
+  );
 }
 
 function headlineOf({ clearances }: Evaluation, distance: ClearanceRow['distance']): number | null {
@@ -53,21 +57,16 @@ interface Properties {
   rows: ClearanceRow[];
   headlineMm: number | null;
   why: string | undefined;
-  isForPeople: boolean;
 }
 
-function ClearanceBlock({ title, rows, headlineMm, why, isForPeople }: Properties) {
+function ClearanceBlock({ title, rows, headlineMm, why }: Properties) {
   const aside =
     headlineMm === null ? undefined : (
       <>
         needed <Figure value={headlineMm} unit="mm" round="up" />
       </>
     );
-  const absence = why
-    ? `not assessed: ${lowerFirst(why)}`
-    : isForPeople
-      ? 'not covered by this sheet: the local rule for work and access applies'
-      : 'not covered by this sheet';
+  const absence = why ? `not assessed: ${lowerFirst(why)}` : 'not covered by this sheet';
   return (
     <LedgerBlock title={title} aside={aside}>
       {rows.length === 0 ? (

@@ -2,6 +2,7 @@ import { render, screen, within } from '@testing-library/react';
 import { anEvaluation } from '../testing/fake-server';
 import { BridgeBlock } from './bridge-block';
 import { MechanicalBlock } from './mechanical-block';
+import { SafetyBlock } from './safety-block';
 import { VoltageBlock } from './voltage-block';
 
 const ruleOfThumb = (given: Partial<ReturnType<typeof anEvaluation>['ruleOfThumb']>) => ({
@@ -91,5 +92,46 @@ describe('mechanical loads', () => {
   it('are not there where none are filled in', () => {
     const { container } = render(<MechanicalBlock evaluation={anEvaluation(17)} />);
     expect(container).toBeEmptyDOMElement();
+  });
+});
+
+describe('distances for people', () => {
+  const row = {
+    method: 'iec-table' as const,
+    distance: 'safety' as const,
+    stress: 'height-over-access',
+    shape: null,
+    withstandKv: null,
+    altitudeFactor: 1.014,
+    h0M: 1000,
+    exponent: null,
+    valueMm: 4600,
+    interpolated: false,
+    withinSource: true,
+    governs: false,
+    source: { document: 'IEC 61936-1', edition: '2010', clause: 'safety distances', status: 'memory' as const },
+  };
+
+  it('stand in their own block with their source and what has to be accepted', () => {
+    const { clearances } = anEvaluation(17);
+    const caution = {
+      code: 'safety-source-from-memory',
+      severity: 'acceptance' as const,
+      text: 'The distances of IEC 61936-1 are from memory.',
+      field: 'clearance.safetySource',
+    };
+    const evaluation = anEvaluation(17, {
+      clearances: clearances && { ...clearances, rows: [...clearances.rows, row] },
+      cautions: [caution],
+    });
+    render(<SafetyBlock evaluation={evaluation} />);
+    expect(screen.getByText(/IEC 61936-1:2010, safety distances/)).toBeInTheDocument();
+    expect(screen.getByText(caution.text)).toBeInTheDocument();
+    expect(screen.getByRole('row', { name: /Height over access areas/ })).toHaveTextContent('1.0144,600 mm');
+  });
+
+  it('say that they are not covered where no source is chosen', () => {
+    render(<SafetyBlock evaluation={anEvaluation(17)} />);
+    expect(screen.getByText(/not covered by this sheet: the local rule/)).toBeInTheDocument();
   });
 });
