@@ -21,7 +21,9 @@ function sayWhatElseRuns(): void {
   const [load = 0] = loadavg();
   const cores = availableParallelism();
   if (load > cores / 2)
-    console.error(`The machine is at work already: load ${load.toFixed(1)} on ${cores} cores. Times will be long, and ratios say little.`);
+    console.error(
+      `The machine is at work already: load ${load.toFixed(1)} on ${cores} cores. Times will be long, and ratios say little.`,
+    );
 }
 
 async function main(): Promise<void> {
