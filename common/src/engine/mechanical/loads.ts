@@ -33,6 +33,9 @@ export interface LoadCase {
   as: string;
 }
 
+/** Below this a load is the dust of binary arithmetic, N. */
+const NO_LOAD_N = 1e-9;
+
 const loads = (given: Partial<CaseLoads>): CaseLoads => ({
   verticalN: null,
   horizontalN: null,
@@ -105,7 +108,7 @@ function tension(given: LoadCase, subconductorCount: number, calculation: Calcul
     { horizontalN, stringWeightN, hardwareWeightN },
     { as, heading: `Load along the set, ${name}` },
   );
-  if (loadN <= 0) return unknown('The case has no load.');
+  if (loadN < NO_LOAD_N) return unknown('The case has no load.');
   const parts = { verticalN: stringWeightN + hardwareWeightN, horizontalN };
   return share(given, { loadN, lastLostN: null, slackLeg: false }, parts, calculation);
 }
@@ -163,7 +166,7 @@ function suspension(given: LoadCase, subconductorCount: number, calculation: Cal
     },
     { as, heading: `Vertical load, ${name}` },
   );
-  if (verticalN <= 0) {
+  if (verticalN < NO_LOAD_N) {
     const text = `The vertical load of ${verticalN.toFixed(0)} N lifts the string; a suspension string cannot hold it.`;
     return loads({ whyNot: text, upliftN: verticalN });
   }
