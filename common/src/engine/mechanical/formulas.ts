@@ -5,7 +5,7 @@ import { formula } from '../trace';
  * Loads on a string set. Weights, pulls and pressures are per sub-conductor and multiplied by their number; those of
  * string and fittings are of the whole set. Angles in degrees. With ice the conductor's figures are those of the iced one.
  */
-const STATICS = cite(DEFINITION, 'statics of a hanging load', 'derived');
+const STATICS = cite(DEFINITION, 'statics of a hanging load; angles in degrees', 'derived');
 
 /** Vertical load of a suspension set: conductors over the weight span, string and fittings. */
 export const verticalLoad = formula({
@@ -126,7 +126,7 @@ const radians = (deg: number): number => (deg * Math.PI) / 180;
 export const windwardLeg = formula<LegFigures>({
   id: 'mechanical.windward-leg',
   heading: 'Windward leg of the V',
-  source: cite(DEFINITION, 'equilibrium of two legs', 'derived'),
+  source: cite(DEFINITION, 'equilibrium of two legs; angles in degrees', 'derived'),
   expression: 'T1 = (V * sin(a2) + H * cos(a2)) / sin(a1 + a2)',
   symbols: LEG_SYMBOLS,
   result: 'loadN',
@@ -138,7 +138,7 @@ export const windwardLeg = formula<LegFigures>({
 export const leewardLeg = formula<LegFigures>({
   id: 'mechanical.leeward-leg',
   heading: 'Leeward leg of the V; below zero it is slack',
-  source: cite(DEFINITION, 'equilibrium of two legs', 'derived'),
+  source: cite(DEFINITION, 'equilibrium of two legs; angles in degrees', 'derived'),
   expression: 'T2 = (V * sin(a1) - H * cos(a1)) / sin(a1 + a2)',
   symbols: LEG_SYMBOLS,
   result: 'loadN',
