@@ -44,6 +44,7 @@ export function labelOfName(name: string): string {
   const words = name.startsWith('status') && name !== 'status' ? `statusOf${name.slice(6)}` : withoutUnit(name);
   const text = words
     .replace(/([a-z0-9])([A-Z])/g, '$1 $2')
+    .replace(/([a-z]{2})(\d{3,})/g, '$1 $2')
     .toLowerCase()
     .replace(/(\d+) kv\b/g, '$1 kV');
   return text.charAt(0).toUpperCase() + text.slice(1);

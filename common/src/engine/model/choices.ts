@@ -1,0 +1,42 @@
+/** The closed lists of choices of an input. */
+
+export const SPECIFICATION_KINDS = ['line', 'bay'] as const;
+export const BASES = ['iec', 'north-american'] as const;
+export const FREQUENCIES_HZ = [50, 60] as const;
+export const NEUTRAL_EARTHINGS = ['effective', 'resonant', 'isolated'] as const;
+export const EARTH_FAULTS = ['cleared', 'sustained'] as const;
+export const POLLUTION_CLASSES = ['a', 'b', 'c', 'd', 'e'] as const;
+export const POLLUTION_TYPES = ['A', 'B', 'AB'] as const;
+export const POLLUTION_BASES = ['measured', 'estimated', 'assumed'] as const;
+export const CONTAMINATION_LEVELS = ['very-light', 'light', 'moderate', 'heavy', 'very-heavy'] as const;
+export const ARRANGEMENTS = ['suspension', 'v-suspension', 'tension'] as const;
+export const SURROUNDINGS = ['cross-arm', 'window', 'lower-structure', 'open'] as const;
+export const ARCING_DEVICES = ['none', 'horns', 'rings'] as const;
+export const CLEARANCE_METHODS = ['iec-table', 'en-empirical', 'en-theoretical', 'north-american'] as const;
+export const SHAPES_PHASE_TO_EARTH = ['rod-structure', 'conductor-structure'] as const;
+export const SHAPES_PHASE_TO_PHASE = ['rod-conductor', 'conductor-conductor'] as const;
+export const FAST_FRONT_SOURCES = ['level', 'string'] as const;
+export const EN_GAPS = ['window', 'structure', 'obstacle'] as const;
+export const SAFETY_SOURCES = ['rd-337', 'iec-61936-1'] as const;
+export const BAY_SAFETY_SOURCES = ['rd-337', 'iec-61936-1', 'c37.32'] as const;
+export const MECHANICAL_BASES = ['rd-223', 'en-50341', 'nesc', 'rus'] as const;
+export const LOAD_CASE_KINDS = ['everyday', 'wind', 'ice', 'district', 'extreme', 'broken-string'] as const;
+export const SWING_STATES = ['still-air', 'moderate', 'extreme'] as const;
+export const MID_SPAN_RULES = ['rd-223', 'central-european', 'rus'] as const;
+export const LOADING_DISTRICTS = ['light', 'medium', 'heavy'] as const;
+export const BAY_GAP_CONDITIONS = ['rigid', 'wind', 'short-circuit', 'out-of-phase', 'separable'] as const;
+
+export type SpecificationKind = (typeof SPECIFICATION_KINDS)[number];
+export type Basis = (typeof BASES)[number];
+export type NeutralEarthing = (typeof NEUTRAL_EARTHINGS)[number];
+export type EarthFault = (typeof EARTH_FAULTS)[number];
+export type PollutionClass = (typeof POLLUTION_CLASSES)[number];
+export type PollutionType = (typeof POLLUTION_TYPES)[number];
+export type PollutionBasis = (typeof POLLUTION_BASES)[number];
+export type ContaminationLevel = (typeof CONTAMINATION_LEVELS)[number];
+export type Arrangement = (typeof ARRANGEMENTS)[number];
+export type Surroundings = (typeof SURROUNDINGS)[number];
+export type ArcingDevices = (typeof ARCING_DEVICES)[number];
+export type ClearanceMethod = (typeof CLEARANCE_METHODS)[number];
+export type ShapePhaseToEarth = (typeof SHAPES_PHASE_TO_EARTH)[number];
+export type ShapePhaseToPhase = (typeof SHAPES_PHASE_TO_PHASE)[number];
