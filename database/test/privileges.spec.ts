@@ -35,6 +35,12 @@ describe('the role of the product', () => {
     'set session_replication_role = replica',
     "copy users to '/tmp/users'",
     "select pg_read_file('postgresql.conf')",
+    'create table graphile_worker.intruder (id int primary key)',
+    'alter table graphile_worker._private_jobs disable row level security',
+    'truncate table graphile_worker._private_jobs',
+    'drop function graphile_worker.remove_job',
+    'insert into graphile_worker.migrations (id) values (999)',
+    'delete from graphile_worker.migrations',
   ])('may not: %s', async (statement) => {
     expect(await codeOf(statement)).toBe(DENIED);
   });
@@ -52,7 +58,7 @@ describe('the role of the product', () => {
       expect([table, await codeOf(`truncate table ${table} cascade`)]).toEqual([table, DENIED]);
   });
 
-  it.each(['audit_events', 'sheet_files', 'company_settings', 'table_confirmations', 'design_bases'])(
+  it.each(['audit_events', 'audit_seals', 'sheet_files', 'company_settings', 'table_confirmations', 'design_bases'])(
     'may add to %s and read it, but neither change nor remove its rows',
     async (table) => {
       const { rows } = await database.knex.raw<{ rows: { privilege: string }[] }>(
@@ -73,6 +79,16 @@ describe('the role of the product', () => {
       expect(await codeOf(`delete from ${table}`)).toBe(DENIED);
     },
   );
+
+  it('adds jobs to the queue, sees them and takes them out again', async () => {
+    const { rows } = await database.knex.raw<{ rows: { id: number }[] }>(
+      `select id from graphile_worker.add_job('tell', '{"what":"nothing"}'::json)`,
+    );
+    const jobs = () => database.knex('graphile_worker.jobs').where({ task_identifier: 'tell' }).pluck('id');
+    expect(await jobs()).toEqual([rows[0]!.id]);
+    await database.knex.raw('select graphile_worker.complete_jobs(array[?]::bigint[])', [rows[0]!.id]);
+    expect(await jobs()).toEqual([]);
+  });
 
   it('changes of a catalogue unit only whether it is withdrawn', async () => {
     expect(await codeOf("update insulators set creepage_mm = 1 where code = 'G120-S'")).toBe(DENIED);
