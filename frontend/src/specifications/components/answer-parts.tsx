@@ -1,6 +1,6 @@
 import type { Caution } from '@bellgap/common/api';
 import { useEffect, useState } from 'react';
-import { SeverityShape } from './caution-mark';
+import { SeverityShape } from '../../ui/caution';
 
 /** How many stops and fails there are, in shape and words. */
 export function Gravest({ cautions }: { cautions: readonly Caution[] }) {

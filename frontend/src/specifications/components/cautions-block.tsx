@@ -1,13 +1,11 @@
 import type { Evaluation, Severity } from '@bellgap/common/api';
 import { STANDING_CAUTIONS } from '@bellgap/common/schemas';
-import { CautionMark } from './caution-mark';
+import { CautionList, SEVERITY_ORDER } from '../../ui/caution';
 import { LedgerBlock } from './ledger-rows';
-
-const ORDER: readonly Severity[] = ['stop', 'fail', 'acceptance', 'caution', 'info'];
 
 /** What the answer warns of, the gravest first. */
 export function CautionsBlock({ evaluation }: { evaluation: Evaluation }) {
-  const cautions = [...evaluation.cautions].sort((a, b) => ORDER.indexOf(a.severity) - ORDER.indexOf(b.severity));
+  const { cautions } = evaluation;
   return (
     <LedgerBlock
       title="Cautions"
@@ -16,11 +14,7 @@ export function CautionsBlock({ evaluation }: { evaluation: Evaluation }) {
       {cautions.length === 0 ? (
         <p className="zone-note">None from the figures given. The standing cautions below hold all the same.</p>
       ) : (
-        <ul className="cautions">
-          {cautions.map((caution) => (
-            <CautionMark key={caution.code + caution.text} caution={caution} />
-          ))}
-        </ul>
+        <CautionList cautions={cautions} />
       )}
     </LedgerBlock>
   );
@@ -42,7 +36,7 @@ const PLURAL: Record<Severity, string> = {
 };
 
 function countWords(severities: Severity[]): string {
-  return ORDER.map((severity) => [severity, severities.filter((one) => one === severity).length] as const)
+  return SEVERITY_ORDER.map((severity) => [severity, severities.filter((one) => one === severity).length] as const)
     .filter(([, count]) => count > 0)
     .map(([severity, count]) => `${count} ${count === 1 ? SINGULAR[severity] : PLURAL[severity]}`)
     .join(', ');

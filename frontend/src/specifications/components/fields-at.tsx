@@ -1,5 +1,6 @@
 import { CHOICE_LABELS, fieldOf, type FieldPath } from '@bellgap/common/schemas';
 import type { ReactNode } from 'react';
+import { CautionMark } from '../../ui/caution';
 import { ChoiceField, DateField, NumberField, TextField, type Choice, type FieldWords } from '../../ui/fields';
 import { useForm, type SpecificationForm } from '../hooks/form-context';
 import { applies } from '../model/applies';
@@ -7,7 +8,6 @@ import { faultAt } from '../model/faults';
 import { valueAt } from '../model/form';
 import { basisValue, differsFromBasis, inheritedPathOf } from '../model/inheritance';
 import { choicesOf, valueWords } from '../model/words';
-import { CautionMark } from './caution-mark';
 import { OverrideNote } from './override-note';
 
 const YES_NO: Choice[] = Object.entries(CHOICE_LABELS.yesNo).map(([value, label]) => ({ value, label }));

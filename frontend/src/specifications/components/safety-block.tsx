@@ -1,10 +1,10 @@
 import type { ClearanceRow, Evaluation } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { CautionMark } from '../../ui/caution';
 import { Figure } from '../../ui/figure';
 import { SourceWords, TraceArea } from '../../ui/trace';
 import { clearanceName } from '../model/trace-names';
 import { whyNot } from '../model/words';
-import { CautionMark } from './caution-mark';
 import { lowerFirst } from './criteria-block';
 import { LedgerBlock } from './ledger-rows';
 

@@ -2,11 +2,11 @@ import type { InsulatorUnit, Severity, Sweep } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { useMemo, useRef, useState, type KeyboardEvent } from 'react';
 import { failureText } from '../../../api/api-error';
+import { SeverityShape } from '../../../ui/caution';
 import { formatNumber } from '../../../ui/figure';
 import type { Answer } from '../../hooks/use-live-evaluation';
 import { siteClass, sweepAltitudes, sweepClasses } from '../../model/what-if';
 import { useSweep } from '../../queries/use-what-if';
-import { SeverityShape } from '../caution-mark';
 
 type Cell = Sweep['cells'][number];
 /** Share of the accent in the cell with the most units; the ink stays readable on it in both themes. */

@@ -1,5 +1,6 @@
 import type { Caution, Severity } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import './caution.css';
 
 const SHAPES: Record<Severity, string> = {
   stop: 'M4 .8h4l3.2 3.2v4L8 11.2H4L.8 8V4zM3.4 6h5.2',
@@ -8,6 +9,9 @@ const SHAPES: Record<Severity, string> = {
   caution: 'M6 1.2L11.3 10.8H.7zM6 4.6v3M6 9.1v.2',
   info: 'M6 .8a5.2 5.2 0 1 0 0 10.4A5.2 5.2 0 1 0 6 .8zM6 5.2v3.4M6 3.4v.2',
 };
+
+/** The gravest first. */
+export const SEVERITY_ORDER: readonly Severity[] = ['stop', 'fail', 'acceptance', 'caution', 'info'];
 
 /** The severity as a shape of its own; the word stands beside it wherever it is used. */
 export function SeverityShape({ severity }: { severity: Severity }) {
@@ -33,5 +37,17 @@ export function CautionMark({ caution, brief = false }: Properties) {
       </b>
       <span>{caution.text}</span>
     </Tag>
+  );
+}
+
+/** What an answer warns of, the gravest first. */
+export function CautionList({ cautions }: { cautions: readonly Caution[] }) {
+  const sorted = [...cautions].sort((a, b) => SEVERITY_ORDER.indexOf(a.severity) - SEVERITY_ORDER.indexOf(b.severity));
+  return (
+    <ul className="cautions">
+      {sorted.map((caution) => (
+        <CautionMark key={caution.code + caution.text} caution={caution} />
+      ))}
+    </ul>
   );
 }

@@ -1,0 +1,1 @@
+export { CautionList, CautionMark, SEVERITY_ORDER, SeverityShape } from './caution-mark';
