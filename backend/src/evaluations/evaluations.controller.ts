@@ -1,5 +1,5 @@
 import { Body, Controller } from '@nestjs/common';
-import type { BodyOf, SpecificationInput, WorksheetInput } from '@bellgap/common/api';
+import type { BodyOf, FlashoverRiskInput, SpecificationInput, WorksheetInput } from '@bellgap/common/api';
 import { contract } from '@bellgap/common/api';
 import { Route } from '../platform/route';
 import { EvaluationsService } from './evaluations.service';
@@ -21,6 +21,11 @@ export class EvaluationsController {
   @Route(contract.insulationLevelWorksheet)
   worksheet(@Body() body: BodyOf<typeof contract.insulationLevelWorksheet>) {
     return this.evaluations.worksheet(body as WorksheetInput);
+  }
+
+  @Route(contract.flashoverRisk)
+  flashoverRisk(@Body() body: BodyOf<typeof contract.flashoverRisk>) {
+    return this.evaluations.flashoverRisk(body as FlashoverRiskInput);
   }
 
   @Route(contract.sweep)

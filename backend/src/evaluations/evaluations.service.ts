@@ -3,6 +3,8 @@ import type {
   BodyOf,
   Evaluation,
   EvaluationContext,
+  FlashoverRisk,
+  FlashoverRiskInput,
   SpecificationInput,
   Sweep,
   WhatIf,
@@ -12,6 +14,7 @@ import type {
 } from '@bellgap/common/api';
 import {
   evaluate,
+  flashoverRisk,
   inputFaults,
   insulationLevelWorksheet,
   isPollutionClass,
@@ -65,6 +68,12 @@ export class EvaluationsService {
   async worksheet(input: WorksheetInput): Promise<WorksheetAnswer> {
     const { settings, confirmations } = await this.contexts.recentRules();
     return insulationLevelWorksheet(input, { companyLevels: settings.insulationLevels, confirmations });
+  }
+
+  /** The risk of flashover for a surge and gaps of one's own figures. */
+  async flashoverRisk(input: FlashoverRiskInput): Promise<FlashoverRisk> {
+    const { confirmations } = await this.contexts.recentRules();
+    return flashoverRisk(input, confirmations);
   }
 
   /** Units by altitude and class, all from one look at the catalogue and the company's rules. */

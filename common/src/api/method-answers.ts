@@ -1,6 +1,7 @@
 import * as yup from 'yup';
 import type { AltitudeConvention } from '../engine/altitude-conventions';
 import { CRITERIA, SEVERITIES, STATUSES } from '../engine/model';
+import type { FlashoverRisk } from '../engine/risk/model';
 import type { WorksheetAnswer } from '../engine/worksheet-model';
 import { caseFiguresSchema, CONFIRMATION_OUTCOMES, revisionNoteSchema, SWEEP_CLASSES } from '../schemas/method';
 
@@ -303,6 +304,9 @@ export type WhatIf = yup.InferType<typeof whatIfAnswer>;
 
 /** The worksheet of the insulation level, as the engine's own types describe it. */
 export const worksheetAnswer = yup.mixed<WorksheetAnswer & object>().required();
+
+/** The risk of flashover, as the engine's own types describe it. */
+export const flashoverRiskAnswer = yup.mixed<FlashoverRisk & object>().required();
 
 export const revisionNoteAnswer = yup
   .object({

@@ -1,9 +1,11 @@
 import * as yup from 'yup';
 import { revisionNoteSchema, sweepSchema, tableConfirmationSchema, whatIfSchema } from '../schemas/method';
+import { flashoverRiskSchema } from '../schemas/risk';
 import { worksheetInputSchema } from '../schemas/worksheet';
 import { endpoint } from './endpoint';
 import {
   altitudeConventionAnswer,
+  flashoverRiskAnswer,
   knownAnswersAnswer,
   revisionNoteAnswer,
   sweepAnswer,
@@ -101,6 +103,15 @@ export const methodEndpoints = {
     access: 'signed-in',
     body: worksheetInputSchema,
     answer: worksheetAnswer,
+    success: 200,
+  }),
+  flashoverRisk: endpoint({
+    method: 'POST',
+    path: '/risks/flashover',
+    summary: 'Risk that a surge flashes over one gap and many; nothing is stored',
+    access: 'signed-in',
+    body: flashoverRiskSchema,
+    answer: flashoverRiskAnswer,
     success: 200,
   }),
   revisionNotes: endpoint({

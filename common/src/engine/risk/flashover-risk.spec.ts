@@ -127,10 +127,30 @@ describe(flashoverRisk.name, () => {
     const ids = risk.trace.map(({ id }) => id);
     expect(new Set(ids).size).toBe(ids.length);
     expect(risk.trace.find(({ id }) => id === 'risk.integral:truncated')?.heading).toContain('cut off');
+    expect(ids).toContain('risk.integral-one-gap:truncated');
     const { trace: _trace, ...figures } = risk;
     const names = [...Object.keys(risk.chart[0]!), ...Object.keys(risk.byTail[0]!), ...Object.keys(figures)];
-    const text = ['tail', 'methodEdition', 'byTail', 'chart'];
+    const text = ['tail', 'methodEdition', 'byTail', 'chart', 'cautions'];
     expect(names.filter((name) => unitOf(name) === null && !text.includes(name))).toEqual([]);
+  });
+
+  it('warns of what the reader has to know, and of nothing else', () => {
+    const codes = (overrides: Partial<FlashoverRiskInput>): string[] =>
+      flashoverRisk(aRisk({ deviationPercent: 6, ...overrides })).cautions.map(({ code }) => code);
+    expect(codes({})).toEqual(['risk.tails-apart']);
+    expect(codes({ deviationPercent: null })).toEqual(['risk.tails-apart', 'risk.usual-deviation']);
+    expect(codes({ stressMeanKvPeak: 1098 })).toEqual(['risk.stress-reaches-strength']);
+    expect(codes({ stressMeanKvPeak: 200 })).toContain('risk.stress-near-zero');
+    expect(codes({ stressMeanKvPeak: 300 })).toEqual(['risk.tails-do-not-meet']);
+  });
+
+  it('stands with the status that an owner of the print has recorded', () => {
+    const recorded = { key: 'risk.single-gap', edition: '1996', page: '57', on: '2026-03-01', by: 'A. Reader' };
+    const statusOf = ({ trace }: FlashoverRisk) => trace.find(({ id }) => id === 'risk.single-gap')?.source.status;
+    expect(statusOf(flashoverRisk(aRisk()))).toBe('memory');
+    expect(statusOf(flashoverRisk(aRisk(), [{ ...recorded, outcome: 'confirmed' }]))).toBe('confirmed');
+    const disputed = flashoverRisk(aRisk(), [{ ...recorded, outcome: 'disputed' }]);
+    expect(disputed.cautions.find(({ code }) => code === 'risk.disputed')?.text).toContain('risk.single-gap');
   });
 
   it('is asked for by a schema that names what is wrong', () => {

@@ -1,6 +1,8 @@
 import { METHOD_EDITION } from '../method-edition';
+import type { TableConfirmation } from '../model';
 import { cite, DEFINITION, IEC_60071_2 } from '../sources';
 import { Calculation, figureText } from '../trace';
+import { warn } from './cautions';
 import {
   brownsEstimate,
   fiftyPercentOfGaps,
@@ -10,13 +12,16 @@ import {
   strengthDeviation,
 } from './formulas';
 import { integrate } from './integrate';
-import type { FlashoverRisk, FlashoverRiskByTail, FlashoverRiskInput, RiskTail, StressStrengthPoint } from './model';
+import {
+  TRUNCATED_AT,
+  USUAL_DEVIATION_PERCENT,
+  type FlashoverRisk,
+  type FlashoverRiskByTail,
+  type FlashoverRiskInput,
+  type RiskTail,
+  type StressStrengthPoint,
+} from './model';
 import { normalDensity, normalProbability, normalQuantile } from './normal';
-
-/** Usual deviation of the strength, percent of U50 (IEC 60071-2, memory). */
-export const USUAL_DEVIATION_PERCENT = { slow: 6, fast: 3 } as const;
-/** Truncated: no surge above its mean by so many deviations, no flashover below U50 by so many (IEC 60071-2, memory). */
-export const TRUNCATED_AT = { stressRatio: 3, strengthRatio: 4 } as const;
 
 /** So far from the mean nothing is left that a double could hold beside the rest. */
 const WHOLE_REACH = 9;
@@ -95,16 +100,29 @@ function byTail(
   const gapsProbability = gapsRisk(given, gapCount, tail);
   const switchingFlashoverProbability = front === 'slow' ? gapsProbability / 2 : null;
   const status = calculation.status(`risk.tail:${tail}`, tail === 'gaussian' ? 'derived' : 'memory');
+  const figures = `f: ${figureText(given.meanKvPeak)} and ${figureText(given.stressKvPeak)} kV; P: ${figureText(
+    given.fiftyPercentKvPeak,
+  )} and ${figureText(given.strengthKvPeak)} kV`;
+  const source = cite(IEC_60071_2, 'risk of failure, by numeric integration', status);
+  if (tail === 'truncated') {
+    calculation.note(() => ({
+      id: `risk.integral-one-gap:${tail}`,
+      heading: `Risk of one gap, ${TAIL_WORDS[tail]}`,
+      formula: 'R = integral of f(U) * P(U) dU',
+      substitution: figures,
+      result: singleGapProbability,
+      unit: '',
+      source,
+    }));
+  }
   calculation.note(() => ({
     id: `risk.integral:${tail}`,
     heading: `Risk of ${gapCount} gaps, ${TAIL_WORDS[tail]}`,
     formula: 'Rn = integral of f(U) * (1 - (1 - P(U))^n) dU',
-    substitution: `f: ${figureText(given.meanKvPeak)} and ${figureText(given.stressKvPeak)} kV; P: ${figureText(
-      given.fiftyPercentKvPeak,
-    )} and ${figureText(given.strengthKvPeak)} kV; n = ${gapCount}`,
+    substitution: `${figures}; n = ${gapCount}`,
     result: gapsProbability,
     unit: '',
-    source: cite(IEC_60071_2, 'risk of failure, by numeric integration', status),
+    source,
   }));
   if (switchingFlashoverProbability !== null) {
     calculation.note(() => ({
@@ -157,9 +175,12 @@ function estimate(given: Distributions, gapCount: number, calculation: Calculati
  * switching-surge flashover rate and Brown's estimate of it. The tails differ by a quarter and more at 200 towers: which
  * one was used is part of the figure.
  */
-export function flashoverRisk(input: FlashoverRiskInput): FlashoverRisk {
+export function flashoverRisk(
+  input: FlashoverRiskInput,
+  confirmations: readonly TableConfirmation[] = [],
+): FlashoverRisk {
   const { front, fiftyPercentKvPeak, stressMeanKvPeak, stressDeviationKvPeak, gapCount } = input;
-  const calculation = new Calculation(true);
+  const calculation = new Calculation(true, confirmations);
   const deviationPercent = input.deviationPercent ?? USUAL_DEVIATION_PERCENT[front];
   const strengthKvPeak = calculation.run(strengthDeviation, { deviationPercent, fiftyPercentKvPeak });
   const given: Distributions = {
@@ -170,13 +191,16 @@ export function flashoverRisk(input: FlashoverRiskInput): FlashoverRisk {
   };
   calculation.run(singleGapRisk, figuresOf(given));
   const tails = (['gaussian', 'truncated'] as const).map((tail) => byTail(given, input, tail, calculation));
+  const estimatedProbability = front === 'slow' ? estimate(given, gapCount, calculation) : null;
+  warn(calculation, input, tails);
   return {
     methodEdition: METHOD_EDITION,
     deviationPercent,
     strengthDeviationKvPeak: strengthKvPeak,
     byTail: tails,
-    estimatedProbability: front === 'slow' ? estimate(given, gapCount, calculation) : null,
+    estimatedProbability,
     chart: chartOf(given, gapCount),
+    cautions: calculation.cautions,
     trace: calculation.lines,
   };
 }

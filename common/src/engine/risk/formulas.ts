@@ -1,5 +1,6 @@
 import { cite, IEC_60071_2, SWITCHING_SURGE_RATE } from '../sources';
 import { formula } from '../trace';
+import { RISK_GAPS_LIMIT } from './model';
 import { normalProbability } from './normal';
 
 /** Deviation of a strength that is given as share of its 50 % voltage. */
@@ -56,7 +57,7 @@ export const gapsInParallel = formula({
   expression: 'Pn = 1 - (1 - P)^n',
   symbols: { P: 'singleGapProbability', n: 'gapCount' },
   result: 'gapsProbability',
-  range: { singleGapProbability: [0, 1], gapCount: [1, 1000] },
+  range: { singleGapProbability: [0, 1], gapCount: [1, RISK_GAPS_LIMIT] },
   compute: ({ singleGapProbability: P, gapCount: n }: { singleGapProbability: number; gapCount: number }) =>
     -Math.expm1(n * Math.log1p(-P)),
 });
@@ -69,7 +70,7 @@ export const halfOfGaps = formula({
   expression: 'P = 1 - 0.5^(1 / n)',
   symbols: { n: 'gapCount' },
   result: 'singleGapProbability',
-  range: { gapCount: [1, 1000] },
+  range: { gapCount: [1, RISK_GAPS_LIMIT] },
   compute: ({ gapCount: n }: { gapCount: number }) => -Math.expm1(-Math.LN2 / n),
 });
 

@@ -1,13 +1,21 @@
-import type { TraceLine } from '../model';
+import type { Caution, TraceLine } from '../model';
 
 export const RISK_FRONTS = ['slow', 'fast'] as const;
+export type RiskFront = (typeof RISK_FRONTS)[number];
+/** Usual deviation of the strength, percent of U50 (IEC 60071-2, memory). */
+export const USUAL_DEVIATION_PERCENT = { slow: 6, fast: 3 } as const satisfies Record<RiskFront, number>;
+/** Truncated: no surge above its mean by so many deviations, no flashover below U50 by so many (IEC 60071-2, memory). */
+export const TRUNCATED_AT = { stressRatio: 3, strengthRatio: 4 } as const;
 /** Where the distributions end: nowhere, or stress and strength cut off where nothing was ever measured. */
 export const RISK_TAILS = ['gaussian', 'truncated'] as const;
 export type RiskTail = (typeof RISK_TAILS)[number];
 
+/** Most gaps in parallel that a risk is asked for: the towers of a long line, three phases each. */
+export const RISK_GAPS_LIMIT = 100_000;
+
 /** Stress and strength of equal gaps; kV peak of the same polarity and between the same parts. */
 export interface FlashoverRiskInput {
-  front: (typeof RISK_FRONTS)[number];
+  front: RiskFront;
   stressMeanKvPeak: number;
   stressDeviationKvPeak: number;
   /** 50 % flashover voltage of one gap. */
@@ -44,5 +52,6 @@ export interface FlashoverRisk {
   /** Brown's estimate of the switching-surge flashover rate; null for fast fronts. */
   estimatedProbability: number | null;
   chart: StressStrengthPoint[];
+  cautions: Caution[];
   trace: TraceLine[];
 }
