@@ -11,5 +11,3 @@ export * from './trail-answers';
 export type * from '../engine/model';
 export type * from '../engine/risk/model';
 export type * from '../engine/worksheet-model';
-export type * from '../engine/risk/model';
-export type * from '../engine/worksheet-model';
