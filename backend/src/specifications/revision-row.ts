@@ -94,7 +94,7 @@ export function revisionColumns(db: Knex) {
     'p.site_time_zone',
     'p.paper',
     's.number',
-    's.title',
+    'r.title',
     's.kind',
     'r.label',
     'r.state',

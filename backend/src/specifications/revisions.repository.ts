@@ -21,6 +21,16 @@ export interface NewSpecification {
   at: Date;
 }
 
+export interface NewRevision {
+  specificationId: string;
+  title: string;
+  label: string;
+  /** The issued revision that it was begun from. */
+  derivedFrom?: string | null;
+  by: string;
+  at: Date;
+}
+
 /** What a save writes of a revision: the answer always together with what it was made from. */
 export interface RevisionContent {
   input: SpecificationInput;
@@ -50,7 +60,13 @@ export class RevisionsRepository {
       .where({ 'p.code': projectCode, 's.number': number })
       .orderBy('r.created_at', 'desc')
       .first<RevisionRow | undefined>(revisionColumns(db));
-    if (label !== 'latest') void query.where('r.label', label);
+    if (label !== 'latest') {
+      // A label that a revision had before still finds it.
+      void query.join(
+        'revision_labels as l',
+        (on) => void on.on('l.revision_id', 'r.id').on('l.specification_id', 's.id').onVal('l.label', label),
+      );
+    }
     if (forUpdate) void query.forUpdate('r');
     const row = await query;
     return row ? toStoredRevision(row) : null;
@@ -71,19 +87,15 @@ export class RevisionsRepository {
   }
 
   async insertRevision(
-    {
-      specificationId,
-      label,
-      by,
-      at,
-      ...content
-    }: RevisionContent & { specificationId: string; label: string; by: string; at: Date },
+    { specificationId, title, label, derivedFrom = null, by, at, ...content }: RevisionContent & NewRevision,
     db: Database,
   ): Promise<string> {
     const [row] = await db('revisions')
       .insert({
         specification_id: specificationId,
+        title,
         label,
+        derived_from: derivedFrom,
         drafted_by: by,
         created_at: at,
         saved_by: by,
@@ -91,21 +103,63 @@ export class RevisionsRepository {
         ...contentColumns(content),
       })
       .returning<{ id: string }[]>('id');
+    await this.giveLabel({ specificationId, revisionId: row!.id, label, at }, db);
     return row!.id;
+  }
+
+  /** Every label stays with the revision that had it; one that was given already fails on its key. */
+  async giveLabel(
+    {
+      specificationId,
+      revisionId,
+      label,
+      at,
+    }: { specificationId: string; revisionId: string; label: string; at: Date },
+    db: Database,
+  ): Promise<void> {
+    await db('revision_labels').insert({
+      specification_id: specificationId,
+      label,
+      revision_id: revisionId,
+      given_at: at,
+    });
+  }
+
+  async labelsOf(specificationId: string, db: Database = this.knex): Promise<string[]> {
+    return (await db('revision_labels').where({ specification_id: specificationId }).pluck('label')) as string[];
   }
 
   async update(
     id: string,
-    { by, at, ...content }: RevisionContent & { by: string; at: Date },
+    { title, by, at, ...content }: RevisionContent & { title: string; by: string; at: Date },
     db: Database,
   ): Promise<void> {
     await db('revisions as r')
       .where('r.id', id)
-      .update({ ...contentColumns(content), saved_by: by, saved_at: at, lock_version: db.raw('lock_version + 1') });
+      .update({
+        ...contentColumns(content),
+        title,
+        saved_by: by,
+        saved_at: at,
+        lock_version: db.raw('lock_version + 1'),
+      });
   }
 
   async rename(specificationId: string, title: string, db: Database): Promise<void> {
     await db('specifications as s').where('s.id', specificationId).update({ title });
+  }
+
+  /** Remembers who changed the content, and where: he can neither check nor approve it. */
+  async recordChange(
+    change: { revisionId: string; by: string; at: Date; paths: readonly string[] },
+    db: Database,
+  ): Promise<void> {
+    await db('revision_changes').insert({
+      revision_id: change.revisionId,
+      changed_by: change.by,
+      at: change.at,
+      paths: [...change.paths],
+    });
   }
 }
 

@@ -8,7 +8,7 @@ import { newerBasisRevision, newestBasisRevision } from './revision-row';
 
 const SORTS: Record<string, SortColumn> = {
   number: { column: 's.number', type: 'text' },
-  title: { column: 's.title', type: 'text' },
+  title: { column: 'r.title', type: 'text' },
   savedAt: { column: 'r.saved_at', type: 'timestamptz' },
   units: { column: 'r.units', type: 'integer' },
   altitudeM: { column: 'r.altitude_m', type: 'double precision' },
@@ -62,7 +62,7 @@ export class SpecificationsListQuery {
     if (asked.state) void query.where('r.state', asked.state);
     if (asked.search) {
       const pattern = likePattern(asked.search);
-      void query.where((either) => void either.whereILike('s.number', pattern).orWhereILike('s.title', pattern));
+      void query.where((either) => void either.whereILike('s.number', pattern).orWhereILike('r.title', pattern));
     }
     return listPage<ListRow, SpecificationRow>({
       query,
@@ -114,7 +114,7 @@ export class SpecificationsListQuery {
         's.id',
         'p.code as project_code',
         's.number',
-        's.title',
+        'r.title',
         's.kind',
         'r.label',
         'r.state',

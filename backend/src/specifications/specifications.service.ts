@@ -77,9 +77,10 @@ export class SpecificationsService {
         db,
       );
       const revisionId = await this.revisions.insertRevision(
-        { specificationId, label: FIRST_LABEL, by: person.id, at, ...content },
+        { specificationId, title, label: FIRST_LABEL, by: person.id, at, ...content },
         db,
       );
+      await this.revisions.recordChange({ revisionId, by: person.id, at, paths: ['input'] }, db);
       await this.audit.record(db, {
         actorId: person.id,
         action: 'specification.created',
@@ -134,15 +135,19 @@ export class SpecificationsService {
       const content = contentOf(before);
       const isSame = title === before.title && sameValue(content, { ...after, overrides: sorted(after.overrides) });
       if (isSame) return;
-      await this.revisions.update(before.id, { ...after, by: person.id, at: this.clock.now() }, db);
+      const at = this.clock.now();
+      await this.revisions.update(before.id, { ...after, title, by: person.id, at }, db);
       if (title !== before.title) await this.revisions.rename(before.specificationId, title, db);
+      const changes = changesBetween(trailOf(before.title, content), trailOf(title, after));
+      const paths = Object.keys(changes).filter((path) => path !== 'units');
+      await this.revisions.recordChange({ revisionId: before.id, by: person.id, at, paths: atLeastOne(paths) }, db);
       await this.audit.record(db, {
         actorId: person.id,
         action: 'revision.saved',
         entity: 'revision',
         entityId: before.id,
         projectId: before.projectId,
-        changes: changesBetween(trailOf(before.title, content), trailOf(title, after)),
+        changes,
       });
     });
   }
@@ -198,6 +203,9 @@ function trailOf(title: string, { input, overrides, basisId, evaluation }: Revis
     units: evaluation.string?.units ?? null,
   };
 }
+
+/** A save may change what was looked up alone, such as a catalogue unit in a newer version. */
+const atLeastOne = (paths: string[]): string[] => (paths.length > 0 ? paths : ['context']);
 
 function sorted(overrides: readonly Override[]): Override[] {
   return [...overrides].sort((one, other) => (one.path < other.path ? -1 : 1));
