@@ -19,9 +19,9 @@ class Batch {
   run(evaluations: number): this {
     const start = performance.now();
     for (let done = 0; done < evaluations; done += 1) {
-      const { string } = evaluate(sampleInput(this.unitCounts.length), this.context, { trace: false });
-      if (string.units === null) throw new Error('A string of the batch came out without a count');
-      this.unitCounts.push(string.units);
+      const units = evaluate(sampleInput(this.unitCounts.length), this.context, { trace: false }).string?.units;
+      if (!units) throw new Error('A string of the batch came out without a count');
+      this.unitCounts.push(units);
     }
     this.ms += performance.now() - start;
     return this;
