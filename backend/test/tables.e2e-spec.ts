@@ -3,7 +3,16 @@ import { begin, lineInput, makeLine } from './support/line-project';
 import { TestApp } from './support/test-app';
 import type { TestClient } from './support/test-client';
 
-const { altitudeConventions, tables, table, tableConfirmations, confirmTable, evaluate, saveRevision } = contract;
+const {
+  altitudeConventions,
+  sourceDifferences,
+  tables,
+  table,
+  tableConfirmations,
+  confirmTable,
+  evaluate,
+  saveRevision,
+} = contract;
 
 const USCD_D = 'iec-ts-60815:uscd:d';
 const CONFIRMED = {
@@ -102,6 +111,24 @@ describe('tables and formulas', () => {
       { action: 'table.confirmed', entity_id: USCD_D, reason: null },
       { action: 'table.disputed', entity_id: USCD_D, reason: note, changes: { page: { to: '14' } } },
     ]);
+  });
+
+  it('shows where sources differ, each figure with its source, which is used and why, as it is known by now', async () => {
+    const { status, answer } = await reader.call(sourceDifferences);
+    expect(status).toBe(200);
+    const spacing = answer.find(({ id }) => id === 'clearances.bus-spacing-650')!;
+    expect(spacing.choice).toMatch(/96 in is remembered/);
+    // ANSI C37.32-1996 Table 5 (read) prints 98 in; 96 in from memory, not verified.
+    expect(
+      spacing.figures.map(({ figure, isUsed, source }) => [figure, isUsed, source.document, source.status]),
+    ).toEqual([
+      [98, true, 'ANSI C37.32', 'seen'],
+      [96, false, 'NEMA SG 6', 'memory'],
+    ]);
+    const { key } = spacing.figures[0]!;
+    await administrator.call(confirmTable, { body: { ...CONFIRMED, key: key!, edition: '1996', page: '9' } });
+    const after = (await reader.call(sourceDifferences)).answer.find(({ id }) => id === spacing.id)!;
+    expect(after.figures.map(({ source }) => source.status)).toEqual(['confirmed', 'memory']);
   });
 
   it('act on evaluations and are stored with them', async () => {

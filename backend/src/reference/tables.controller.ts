@@ -19,6 +19,11 @@ export class TablesController {
     return this.tables.get(key);
   }
 
+  @Route(contract.sourceDifferences)
+  sourceDifferences() {
+    return this.tables.sourceDifferences();
+  }
+
   @Route(contract.altitudeConventions)
   altitudeConventions(@Query() { altitudeM }: QueryOf<typeof contract.altitudeConventions>) {
     return this.tables.altitudeConventions(Number(altitudeM));

@@ -1,6 +1,13 @@
 import { Inject, Injectable } from '@nestjs/common';
-import type { BodyOf, RecordedConfirmation, TableDetails, TableEntry, contract } from '@bellgap/common/api';
-import { altitudeConventions, type AltitudeConvention } from '@bellgap/common/engine';
+import type {
+  BodyOf,
+  RecordedConfirmation,
+  SourceDifference,
+  TableDetails,
+  TableEntry,
+  contract,
+} from '@bellgap/common/api';
+import { altitudeConventions, sourceDifferences, type AltitudeConvention } from '@bellgap/common/engine';
 import { AuditService } from '../audit/audit.service';
 import { Clock } from '../platform/clock';
 import { invalidAt, notFound } from '../platform/domain-error';
@@ -37,6 +44,11 @@ export class TablesService {
 
   async altitudeConventions(altitudeM: number): Promise<AltitudeConvention[]> {
     return altitudeConventions(altitudeM, [...(await this.words()).values()]);
+  }
+
+  async sourceDifferences(): Promise<SourceDifference[]> {
+    const differences = sourceDifferences([...(await this.words()).values()]);
+    return differences.map(({ figures, ...difference }) => ({ ...difference, figures: [...figures] }));
   }
 
   confirmations(): Promise<RecordedConfirmation[]> {

@@ -4,6 +4,7 @@ export * from './endpoint';
 export * from './errors';
 export * from './method-answers';
 export * from './roles';
+export * from './source-difference-answers';
 export * from './spreadsheet-text';
 export * from './states';
 export * from './trail';

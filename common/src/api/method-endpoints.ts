@@ -16,6 +16,7 @@ import {
   worksheetAnswer,
 } from './method-answers';
 import { DRAFT_READERS } from './roles';
+import { sourceDifferenceAnswer } from './source-difference-answers';
 
 const ADMINISTRATOR = ['administrator'] as const;
 
@@ -35,6 +36,14 @@ export const methodEndpoints = {
     summary: 'A table with its rows, or a formula',
     access: 'signed-in',
     answer: tableAnswer,
+    success: 200,
+  }),
+  sourceDifferences: endpoint({
+    method: 'GET',
+    path: '/source-differences',
+    summary: 'Quantities of which two sources or more do not say the same, and which is used',
+    access: 'signed-in',
+    answer: yup.array().of(sourceDifferenceAnswer.required()).required(),
     success: 200,
   }),
   tableConfirmations: endpoint({

@@ -11,6 +11,7 @@ export { unitOf } from './quantities';
 export * from './severity';
 export { flashoverRisk } from './risk';
 export * from './risk/model';
+export * from './source-differences';
 export * from './sources';
 export * from './standards';
 export * from './standards/uses';

@@ -22,5 +22,6 @@ export function runText({ items, leftOut }: KnownAnswers): string {
   const missed = items.filter(({ verdict }) => verdict === 'missed').length;
   const examples = `${items.length} ${items.length === 1 ? 'example' : 'examples'}`;
   const found = missed === 0 ? `All ${examples} are met` : `${missed} of ${examples} missed`;
-  return leftOut.length === 0 ? `${found}.` : `${found}; ${leftOut.length} lie outside the method.`;
+  const outside = `${leftOut.length} ${leftOut.length === 1 ? 'lies' : 'lie'} outside the method`;
+  return leftOut.length === 0 ? `${found}.` : `${found}; ${outside}.`;
 }

@@ -80,7 +80,7 @@ describe('known answers', () => {
       'common practice, no published source',
     ]);
     expect(rows).toContainEqual(['Pollution severity map', 'Elsewhere, figure 2', 'no class is derived here']);
-    expect(screen.getByText('1 of 2 examples missed; 1 lie outside the method.')).toBeInTheDocument();
+    expect(screen.getByText('1 of 2 examples missed; 1 lies outside the method.')).toBeInTheDocument();
   });
 
   it('say what went wrong and let it be run again', async () => {

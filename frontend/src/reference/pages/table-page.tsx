@@ -12,6 +12,7 @@ import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
 import { ConfirmationDialog, type Recordable } from '../components/confirmation-dialog';
 import { ConventionsSheet } from '../components/conventions-sheet';
+import { DifferencesOf } from '../components/differences';
 import { FormulaSheet } from '../components/formula-sheet';
 import { RecordsSheet } from '../components/records-sheet';
 import { TableRows } from '../components/table-rows';
@@ -62,6 +63,7 @@ function EntryView({ entry }: { entry: TableDetails }) {
         </Sheet>
       )}
       {formula && <FormulaSheet entry={entry} formula={formula} record={record} />}
+      <DifferencesOf entryKey={entry.key} />
       {ABOUT_THIN_AIR.has(entry.key) && <ConventionsSheet />}
       <RecordsSheet entry={entry} />
       {mayRecord && <ConfirmationDialog of={recording} close={() => setRecording(null)} />}

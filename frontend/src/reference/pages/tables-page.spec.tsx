@@ -1,4 +1,4 @@
-import { contract, type TableDetails, type TableEntry } from '@bellgap/common/api';
+import { contract, type SourceDifference, type TableDetails, type TableEntry } from '@bellgap/common/api';
 import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { aPerson } from '../../testing/builders';
 import { FakeServer } from '../../testing/fake-server';
@@ -79,11 +79,40 @@ const ALTITUDE_DETAILS: TableDetails = {
   },
 };
 
+const DIFFERENCE: SourceDifference = {
+  id: 'creepage',
+  topic: 'Pollution',
+  quantity: 'Reference creepage of class b',
+  unit: 'mm/kV',
+  figures: [
+    {
+      figure: 27.8,
+      figureUpTo: null,
+      printedFor: 'class b',
+      source: { document: 'IEC TS 60815-2', edition: '2008', clause: 'reference creepage', status: 'seen' },
+      entryKey: USCD.key,
+      key: `${USCD.key}:b`,
+      isUsed: true,
+    },
+    {
+      figure: 24,
+      figureUpTo: 31,
+      printedFor: 'light',
+      source: { document: 'Elsewhere', edition: '', clause: 'table 3', status: 'memory' },
+      entryKey: null,
+      key: null,
+      isUsed: false,
+    },
+  ],
+  choice: 'The first, as it was read.',
+};
+
 const serverFor = (roles: ReturnType<typeof aPerson>['roles']) =>
   new FakeServer()
     .install()
     .on(contract.currentSession, () => ({ user: aPerson({ roles }) }))
     .on(contract.tables, () => [USCD, ALTITUDE])
+    .on(contract.sourceDifferences, () => [DIFFERENCE])
     .on(contract.table, ({ params }) => (params.key === USCD.key ? USCD_DETAILS : ALTITUDE_DETAILS))
     .on(contract.altitudeConventions, ({ query }) => [
       {
@@ -120,6 +149,26 @@ describe('tables', () => {
     await waitFor(() => expect(screen.queryByText('Reference creepage by class')).not.toBeInTheDocument());
   });
 
+  it('show where sources differ: every figure with its source, which is used and why', async () => {
+    serverFor(['reader']);
+    openPage('/tables');
+    const sheet = within(await screen.findByRole('region', { name: 'Where sources differ' }));
+    expect((await sheet.findAllByRole('listitem')).map((item) => item.textContent)).toEqual([
+      '27.8 mm/kVclass bIEC TS 60815-2, 2008, reference creepageseenused',
+      '24 to 31 mm/kVlightElsewhere, table 3from memory, not verifiedcompared only',
+    ]);
+    expect(sheet.getByText('1 quantity')).toBeInTheDocument();
+    expect(sheet.getByText('The first, as it was read.')).toBeInTheDocument();
+    expect(sheet.getByRole('link')).toHaveAttribute('href', '/tables/iec-ts-60815%3Auscd');
+  });
+
+  it('show on a table what others say of its figures', async () => {
+    serverFor(['reader']);
+    openPage('/tables/iec-ts-60815%3Auscd');
+    expect(await screen.findByRole('heading', { name: 'Reference creepage of class b' })).toBeInTheDocument();
+    expect(screen.getByText('Elsewhere, table 3')).toBeInTheDocument();
+  });
+
   it('show a formula with where it holds and who confirmed it', async () => {
     serverFor(['engineer']);
     openPage('/tables/atmosphere.altitude-factor');
@@ -128,6 +177,7 @@ describe('tables', () => {
     expect(screen.getByText('confirmed, before: seen')).toBeInTheDocument();
     expect(screen.getByText('Print agrees: 2011, page 112, 2026-02-01, W. Tollarsson')).toBeInTheDocument();
     expect(screen.queryByRole('button', { name: /Record/ })).not.toBeInTheDocument();
+    expect(screen.queryByRole('region', { name: 'Where sources differ' })).not.toBeInTheDocument();
   });
 
   it('set the ways with thin air side by side, for the altitude asked', async () => {

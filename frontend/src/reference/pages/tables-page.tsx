@@ -12,6 +12,7 @@ import { choicesOf } from '../../ui/forms/choices';
 import { Page } from '../../ui/page/page';
 import { Sheet } from '../../ui/page/sheet';
 import { QueryState } from '../../ui/states/query-state';
+import { DifferencesByTopic } from '../components/differences';
 import {
   countsText,
   documentText,
@@ -93,7 +94,12 @@ export function TablesPage() {
     <Page
       title="Tables"
       lead="Every table and formula the method reads, where it is printed, and how well each figure is known"
-      acts={<Link to={paths.knownAnswers.to()}>Known answers</Link>}
+      acts={
+        <>
+          <Link to={paths.risk.to()}>Risk of flashover</Link>
+          <Link to={paths.knownAnswers.to()}>Known answers</Link>
+        </>
+      }
     >
       <QueryState query={tables} what="The tables">
         {(entries) => (
@@ -102,6 +108,7 @@ export function TablesPage() {
             <Sheet title="Tables and formulas" flush>
               <EntriesTable entries={entries} />
             </Sheet>
+            <DifferencesByTopic />
           </>
         )}
       </QueryState>
