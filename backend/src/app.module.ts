@@ -7,9 +7,11 @@ import { DeskModule } from './desk/desk.module';
 import { EvaluationsModule } from './evaluations/evaluations.module';
 import { HealthModule } from './health/health.module';
 import { KnownAnswersModule } from './known-answers/known-answers.module';
+import { MailModule } from './mail/mail.module';
 import { OpenApiModule } from './openapi/openapi.module';
 import { PlatformModule, type PlatformOptions } from './platform/platform.module';
 import { ProjectsModule } from './projects/projects.module';
+import { QueueModule } from './queue/queue.module';
 import { ReferenceModule } from './reference/reference.module';
 import { RevisionNotesModule } from './revision-notes/revision-notes.module';
 import { SheetsModule } from './sheets/sheets.module';
@@ -24,6 +26,8 @@ export class AppModule {
       imports: [
         PlatformModule.with(options),
         AuditModule,
+        QueueModule,
+        MailModule,
         AuthModule,
         UsersModule,
         CompanySettingsModule,

@@ -15,7 +15,9 @@ async function main(): Promise<void> {
   const { values } = parseArgs({ options: { email: { type: 'string' }, name: { type: 'string' } } });
   assertValid(createUserSchema, values);
   const { email = '', name = '' } = values;
-  const app = await NestFactory.createApplicationContext(AppModule.with({ config: loadConfig(process.env) }), {
+  // The letter leaves with a process that works on the queue.
+  const config = loadConfig({ ...process.env, ROLE: 'web' });
+  const app = await NestFactory.createApplicationContext(AppModule.with({ config }), {
     logger: ['error', 'warn'],
     abortOnError: false,
   });

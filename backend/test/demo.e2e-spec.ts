@@ -22,7 +22,7 @@ describe('the documents of the demonstration', () => {
 
   const tell = async () => {
     const clock = new StoryClock();
-    const config = loadConfig({ NODE_ENV: 'test', DATABASE_URL: test.database.url });
+    const config = loadConfig({ NODE_ENV: 'test', DATABASE_URL: test.database.url, ROLE: 'web' });
     const app = await NestFactory.createApplicationContext(AppModule.with({ config, clock }), { logger: ['error'] });
     try {
       return await tellStory({

@@ -1,5 +1,6 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
+import type { Config } from '../platform/config';
 import { KNEX } from '../platform/knex';
 
 /** What signing in needs to know of a person. */
@@ -44,6 +45,10 @@ export class AccountsRepository {
   async setPasswordHash(id: string, passwordHash: string, db: Knex): Promise<void> {
     await db('users').where({ id }).update({ password_hash: passwordHash });
   }
+}
+
+export function maySignIn({ active, isDemo }: Account, { demoAccounts }: Config): boolean {
+  return active && (!isDemo || demoAccounts);
 }
 
 function toAccount(row: AccountRow): Account {

@@ -7,6 +7,7 @@ import { Route } from '../platform/route';
 import { clearSessionCookie, setSessionCookie } from '../platform/session-cookie';
 import { AuthService } from './auth.service';
 import { browserOf } from './client';
+import { PasswordResetsService } from './password-resets.service';
 import { SessionsService, type Client } from './sessions.service';
 
 @Controller()
@@ -14,6 +15,7 @@ export class AuthController {
   constructor(
     private readonly auth: AuthService,
     private readonly sessionsService: SessionsService,
+    private readonly resets: PasswordResetsService,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
@@ -70,6 +72,19 @@ export class AuthController {
   @Route(contract.acceptInvitation)
   async acceptInvitation(@Body() { token, password }: BodyOf<typeof contract.acceptInvitation>): Promise<void> {
     await this.auth.acceptInvitation(token, password);
+  }
+
+  @Route(contract.requestPasswordReset)
+  async requestPasswordReset(
+    @Body() { email }: BodyOf<typeof contract.requestPasswordReset>,
+    @Req() request: Request,
+  ): Promise<void> {
+    await this.resets.request(email, clientOf(request));
+  }
+
+  @Route(contract.acceptPasswordReset)
+  async acceptPasswordReset(@Body() { token, password }: BodyOf<typeof contract.acceptPasswordReset>): Promise<void> {
+    await this.auth.acceptPasswordReset(token, password);
   }
 }
 

@@ -2,13 +2,15 @@ import { createSecretKey } from 'node:crypto';
 import { Module } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
 import { JwtModule } from '@nestjs/jwt';
+import { AccountLinksModule } from '../account-links/account-links.module';
+import { MailModule } from '../mail/mail.module';
 import { CONFIG, type Config } from '../platform/config';
 import { AccessGuard } from './access-guard';
 import { AccountsRepository } from './accounts.repository';
 import { AuthController } from './auth.controller';
 import { AuthService } from './auth.service';
 import { HousekeepingService } from './housekeeping.service';
-import { InvitationsService } from './invitations.service';
+import { PasswordResetsService } from './password-resets.service';
 import { Passwords } from './passwords';
 import { SessionsRepository } from './sessions.repository';
 import { SessionsService } from './sessions.service';
@@ -16,6 +18,8 @@ import { ThrottleService } from './throttle.service';
 
 @Module({
   imports: [
+    AccountLinksModule,
+    MailModule,
     JwtModule.registerAsync({
       inject: [CONFIG],
       useFactory: ({ sessionSecret }: Config) => {
@@ -30,13 +34,13 @@ import { ThrottleService } from './throttle.service';
     AccountsRepository,
     AuthService,
     HousekeepingService,
-    InvitationsService,
+    PasswordResetsService,
     Passwords,
     SessionsRepository,
     SessionsService,
     ThrottleService,
     { provide: APP_GUARD, useClass: AccessGuard },
   ],
-  exports: [InvitationsService, SessionsService],
+  exports: [SessionsService],
 })
 export class AuthModule {}

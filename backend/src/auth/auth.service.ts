@@ -1,13 +1,13 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
 import { passwordFault } from '@bellgap/common/schemas';
+import { AccountLinksService, type LinkPurpose } from '../account-links/account-links.service';
 import { AuditService } from '../audit/audit.service';
 import { CONFIG, type Config } from '../platform/config';
 import { DomainError, invalidAt, notFound } from '../platform/domain-error';
 import { KNEX } from '../platform/knex';
 import type { SignedIn } from '../platform/person';
-import { AccountsRepository, type Account } from './accounts.repository';
-import { InvitationsService } from './invitations.service';
+import { AccountsRepository, maySignIn, type Account } from './accounts.repository';
 import { Passwords } from './passwords';
 import { SessionsService, type Client } from './sessions.service';
 import { ThrottleService } from './throttle.service';
@@ -26,7 +26,7 @@ export class AuthService {
     private readonly accounts: AccountsRepository,
     private readonly passwords: Passwords,
     private readonly sessions: SessionsService,
-    private readonly invitations: InvitationsService,
+    private readonly links: AccountLinksService,
     private readonly throttle: ThrottleService,
     private readonly audit: AuditService,
   ) {}
@@ -35,7 +35,7 @@ export class AuthService {
     const attempt = await this.throttle.begin(email, client.address ?? '');
     const account = await this.accounts.findByEmail(email.trim());
     const matches = await this.passwords.matches(password, account?.passwordHash ?? null);
-    if (!account || !matches || !this.maySignIn(account)) throw refused();
+    if (!account || !matches || !maySignIn(account, this.config)) throw refused();
     return this.knex.transaction(async (db) => {
       await this.throttle.succeed(attempt, db);
       const session = await this.sessions.begin(account.id, client, db);
@@ -80,12 +80,27 @@ export class AuthService {
   }
 
   async acceptInvitation(token: string, password: string): Promise<void> {
+    const gone = 'Invitation: does not hold any more; ask your administrator for a new link';
+    await this.choosePassword({ token, purpose: 'invitation', password, gone });
+  }
+
+  async acceptPasswordReset(token: string, password: string): Promise<void> {
+    const gone = 'Link: does not hold any more; ask for a new one';
+    await this.choosePassword({ token, purpose: 'reset', password, gone });
+  }
+
+  /** Uses up the link, unless the password is refused, and ends every session. */
+  private async choosePassword(asked: {
+    token: string;
+    purpose: LinkPurpose;
+    password: string;
+    gone: string;
+  }): Promise<void> {
+    const { token, purpose, password, gone } = asked;
     const userId = await this.knex.transaction(async (db) => {
-      const id = await this.invitations.redeem(token, db);
+      const id = await this.links.redeem(token, purpose, db);
       const account = id === null ? null : await this.accounts.find(id, db);
-      if (!account?.active) {
-        throw invalidAt('token', 'Invitation: does not hold any more; ask your administrator for a new link');
-      }
+      if (!account?.active) throw invalidAt('token', gone);
       refuseWeak('password', password, account);
       await this.storePassword(db, account, password);
       await this.sessions.endAll(account.id, db);
@@ -96,16 +111,13 @@ export class AuthService {
 
   private async storePassword(db: Knex.Transaction, account: Account, password: string): Promise<void> {
     await this.accounts.setPasswordHash(account.id, await this.passwords.hash(password), db);
+    await this.links.withdraw(account.id, db);
     await this.audit.record(db, {
       actorId: account.id,
       action: 'user.password-changed',
       entity: 'user',
       entityId: account.id,
     });
-  }
-
-  private maySignIn({ active, isDemo }: Account): boolean {
-    return active && (!isDemo || this.config.demoAccounts);
   }
 }
 

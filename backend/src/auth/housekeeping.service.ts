@@ -1,6 +1,6 @@
 import { Injectable, Logger, type OnApplicationBootstrap, type OnApplicationShutdown } from '@nestjs/common';
+import { AccountLinksService } from '../account-links/account-links.service';
 import { Clock } from '../platform/clock';
-import { InvitationsService } from './invitations.service';
 import { SessionsService } from './sessions.service';
 import { ThrottleService } from './throttle.service';
 
@@ -17,7 +17,7 @@ export class HousekeepingService implements OnApplicationBootstrap, OnApplicatio
     private readonly clock: Clock,
     private readonly throttle: ThrottleService,
     private readonly sessions: SessionsService,
-    private readonly invitations: InvitationsService,
+    private readonly links: AccountLinksService,
   ) {}
 
   onApplicationBootstrap(): void {
@@ -36,6 +36,6 @@ export class HousekeepingService implements OnApplicationBootstrap, OnApplicatio
     const now = this.clock.now().getTime();
     await this.throttle.forget(new Date(now - DAY_MS));
     await this.sessions.forgetOld(new Date(now - 90 * DAY_MS));
-    await this.invitations.forget(new Date(now - 90 * DAY_MS));
+    await this.links.forget(new Date(now - 90 * DAY_MS));
   }
 }

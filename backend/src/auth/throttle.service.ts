@@ -7,6 +7,9 @@ import { networkOf } from './client';
 
 export const THROTTLE = { windowS: 15 * 60, perAccountAndAddress: 10, perAddress: 50 } as const;
 
+/** What is counted for itself: asking for a new password uses up no tries at signing in. */
+export type ThrottledAct = 'sign-in' | 'password-reset';
+
 export interface Attempt {
   id: number;
   account: string;
@@ -25,9 +28,9 @@ export class ThrottleService {
   ) {}
 
   /** Counts an attempt as failed before it is decided, so that many at once do not slip through. A refused one does not count. */
-  async begin(email: string, clientAddress: string): Promise<Attempt> {
+  async begin(email: string, clientAddress: string, act: ThrottledAct = 'sign-in'): Promise<Attempt> {
     const account = email.trim().toLowerCase();
-    const address = networkOf(clientAddress);
+    const address = act === 'sign-in' ? networkOf(clientAddress) : `${act} ${networkOf(clientAddress)}`;
     return this.knex.transaction(async (db) => {
       await db.raw('select pg_advisory_xact_lock(hashtextextended(?, 0))', [`sign-in ${address}`]);
       const since = new Date(this.clock.now().getTime() - THROTTLE.windowS * 1000);

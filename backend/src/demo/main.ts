@@ -11,7 +11,8 @@ import { tellStory } from './tell-story';
 
 /** Makes the documents of the demonstration through the product's services. May run again without harm. */
 async function main(): Promise<void> {
-  const config = loadConfig(process.env);
+  // Letters of the story wait for the product that starts after it.
+  const config = loadConfig({ ...process.env, ROLE: 'web' });
   if (config.production) throw new Error('The demonstration is never loaded in production.');
   const clock = new StoryClock();
   const app = await NestFactory.createApplicationContext(AppModule.with({ config, clock }), {

@@ -65,3 +65,19 @@ export function readUrl(
   faults.push(`${name}: an address that begins with ${protocols.map((protocol) => `${protocol}//`).join(' or ')}`);
   return null;
 }
+
+export interface Mailbox {
+  name: string;
+  address: string;
+}
+
+/** "name@company.example", or a name with the address behind it in angle brackets. */
+export function readMailbox(env: NodeJS.ProcessEnv, name: string, fallback: Mailbox, faults: string[]): Mailbox {
+  const given = env[name]?.trim();
+  if (!given) return fallback;
+  const [, words, bracketed, bare] = /^(?:"?([^"<>\r\n]*?)"?\s*<([^<>\s]+)>|([^<>\s]+))$/.exec(given) ?? [];
+  const address = bracketed ?? bare ?? '';
+  if (/^[^@\s]+@[^@\s]+$/.test(address)) return { name: words || fallback.name, address };
+  faults.push(`${name}: an address such as Bellgap <bellgap@company.example>, not "${given}"`);
+  return fallback;
+}

@@ -8,6 +8,7 @@ const PRODUCTION = {
   DATABASE_URL,
   SESSION_SECRET,
   PUBLIC_URL: 'https://bellgap.company.example',
+  SMTP_URL: 'smtps://mail.company.example',
 };
 
 function faultsOf(env: NodeJS.ProcessEnv): readonly string[] {
@@ -29,6 +30,9 @@ describe(loadConfig.name, () => {
       secureCookie: false,
       demoAccounts: true,
       passwordCost: 11,
+      role: 'both',
+      smtpUrl: null,
+      mailFrom: { name: 'Bellgap', address: 'bellgap@localhost' },
     });
   });
 
@@ -44,9 +48,27 @@ describe(loadConfig.name, () => {
     ['plain http on an open port', { PUBLIC_URL: 'http://127.0.0.1:3000', HOST: '0.0.0.0' }, /^PUBLIC_URL/],
     ['accounts of the demonstration', { DEMO_ACCOUNTS: 'yes' }, /^DEMO_ACCOUNTS/],
     ['no database', { DATABASE_URL: '' }, /^DATABASE_URL/],
+    ['no mail server', { SMTP_URL: '' }, /^SMTP_URL/],
+    ['a mail server of another kind', { SMTP_URL: 'https://mail.company.example' }, /^SMTP_URL/],
+    ['a sender without an address', { MAIL_FROM: 'Bellgap' }, /^MAIL_FROM/],
+    ['a role that no process has', { ROLE: 'clerk' }, /^ROLE/],
     ['passwords that are cheap to guess', { PASSWORD_COST: '4' }, /^PASSWORD_COST/],
   ])('refuses production with %s', (_, change, fault) => {
     expect(faultsOf({ ...PRODUCTION, ...change })).toEqual([expect.stringMatching(fault)]);
+  });
+
+  it('asks processes that only serve pages for no mail server', () => {
+    expect(faultsOf({ ...PRODUCTION, SMTP_URL: '', ROLE: 'web' })).toEqual([]);
+    expect(faultsOf({ ...PRODUCTION, SMTP_URL: '', ROLE: 'worker' })).toEqual([expect.stringMatching(/^SMTP_URL/)]);
+  });
+
+  it.each([
+    [undefined, 'Bellgap', 'bellgap@bellgap.company.example'],
+    ['sheets@company.example', 'Bellgap', 'sheets@company.example'],
+    ['Line sheets <sheets@company.example>', 'Line sheets', 'sheets@company.example'],
+    ['"Sheets, lines" <sheets@company.example>', 'Sheets, lines', 'sheets@company.example'],
+  ])('reads the sender %s', (given, name, address) => {
+    expect(loadConfig({ ...PRODUCTION, MAIL_FROM: given }).mailFrom).toEqual({ name, address });
   });
 
   it('takes plain http in production on loopback', () => {

@@ -42,6 +42,26 @@ export class GrantsRepository {
     return grants;
   }
 
+  /** Active people who hold one of the roles on a day, for everything or for the project; null asks for all projects. */
+  async holders(
+    asked: { roles: readonly Grant['role'][]; projectId: string | null; day: string },
+    db: Knex = this.knex,
+  ): Promise<string[]> {
+    const query = db('role_grants as g')
+      .join('users as u', 'u.id', 'g.user_id')
+      .where('u.active', true)
+      .whereNull('g.ended_at')
+      .whereIn('g.role', [...asked.roles])
+      .where('g.valid_from', '<=', asked.day)
+      .where((open) => open.whereNull('g.valid_to').orWhere('g.valid_to', '>=', asked.day))
+      .distinct('g.user_id');
+    if (asked.projectId !== null) {
+      const { projectId } = asked;
+      query.where((either) => either.whereNull('g.project_id').orWhere('g.project_id', projectId));
+    }
+    return (await query.pluck('g.user_id')) as string[];
+  }
+
   async find(userId: string, id: string, db: Knex): Promise<Grant | null> {
     const [row] = await this.select(db).where('g.id', id).where('g.user_id', userId);
     return row ? toGrant(row) : null;

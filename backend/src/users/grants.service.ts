@@ -1,8 +1,9 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
-import type { BodyOf, contract } from '@bellgap/common/api';
+import type { BodyOf, Role, contract } from '@bellgap/common/api';
 import { AuditService, changesBetween } from '../audit/audit.service';
 import { SessionsService } from '../auth/sessions.service';
+import { MailService } from '../mail/mail.service';
 import { Clock } from '../platform/clock';
 import { alreadyExists, forbidden, invalidAt, notFound } from '../platform/domain-error';
 import { KNEX, isUuid } from '../platform/knex';
@@ -10,6 +11,9 @@ import type { SignedIn } from '../platform/person';
 import { ProjectsService } from '../projects/projects.service';
 import { GrantsRepository, type Grant } from './grants.repository';
 import { UsersService } from './users.service';
+
+/** Roles that let a person sign: whoever gets one is made known. */
+const SIGNING_ROLES: readonly Role[] = ['checker', 'approver'];
 
 type Given = BodyOf<typeof contract.grantRole>;
 
@@ -23,12 +27,13 @@ export class GrantsService {
     private readonly users: UsersService,
     private readonly projects: ProjectsService,
     private readonly sessions: SessionsService,
+    private readonly mail: MailService,
     private readonly audit: AuditService,
   ) {}
 
   async grant(actor: SignedIn, userId: string, given: Given): Promise<Grant> {
     const grant = await this.knex.transaction(async (db) => {
-      await this.users.require(userId, db, { forUpdate: true });
+      const { name } = await this.users.require(userId, db, { forUpdate: true });
       refuseOwn(actor, userId);
       this.refuseContradictions(given);
       const projectId = given.projectCode === null ? null : await this.projectIdOf(given.projectCode, db);
@@ -55,6 +60,7 @@ export class GrantsService {
         projectId,
         changes: changesBetween({}, { grantId: id, ...given }),
       });
+      if (SIGNING_ROLES.includes(role)) await this.tellApprovers(actor, { userId, name, projectId }, given, db);
       return this.require(userId, id, db);
     });
     this.sessions.forgetPerson(userId);
@@ -77,6 +83,26 @@ export class GrantsService {
       });
     });
     this.sessions.forgetPerson(userId);
+  }
+
+  /** People who hold one of the roles today, everywhere or for the project. */
+  async holders(roles: readonly Role[], projectId: string | null, db: Knex): Promise<string[]> {
+    return this.grants.holders({ roles, projectId, day: this.clock.today() }, db);
+  }
+
+  private async tellApprovers(
+    actor: SignedIn,
+    granted: { userId: string; name: string; projectId: string | null },
+    { role, projectCode, checkCategory, validFrom, validTo }: Given,
+    db: Knex.Transaction,
+  ): Promise<void> {
+    const approvers = await this.holders(['approver'], granted.projectId, db);
+    const others = approvers.filter((id) => id !== granted.userId);
+    const data = { personName: granted.name, role, projectCode, checkCategory, validFrom, byName: actor.name };
+    await this.mail.send(db, others, {
+      kind: 'grant-of-checker-or-approver',
+      data: { ...data, validTo: validTo ?? null },
+    });
   }
 
   private async require(userId: string, id: string, db: Knex): Promise<Grant> {

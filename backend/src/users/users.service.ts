@@ -1,9 +1,10 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
 import type { AnswerOf, BodyOf, QueryOf, User, contract } from '@bellgap/common/api';
+import { AccountLinksService } from '../account-links/account-links.service';
 import { AuditService, changesBetween } from '../audit/audit.service';
-import { InvitationsService } from '../auth/invitations.service';
 import { SessionsService } from '../auth/sessions.service';
+import { MailService } from '../mail/mail.service';
 import { Clock } from '../platform/clock';
 import { invalidAt, notFound, wrongState } from '../platform/domain-error';
 import { KNEX, isUuid } from '../platform/knex';
@@ -23,7 +24,8 @@ export class UsersService {
     private readonly users: UsersRepository,
     private readonly grants: GrantsRepository,
     private readonly sessions: SessionsService,
-    private readonly invitations: InvitationsService,
+    private readonly links: AccountLinksService,
+    private readonly mail: MailService,
     private readonly audit: AuditService,
   ) {}
 
@@ -38,7 +40,7 @@ export class UsersService {
       const id = await this.users.insert({ ...given, createdAt: this.clock.now() }, db);
       const changes = changesBetween({}, given);
       await this.audit.record(db, { actorId: actor.id, action: 'user.created', entity: 'user', entityId: id, changes });
-      return { user: await this.answer(id, db), ...(await this.invitations.invite(id, db)) };
+      return { user: await this.answer(id, db), ...(await this.sendInvitation(id, db)) };
     });
   }
 
@@ -50,10 +52,9 @@ export class UsersService {
       const changes = changesBetween({ email, name, active }, given);
       if (Object.keys(changes).length === 0) return this.answer(id, db);
       await this.users.update(id, given, this.clock.now(), db);
-      if (!given.active) {
-        await this.sessions.endAll(id, db);
-        await this.invitations.withdraw(id, db);
-      }
+      if (!given.active) await this.sessions.endAll(id, db);
+      // A link was mailed to the address as it was; whoever reads there now is not known.
+      if (!given.active || given.email !== email) await this.links.withdraw(id, db);
       await this.audit.record(db, { actorId: actor.id, action: 'user.changed', entity: 'user', entityId: id, changes });
       return this.answer(id, db);
     });
@@ -66,7 +67,7 @@ export class UsersService {
       const { active } = await this.require(id, db, { forUpdate: true });
       if (!active) throw wrongState('This account is not active; activate it first.');
       await this.audit.record(db, { actorId: actor.id, action: 'user.invited', entity: 'user', entityId: id });
-      return { user: await this.answer(id, db), ...(await this.invitations.invite(id, db)) };
+      return { user: await this.answer(id, db), ...(await this.sendInvitation(id, db)) };
     });
   }
 
@@ -99,7 +100,7 @@ export class UsersService {
         entity: 'user',
         entityId: id,
       });
-      return { user: await this.answer(id, db), ...(await this.invitations.invite(id, db)) };
+      return { user: await this.answer(id, db), ...(await this.sendInvitation(id, db)) };
     });
   }
 
@@ -108,6 +109,13 @@ export class UsersService {
     const user = isUuid(id) ? await this.users.find(id, db, options) : null;
     if (!user) throw notFound('person');
     return user;
+  }
+
+  /** The link is mailed, and answered once for whoever invites. */
+  private async sendInvitation(userId: string, db: Knex.Transaction): Promise<{ link: string; expiresAt: string }> {
+    const { id, ...invitation } = await this.links.issue({ userId, purpose: 'invitation' }, db);
+    await this.mail.send(db, userId, { kind: 'invitation', data: { linkId: id } });
+    return invitation;
   }
 
   private async answer(id: string, db: Knex): Promise<User> {

@@ -36,6 +36,7 @@ export class TestApp {
       DATABASE_URL: database.url,
       PASSWORD_COST: '4',
       REQUEST_LOG: 'no',
+      ROLE: 'web',
       FRONTEND_FOLDER: frontendFolder,
       ...env,
     });

@@ -33,6 +33,7 @@ import {
   towerFamilyAnswer,
   userAnswer,
 } from './answers';
+import { accountEndpoints } from './account-endpoints';
 import { endpoint } from './endpoint';
 import { methodEndpoints } from './method-endpoints';
 import { DRAFT_READERS, DRAFT_WRITERS } from './roles';
@@ -130,6 +131,8 @@ export const contract = {
     body: acceptInvitationSchema,
     success: 204,
   }),
+
+  ...accountEndpoints,
 
   // people
   users: endpoint({

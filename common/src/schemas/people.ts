@@ -65,6 +65,12 @@ export const acceptInvitationSchema = yup
   .object({ token: requiredText('Invitation', 200), password: newPassword() })
   .noUnknown();
 
+export const requestPasswordResetSchema = yup.object({ email: emailSchema }).noUnknown();
+
+export const acceptPasswordResetSchema = yup
+  .object({ token: requiredText('Link', 200), password: newPassword() })
+  .noUnknown();
+
 export const createUserSchema = yup.object({ email: emailSchema, name: requiredText('Name', 120) }).noUnknown();
 
 export const updateUserSchema = yup
