@@ -78,16 +78,18 @@ export interface AltitudeCorrection {
   exponent: number;
   /** What is corrected, e.g. "creepage"; tells the lines of the working apart. */
   use: string;
+  /** Where `use` is a name of its own and no words. */
+  heading?: string;
   source: SourceReference;
 }
 
 /** The altitude factor of one use, with its line in the working. */
 export function altitudeCorrection(
-  { altitudeM, originM, exponent, use, source }: AltitudeCorrection,
+  { altitudeM, originM, exponent, use, heading = `Altitude factor, ${use}`, source }: AltitudeCorrection,
   calculation: Calculation,
 ): number {
   const figures = { altitudeM: Math.max(0, altitudeM), originM, altitudeExponent: exponent };
-  return calculation.run(altitudeFactor, figures, { as: use, heading: `Altitude factor, ${use}`, source });
+  return calculation.run(altitudeFactor, figures, { as: use, heading, source });
 }
 
 /** The altitude factor on a level, counted from the altitude up to which the level holds. */

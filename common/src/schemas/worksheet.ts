@@ -4,19 +4,46 @@ import {
   POWER_FREQUENCY_SURFACES,
   SUBCONDUCTOR_COUNTS,
   WORKSHEET_PLACES,
+  type WorksheetRow,
 } from '../engine/worksheet-model';
 import { list, measure, oneOf, part } from './parts';
 import type { Field } from './fields';
 
+export interface WorksheetField extends Field {
+  /** What to enter, or what is taken where it is left empty. */
+  help?: string;
+}
+
 /** Every input of the insulation level worksheet by its path: words, unit and limits. */
 export const WORKSHEET_FIELDS = {
   highestVoltageKv: { label: 'Highest voltage', basis: 'line to line', unit: 'kV rms', above: 0 },
-  altitudeM: { label: 'Altitude', unit: 'm', quantity: 'length-m', atLeast: -430 },
-  earthFaultFactor: { label: 'Earth-fault factor', atLeast: 1, atMost: 1.9 },
-  loadRejectionFactor: { label: 'Load-rejection factor', atLeast: 1, atMost: 2 },
+  altitudeM: {
+    label: 'Altitude',
+    unit: 'm',
+    quantity: 'length-m',
+    atLeast: -430,
+    help: 'of the highest site; below 1000 m the level is worked out for 1000 m',
+  },
+  earthFaultFactor: {
+    label: 'Earth-fault factor',
+    atLeast: 1,
+    atMost: 1.9,
+    help: 'voltage of the sound phases over the one before the fault',
+  },
+  loadRejectionFactor: {
+    label: 'Load-rejection factor',
+    atLeast: 1,
+    atMost: 2,
+    help: 'voltage between phases over the highest voltage',
+  },
   powerFrequencySurface: { label: 'Surface at power frequency' },
   externalInsulation: { label: 'External insulation' },
-  switchingPhaseToEarthExponent: { label: 'Altitude exponent, switching to earth', atLeast: 0, atMost: 1 },
+  switchingPhaseToEarthExponent: {
+    label: 'Altitude exponent, switching to earth',
+    atLeast: 0,
+    atMost: 1,
+    help: 'left empty: worked out by the g-method',
+  },
   'arrester.switchingProtectionKvPeak': { label: 'Switching protection level', unit: 'kV peak', above: 0 },
   'arrester.lightningProtectionKvPeak': { label: 'Lightning protection level', unit: 'kV peak', above: 0 },
   'places.place': { label: 'Place' },
@@ -26,8 +53,18 @@ export const WORKSHEET_FIELDS = {
     atLeast: 1,
     atMost: 9,
   },
-  'places.phaseToEarthCoordinationFactor': { label: 'Co-ordination factor to earth', atLeast: 1, atMost: 1.1 },
-  'places.phaseToPhaseCoordinationFactor': { label: 'Co-ordination factor between phases', atLeast: 1, atMost: 1.1 },
+  'places.phaseToEarthCoordinationFactor': {
+    label: 'Co-ordination factor to earth',
+    atLeast: 1,
+    atMost: 1.1,
+    help: "left empty: the straight line in place of the standard's curve",
+  },
+  'places.phaseToPhaseCoordinationFactor': {
+    label: 'Co-ordination factor between phases',
+    atLeast: 1,
+    atMost: 1.1,
+    help: "left empty: the straight line in place of the standard's curve",
+  },
   'fastFront.subconductorsCount': { label: 'Sub-conductors of the line' },
   'fastFront.linesConnectedCount': { label: 'Lines that stay connected', atLeast: 1, atMost: 20, whole: true },
   'fastFront.spanM': { label: 'Span of the line', unit: 'm', quantity: 'length-m', above: 0 },
@@ -45,7 +82,14 @@ export const WORKSHEET_FIELDS = {
     quantity: 'length-m',
     atLeast: 0,
   },
-} as const satisfies Record<string, Field>;
+} as const satisfies Record<string, WorksheetField>;
+
+export type WorksheetPath = keyof typeof WORKSHEET_FIELDS;
+
+/** The field of a path, widened, so that every property can be asked; rows of a list share their fields. */
+export function worksheetFieldOf(path: string): WorksheetField | undefined {
+  return (WORKSHEET_FIELDS as Record<string, WorksheetField>)[path.replace(/\[\d+\]/g, '')];
+}
 
 /** The words of every choice of the worksheet. */
 export const WORKSHEET_CHOICES = {
@@ -56,10 +100,20 @@ export const WORKSHEET_CHOICES = {
   },
   externalInsulation: { 'air-or-dry': 'Air gaps and dry insulators', 'wet-insulators': 'Wet insulators' },
   place: { 'line-entrance': 'Line entrance', 'other-equipment': 'Other equipment' },
+  subconductorsCount: Object.fromEntries(SUBCONDUCTOR_COUNTS.map((count) => [count, String(count)])),
 } as const;
 
-const label = (path: keyof typeof WORKSHEET_FIELDS): string => WORKSHEET_FIELDS[path].label;
-const figure = (path: keyof typeof WORKSHEET_FIELDS) => measure(label(path), WORKSHEET_FIELDS[path] as Field);
+/** The words of what the worksheet answers. */
+export const WORKSHEET_WORDS = {
+  stress: { temporary: 'Temporary', 'slow-front': 'Slow front', 'fast-front': 'Fast front' },
+  insulation: { external: 'external insulation', internal: 'internal insulation' },
+  distance: { 'phase-to-earth': 'to earth', 'phase-to-phase': 'between phases' },
+} as const satisfies {
+  [Name in 'stress' | 'insulation' | 'distance']: Record<WorksheetRow[Name], string>;
+};
+
+const label = (path: WorksheetPath): string => WORKSHEET_FIELDS[path].label;
+const figure = (path: WorksheetPath) => measure(label(path), WORKSHEET_FIELDS[path] as Field);
 
 /** What can be read at all of a worksheet; every input may be null, what depends on it is then not assessed. */
 export const worksheetInputSchema = yup
@@ -83,7 +137,7 @@ export const worksheetInputSchema = yup
         slowFrontPhaseToPhasePu: figure('places.slowFrontPhaseToPhasePu'),
         phaseToEarthCoordinationFactor: figure('places.phaseToEarthCoordinationFactor'),
         phaseToPhaseCoordinationFactor: figure('places.phaseToPhaseCoordinationFactor'),
-      }),
+      }).test('described', 'Places: each place needs its figures', (place) => place !== null),
       WORKSHEET_PLACES.length,
     ).test('each-place-once', 'Places: each place once', (places) => {
       const named = (places ?? []) as ({ place?: string | null } | null)[];

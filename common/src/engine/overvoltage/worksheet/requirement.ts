@@ -102,7 +102,14 @@ export function requirement(given: Representative, site: WorksheetSite, calculat
   const external = insulation === 'external';
   const altitudeFactor = external
     ? altitudeCorrection(
-        { altitudeM: site.altitudeM, originM: 0, exponent: exponent.exponent, use: as, source: exponent.source },
+        {
+          altitudeM: site.altitudeM,
+          originM: 0,
+          exponent: exponent.exponent,
+          use: as,
+          heading: 'Altitude factor',
+          source: exponent.source,
+        },
         calculation,
       )
     : null;
