@@ -161,7 +161,11 @@ export default typescript.config(
   ...[1, 2, 3].map((depth) => ({
     files: [`frontend/src/${'*/'.repeat(depth)}*.{ts,tsx}`],
     ignores: ['frontend/src/app/**', 'frontend/src/testing/**', ...TESTS],
-    rules: noImports(...frontendImports(), otherFeatures(depth)),
+    rules: noImports(
+      ...frontendImports(),
+      noWorkspace('common/testing', 'What stands in for the server is for tests.'),
+      otherFeatures(depth),
+    ),
   })),
   {
     files: ['frontend/src/**/*.{ts,tsx}'],
