@@ -1,5 +1,6 @@
-import { fieldOf } from '@bellgap/common/schemas';
+import { fieldOf, type Field } from '@bellgap/common/schemas';
 import { getIn, type FormikValues } from 'formik';
+import type { ReactNode } from 'react';
 import { NumberField } from '../fields/number-field';
 import { idOf, type SchemaForm } from './use-schema-form';
 
@@ -9,6 +10,9 @@ interface FormFigureProps<Values extends FormikValues> {
   /** Where the path is not among the inputs of a specification. */
   label?: string;
   unit?: string;
+  /** Words, basis and unit of a field that is no input of a specification. */
+  field?: Field | undefined;
+  note?: ReactNode;
 }
 
 function withoutLabel(fault: string | undefined, label: string): string | undefined {
@@ -18,8 +22,8 @@ function withoutLabel(fault: string | undefined, label: string): string | undefi
 }
 
 /** A figure exactly as typed; text that cannot be read stays in the field and is refused by the schema. */
-export function FormFigure<Values extends FormikValues>({ form, path, label, unit }: FormFigureProps<Values>) {
-  const field = fieldOf(path);
+export function FormFigure<Values extends FormikValues>(props: FormFigureProps<Values>) {
+  const { form, path, label, unit, field = fieldOf(path), note } = props;
   const value = getIn(form.formik.values, path) as number | string | null;
   const unread = typeof value === 'string' ? value : undefined;
   const words = label ?? field?.label ?? path;
@@ -30,6 +34,7 @@ export function FormFigure<Values extends FormikValues>({ form, path, label, uni
       label={words}
       basis={field?.basis}
       unit={unit ?? field?.unit}
+      note={note}
       value={typeof value === 'number' ? value : null}
       unread={unread}
       error={unread === undefined ? withoutLabel(form.faultOf(path), words) : undefined}

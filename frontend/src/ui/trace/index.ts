@@ -1,3 +1,3 @@
 export { TraceArea } from './trace-area';
-export { SourceWords, TraceLines } from './trace-lines';
+export { SourceWords, TraceLines, TraceStep } from './trace-lines';
 export { TraceSourceContext, type TraceSource } from './trace-source';

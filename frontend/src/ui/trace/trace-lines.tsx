@@ -24,11 +24,15 @@ function resultText({ result, unit }: TraceLine): string | null {
   return unit ? `${figure} ${unit}` : figure;
 }
 
-function Line({ line }: { line: TraceLine }) {
+/** One step of a calculation; `of` says what it is for, where several steps share a heading. */
+export function TraceStep({ line, of }: { line: TraceLine; of?: string }) {
   const result = resultText(line);
   return (
     <div className="bg-trace-line">
-      <div className="bg-trace-heading">{line.heading}</div>
+      <div className="bg-trace-heading">
+        {line.heading}
+        {of && <span className="bg-trace-of">, {of}</span>}
+      </div>
       {line.formula && <div className="bg-num bg-trace-formula">{line.formula}</div>}
       {line.substitution && line.substitution !== line.formula && <div className="bg-num">{line.substitution}</div>}
       <div className="bg-num bg-trace-result">{result === null ? 'no figure' : `= ${result}`}</div>
@@ -46,7 +50,7 @@ export function TraceLines({ source, name }: { source: TraceSource; name: string
   return (
     <>
       {lines.map((line) => (
-        <Line key={line.id} line={line} />
+        <TraceStep key={line.id} line={line} />
       ))}
     </>
   );
