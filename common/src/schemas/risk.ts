@@ -17,7 +17,7 @@ export const RISK_FIELDS = {
 
 /** The words of every choice of a risk of flashover, and of what its answer is told by. */
 export const RISK_CHOICES = {
-  front: { slow: 'Slow, as of switching', fast: 'Fast, as of lightning' },
+  front: { slow: 'Slow, switching', fast: 'Fast, lightning' },
   tail: { gaussian: 'Gaussian tails', truncated: 'Ends cut off' },
 } as const;
 

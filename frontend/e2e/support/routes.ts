@@ -46,6 +46,7 @@ export const SIGNED_IN_STOPS: readonly Stop[] = [
   { name: 'table', route: 'table', path: paths.table.to('iec-60071-1:a1') },
   { name: 'formula', route: 'table', path: paths.table.to('atmosphere.altitude-factor') },
   { name: 'known-answers', route: 'knownAnswers', path: paths.knownAnswers.to() },
+  { name: 'risk', route: 'risk', path: paths.risk.to() },
   { name: 'account', route: 'account', path: paths.account.to() },
   { name: 'administration', route: 'administration', path: paths.administration.to(), roles: ['administrator'] },
 ];

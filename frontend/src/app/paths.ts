@@ -17,6 +17,7 @@ export const paths = {
   tables: { pattern: '/tables', to: () => '/tables' },
   table: { pattern: '/tables/:key', to: (key: string) => `/tables/${encodeURIComponent(key)}` },
   knownAnswers: { pattern: '/known-answers', to: () => '/known-answers' },
+  risk: { pattern: '/risk', to: () => '/risk' },
   administration: { pattern: '/administration', to: () => '/administration' },
   account: { pattern: '/account', to: () => '/account' },
   signIn: {

@@ -73,6 +73,10 @@ export const routes: RouteObject[] = [
                 }),
               },
               {
+                path: paths.risk.pattern,
+                lazy: async () => ({ Component: (await import('../risk/pages/risk-page')).RiskPage }),
+              },
+              {
                 path: paths.administration.pattern,
                 lazy: async () => ({
                   Component: (await import('../administration/pages/administration-page')).AdministrationPage,
