@@ -33,6 +33,23 @@ describe('catalogue', () => {
     }
   });
 
+  it('gives the dimensions of the sheds where they are known, and the strength in bending of a post', async () => {
+    const { answer: rod } = await reader.call(insulator, { params: { code: 'C120-220' } });
+    expect(rod?.sheds).toEqual({
+      spacingMm: 92,
+      overhangMm: 62,
+      secondOverhangMm: 44,
+      clearanceMm: 47,
+      pathMm: 171,
+      pathClearanceMm: 47,
+      underRibs: false,
+    });
+    const { answer: disc } = await reader.call(insulator, { params: { code: 'U120B' } });
+    expect(disc).toMatchObject({ sheds: null, cantileverStrengthKn: null });
+    const { answer: post } = await reader.call(insulator, { params: { code: 'CP10-66' } });
+    expect(post).toMatchObject({ kind: 'line-post', cantileverStrengthKn: 10 });
+  });
+
   it('gives a unit in its newest version', async () => {
     const { answer: first } = await reader.call(insulator, { params: { code: 'G160-S' } });
     expect(first).toMatchObject({ version: 1, creepageMm: 370, source: { status: 'practice' } });

@@ -20,7 +20,7 @@ describe('the seeds', () => {
     const once = await everything();
     expect(once.users).toHaveLength(11);
     expect(once.projects).toHaveLength(4);
-    expect(once.insulators).toHaveLength(11);
+    expect(once.insulators).toHaveLength(12);
     expect(once.tower_families).toHaveLength(7);
 
     await seedReference(database.owner);

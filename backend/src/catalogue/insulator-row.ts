@@ -18,6 +18,14 @@ export const INSULATOR_COLUMNS = [
   'i.dry_arc_mm',
   'i.mass_kg',
   'i.routine_test_load_kn',
+  'i.cantilever_strength_kn',
+  'i.shed_spacing_mm',
+  'i.shed_overhang_mm',
+  'i.second_shed_overhang_mm',
+  'i.shed_clearance_mm',
+  'i.shed_path_mm',
+  'i.shed_path_clearance_mm',
+  'i.shed_under_ribs',
   'i.wet_flashover',
   'i.note',
   'i.source_document',
@@ -45,6 +53,14 @@ export interface InsulatorRow {
   dry_arc_mm: number | null;
   mass_kg: number | null;
   routine_test_load_kn: number | null;
+  cantilever_strength_kn: number | null;
+  shed_spacing_mm: number | null;
+  shed_overhang_mm: number | null;
+  second_shed_overhang_mm: number | null;
+  shed_clearance_mm: number | null;
+  shed_path_mm: number | null;
+  shed_path_clearance_mm: number | null;
+  shed_under_ribs: boolean | null;
   wet_flashover: CatalogueUnit['wetFlashover'];
   note: string | null;
   source_document: string;
@@ -52,6 +68,20 @@ export interface InsulatorRow {
   source_clause: string;
   source_status: CatalogueUnit['source']['status'];
   withdrawn: boolean;
+}
+
+/** Null where the catalogue has not one of the dimensions. */
+function toSheds(row: InsulatorRow): CatalogueUnit['sheds'] {
+  const sheds = {
+    spacingMm: row.shed_spacing_mm,
+    overhangMm: row.shed_overhang_mm,
+    secondOverhangMm: row.second_shed_overhang_mm,
+    clearanceMm: row.shed_clearance_mm,
+    pathMm: row.shed_path_mm,
+    pathClearanceMm: row.shed_path_clearance_mm,
+    underRibs: row.shed_under_ribs,
+  };
+  return Object.values(sheds).every((value) => value === null) ? null : sheds;
 }
 
 export function toUnit(row: InsulatorRow): CatalogueUnit {
@@ -72,6 +102,8 @@ export function toUnit(row: InsulatorRow): CatalogueUnit {
     dryArcMm: row.dry_arc_mm,
     massKg: row.mass_kg,
     routineTestLoadKn: row.routine_test_load_kn,
+    cantileverStrengthKn: row.cantilever_strength_kn,
+    sheds: toSheds(row),
     wetFlashover: row.wet_flashover,
     note: row.note,
     source: {
@@ -104,6 +136,14 @@ export function fromUnit(
     dry_arc_mm: unit.dryArcMm,
     mass_kg: unit.massKg,
     routine_test_load_kn: unit.routineTestLoadKn,
+    cantilever_strength_kn: unit.cantileverStrengthKn ?? null,
+    shed_spacing_mm: unit.sheds?.spacingMm ?? null,
+    shed_overhang_mm: unit.sheds?.overhangMm ?? null,
+    second_shed_overhang_mm: unit.sheds?.secondOverhangMm ?? null,
+    shed_clearance_mm: unit.sheds?.clearanceMm ?? null,
+    shed_path_mm: unit.sheds?.pathMm ?? null,
+    shed_path_clearance_mm: unit.sheds?.pathClearanceMm ?? null,
+    shed_under_ribs: unit.sheds?.underRibs ?? null,
     wet_flashover: unit.wetFlashover && JSON.stringify(unit.wetFlashover),
     note: unit.note,
     source_document: unit.source.document,

@@ -15,6 +15,8 @@ const BLANK = {
   dryArcMm: null,
   massKg: null,
   routineTestLoadKn: null,
+  cantileverStrengthKn: null,
+  sheds: null,
   wetFlashover: null,
   withdrawn: false,
 } as const;

@@ -256,6 +256,19 @@ export const sourceAnswer = yup
   })
   .noUnknown();
 
+/** Dimensions of the sheds; null is not known. */
+const shedsAnswer = yup
+  .object({
+    spacingMm: nullableNumber(),
+    overhangMm: nullableNumber(),
+    secondOverhangMm: nullableNumber(),
+    clearanceMm: nullableNumber(),
+    pathMm: nullableNumber(),
+    pathClearanceMm: nullableNumber(),
+    underRibs: yup.boolean().nullable().defined(),
+  })
+  .noUnknown();
+
 export const insulatorAnswer = yup
   .object({
     code: words(),
@@ -287,6 +300,9 @@ export const insulatorAnswer = yup
     dryArcMm: nullableNumber(),
     massKg: nullableNumber(),
     routineTestLoadKn: nullableNumber(),
+    /** Strength of a line post in bending. */
+    cantileverStrengthKn: yup.number().nullable().optional(),
+    sheds: shedsAnswer.nullable().optional().default(undefined),
     wetFlashover: yup
       .array()
       .of(yup.object({ units: number(), wetKvRms: number() }).noUnknown().required())

@@ -7,6 +7,7 @@ import * as mechanical from './mechanical';
 import * as overvoltage from './overvoltage';
 import * as worksheet from './overvoltage/worksheet/formulas';
 import * as pollution from './pollution';
+import * as profile from './profile';
 import * as risk from './risk';
 import * as stringVoltage from './string-voltage';
 import type { Formula } from './trace';
@@ -21,6 +22,7 @@ const ROOMS = {
   mechanical,
   overvoltage,
   pollution,
+  profile,
   risk,
   stringFormulas,
   stringVoltage,

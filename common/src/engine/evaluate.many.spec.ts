@@ -18,6 +18,8 @@ import {
   type Basis,
   type Evaluation,
   type InsulationLevelInput,
+  type InsulatorUnit,
+  type ShedDimensions,
   type SpecificationInput,
 } from './model';
 import { insulationLevelsFor } from './overvoltage';
@@ -78,6 +80,7 @@ const aString: fc.Arbitrary<NonNullable<SpecificationInput['string']>> = fc.reco
   hardwareLengthMm: real(0, 900),
   vAngleWindwardDeg: real(20, 70),
   vAngleLeewardDeg: real(20, 70),
+  postAngleDeg: real(0, 90),
 });
 
 const aClearance: fc.Arbitrary<NonNullable<SpecificationInput['clearance']>> = fc.record({
@@ -96,6 +99,8 @@ const aLoadCase = fc.record({
   conductorWeightNPerM: real(3, 60),
   windPressurePa: real(0, 3000),
   conductorDiameterMm: real(8, 60),
+  iceRadialMm: fc.oneof(fc.constant(null), real(0, 40)),
+  iceDensityKgPerM3: real(300, 920),
   conductorTensionN: real(0, 90_000),
   stringWindN: real(0, 2000),
   stringWeightN: real(0, 5000),
@@ -110,7 +115,19 @@ const mechanicalLoads: fc.Arbitrary<NonNullable<SpecificationInput['mechanical']
   windSpanM: real(0, 900),
   weightSpanM: real(-200, 1200),
   lineAngleDeg: real(-60, 60),
+  fittingsStrengthKn: fc.oneof(fc.constant(null), real(40, 400)),
   cases: maybe(fc.array(aLoadCase, { maxLength: 2 })),
+});
+
+const aMeasure = fc.constantFrom(null, 12, 30, 45, 62, 95, 170);
+const someSheds: fc.Arbitrary<ShedDimensions> = fc.record({
+  spacingMm: aMeasure,
+  overhangMm: aMeasure,
+  secondOverhangMm: aMeasure,
+  clearanceMm: aMeasure,
+  pathMm: aMeasure,
+  pathClearanceMm: aMeasure,
+  underRibs: fc.constantFrom(null, true, false),
 });
 
 const UNITS = [
@@ -129,8 +146,11 @@ const UNITS = [
   aCeramicRod(),
   aCeramicRod({ averageDiameterMm: null }),
   aCompositeRod({ kind: 'line-post' }),
+  aCeramicRod({ kind: 'line-post', cantileverStrengthKn: 12 }),
   null,
 ];
+const withSheds = (unit: InsulatorUnit | null): fc.Arbitrary<InsulatorUnit | null> =>
+  unit === null ? fc.constant(null) : fc.option(someSheds, { nil: null }).map((sheds) => ({ ...unit, sheds }));
 const SETTINGS = [
   companySettings(),
   companySettings({
@@ -142,7 +162,7 @@ const SETTINGS = [
 
 const aCase = fc.constantFrom(...LEVELS).chain(({ basis, highestVoltageKv, level }) =>
   fc.record({
-    insulator: fc.constantFrom(...UNITS),
+    insulator: fc.constantFrom(...UNITS).chain(withSheds),
     settings: fc.constantFrom(...SETTINGS),
     input: fc.record(
       {
@@ -232,12 +252,30 @@ function passedFaults(
   ];
 }
 
+/** Checks of the profile say something and change nothing. */
+function profileFaults({ string, cautions, notAssessed }: Evaluation, { insulator }: Case): string[] {
+  const own = cautions.filter(({ code }) => code.startsWith('profile-'));
+  const named = notAssessed.some(({ part }) => part === 'string.profile');
+  return [
+    ...faultOf(
+      own.every(({ severity }) => severity === 'info' || severity === 'caution'),
+      'a profile that does more than warn',
+    ),
+    ...faultOf(string === null || insulator === null || named || own.length > 0, 'a profile of which nothing is said'),
+    ...faultOf(insulator?.sheds ? true : own.length === 0, 'a profile without dimensions'),
+  ];
+}
+
 /** No figure together with a stop. */
 function stopFaults({ string, mechanical, cautions }: Evaluation): string[] {
   const stops = cautions.filter(({ severity }) => severity === 'stop').map(({ code }) => code);
+  const legs = (mechanical?.cases ?? []).flatMap(({ legs: one, slackLeg, loadPerStringN }) =>
+    one ? faultOf(slackLeg === (one.leewardN === 0) || loadPerStringN === null, 'a slack leg that carries') : [],
+  );
   const uplift = stops.includes('mechanical-uplift');
   const ofString = stops.some((code) => !code.startsWith('clearance') && !code.startsWith('mechanical'));
   return [
+    ...legs,
     ...faultOf(!ofString || string === null || string.units === null, 'a count beside a stop'),
     ...faultOf(!uplift || mechanical?.classRequiredKn === null, 'a class beside uplift'),
     ...faultOf(
@@ -253,6 +291,8 @@ describe(`${RUNS} inputs of every kind`, () => {
   it('have answers without NaN, negative figures or unearned passes, whose bridges add up, the same bytes each time', () => {
     let bridges = 0;
     let strengths = 0;
+    let posts = 0;
+    let profiles = 0;
     fc.assert(
       fc.property(aCase, (one) => {
         const context = aContext({ insulator: one.insulator, settings: one.settings });
@@ -263,15 +303,20 @@ describe(`${RUNS} inputs of every kind`, () => {
           ...bridgeFaults(evaluation),
           ...passedFaults(evaluation, one),
           ...stopFaults(evaluation),
+          ...profileFaults(evaluation, one),
           ...faultOf(JSON.stringify(evaluation) === JSON.stringify(again), 'other bytes for the same input'),
         ];
         if (evaluation.ruleOfThumb.bridge !== null) bridges += 1;
         if (typeof evaluation.mechanical?.strengthRequiredKn === 'number') strengths += 1;
+        if (evaluation.mechanical?.cases.some(({ post }) => post)) posts += 1;
+        if (evaluation.cautions.some(({ code }) => code.startsWith('profile-'))) profiles += 1;
         if (faults.length > 0) throw new Error(faults.join('; '));
       }),
       { numRuns: RUNS },
     );
     expect(bridges).toBeGreaterThan(RUNS / 400);
     expect(strengths).toBeGreaterThan(RUNS / 400);
+    expect(posts).toBeGreaterThan(RUNS / 400);
+    expect(profiles).toBeGreaterThan(RUNS / 400);
   }, 120_000);
 });

@@ -93,4 +93,10 @@ describe(inputFaults.name, () => {
     ]);
     expect(paths(aLine({ string: { arcingDevices: 'horns', arcGapMm: null } }))).toEqual(['string.arcGapMm']);
   });
+
+  it('refuses a V without the angle of a leg', () => {
+    const v = { arrangement: 'v-suspension', vAngleWindwardDeg: 45 } as const;
+    expect(paths(aLine({ string: v }))).toEqual(['string.vAngleLeewardDeg']);
+    expect(paths(aLine({ string: { ...v, vAngleLeewardDeg: 40 } }))).toEqual([]);
+  });
 });

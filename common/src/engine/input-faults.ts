@@ -66,6 +66,11 @@ function stringFaults({ string }: SpecificationInput, { insulator }: EvaluationC
   if (string.arcingDevices === 'horns' && !isKnown(string.arcGapMm)) {
     faults.push({ path: 'string.arcGapMm', message: 'Horns need the gap between them' });
   }
+  if (string.arrangement === 'v-suspension') {
+    for (const name of ['vAngleWindwardDeg', 'vAngleLeewardDeg'] as const) {
+      if (!isKnown(string[name])) faults.push({ path: `string.${name}`, message: 'A V needs the angle of each leg' });
+    }
+  }
   return faults;
 }
 

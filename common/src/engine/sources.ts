@@ -24,6 +24,7 @@ export const EN_50341_1 = { document: 'EN 50341-1', edition: '2001' } as const;
 export const RD_223_2008 = { document: 'RD 223/2008, ITC-LAT 07', edition: '2008' } as const;
 export const RD_337_2014_RAT_12 = { document: 'RD 337/2014, ITC-RAT 12', edition: '2014' } as const;
 export const RD_337_2014_RAT_15 = { document: 'RD 337/2014, ITC-RAT 15', edition: '2014' } as const;
+export const SWISS_LEV = { document: 'Swiss ordinance on electric lines (LeV)', edition: '1994' } as const;
 export const RUS_1724E_200 = { document: 'RUS Bulletin 1724E-200', edition: '2009' } as const;
 export const RUS_1724E_300 = { document: 'RUS Bulletin 1724E-300', edition: '2001' } as const;
 export const ANSI_C37_30 = { document: 'ANSI/IEEE C37.30', edition: '1997' } as const;

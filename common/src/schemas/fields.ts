@@ -6,7 +6,8 @@ export interface Field {
   label: string;
   /** Basis of a voltage, shown beside every kV. */
   basis?: 'line to line' | 'phase to earth';
-  unit?: 'kV rms' | 'kV peak' | 'kV' | 'm' | 'mm' | 'Hz' | 'kA' | 's' | '°' | 'N' | 'N/m' | 'Pa' | '°C' | 'kN';
+  unit?:
+    'kV rms' | 'kV peak' | 'kV' | 'm' | 'mm' | 'Hz' | 'kA' | 's' | '°' | 'N' | 'N/m' | 'Pa' | '°C' | 'kN' | 'kg/m³';
   quantity?: 'length-mm' | 'length-m' | 'force-kn' | 'force-n';
   /** Smallest figure that can be read at all; the method's own limits are the engine's. */
   above?: number;
@@ -65,6 +66,7 @@ export const FIELDS = {
   'string.hardwareLengthMm': { label: 'Length of fittings', unit: 'mm', quantity: 'length-mm', atLeast: 0 },
   'string.vAngleWindwardDeg': { label: 'V leg angle, windward', unit: '°', above: 0, atMost: 89 },
   'string.vAngleLeewardDeg': { label: 'V leg angle, leeward', unit: '°', above: 0, atMost: 89 },
+  'string.postAngleDeg': { label: 'Post above the horizontal', unit: '°', atLeast: 0, atMost: 90 },
   'clearance.method': { label: 'Clearance method' },
   'clearance.shapePhaseToEarth': { label: 'Shape, phase to earth' },
   'clearance.shapePhaseToPhase': { label: 'Shape, between phases' },
@@ -85,6 +87,7 @@ export const FIELDS = {
   'mechanical.windSpanM': { label: 'Wind span', unit: 'm', quantity: 'length-m', atLeast: 0 },
   'mechanical.weightSpanM': { label: 'Weight span', unit: 'm', quantity: 'length-m' },
   'mechanical.lineAngleDeg': { label: 'Line angle', unit: '°', atLeast: -180, atMost: 180 },
+  'mechanical.fittingsStrengthKn': { label: 'Strength of the fittings', unit: 'kN', quantity: 'force-kn', above: 0 },
   'mechanical.cases': { label: 'Load cases' },
   'mechanical.cases.name': { label: 'Name' },
   'mechanical.cases.kind': { label: 'Kind of case' },
@@ -96,6 +99,8 @@ export const FIELDS = {
     quantity: 'length-mm',
     above: 0,
   },
+  'mechanical.cases.iceRadialMm': { label: 'Ice all round', unit: 'mm', quantity: 'length-mm', atLeast: 0 },
+  'mechanical.cases.iceDensityKgPerM3': { label: 'Density of the ice', unit: 'kg/m³', above: 0 },
   'mechanical.cases.conductorTensionN': { label: 'Conductor tension', unit: 'N', quantity: 'force-n', atLeast: 0 },
   'mechanical.cases.stringWindN': { label: 'Wind on the string', unit: 'N', quantity: 'force-n', atLeast: 0 },
   'mechanical.cases.stringWeightN': { label: 'Weight of the string', unit: 'N', quantity: 'force-n', atLeast: 0 },

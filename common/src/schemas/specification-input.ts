@@ -83,6 +83,12 @@ const pollution = part({
   recheckBy: dateText('site.pollution.recheckBy'),
 });
 
+const legAngle = (path: 'string.vAngleWindwardDeg' | 'string.vAngleLeewardDeg') =>
+  measureOf(path).test('v-needs-its-angles', 'A V needs the angle of each leg', (angle, { parent }) => {
+    const arrangement = (parent as { arrangement?: string | null }).arrangement;
+    return !(arrangement === 'v-suspension' && typeof angle !== 'number');
+  });
+
 const string = part({
   insulatorCode: text('string.insulatorCode', 40),
   arrangement: oneOf('string.arrangement', ARRANGEMENTS),
@@ -100,8 +106,9 @@ const string = part({
     },
   ),
   hardwareLengthMm: measureOf('string.hardwareLengthMm'),
-  vAngleWindwardDeg: measureOf('string.vAngleWindwardDeg'),
-  vAngleLeewardDeg: measureOf('string.vAngleLeewardDeg'),
+  vAngleWindwardDeg: legAngle('string.vAngleWindwardDeg'),
+  vAngleLeewardDeg: legAngle('string.vAngleLeewardDeg'),
+  postAngleDeg: measureOf('string.postAngleDeg'),
 });
 
 const clearance = part({
@@ -122,6 +129,7 @@ const mechanical = part({
   windSpanM: measureOf('mechanical.windSpanM'),
   weightSpanM: measureOf('mechanical.weightSpanM'),
   lineAngleDeg: measureOf('mechanical.lineAngleDeg'),
+  fittingsStrengthKn: measureOf('mechanical.fittingsStrengthKn'),
   cases: list(
     labelOf('mechanical.cases'),
     part({
@@ -130,6 +138,8 @@ const mechanical = part({
       conductorWeightNPerM: measureOf('mechanical.cases.conductorWeightNPerM'),
       windPressurePa: measureOf('mechanical.cases.windPressurePa'),
       conductorDiameterMm: measureOf('mechanical.cases.conductorDiameterMm'),
+      iceRadialMm: measureOf('mechanical.cases.iceRadialMm'),
+      iceDensityKgPerM3: measureOf('mechanical.cases.iceDensityKgPerM3'),
       conductorTensionN: measureOf('mechanical.cases.conductorTensionN'),
       stringWindN: measureOf('mechanical.cases.stringWindN'),
       stringWeightN: measureOf('mechanical.cases.stringWeightN'),

@@ -91,6 +91,14 @@ const TRANSCRIPTIONS = [
     level1986: ['level_1986', words],
     status: ['status', status],
   }),
+  transcribed('iec-ts-60815-profile', standards.PROFILE_LIMITS, {
+    parameter: ['parameter', words],
+    appliesTo: ['applies_to', words],
+    leastRatio: ['least_ratio', number],
+    mostRatio: ['most_ratio', number],
+    leastMm: ['least_mm', number],
+    status: ['status', status],
+  }),
   transcribed('iec-60305-units', standards.IEC_60305_UNITS, {
     designation: ['designation', words],
     failingLoadKn: ['failing_load_kn', number],

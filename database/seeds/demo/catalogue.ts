@@ -4,7 +4,7 @@ import { DEMO_PROJECT_IDS } from './projects';
 
 interface DemoUnit {
   code: string;
-  kind: 'cap-and-pin' | 'composite-rod';
+  kind: 'cap-and-pin' | 'composite-rod' | 'line-post';
   material: 'glass' | 'porcelain' | 'composite';
   profile: 'standard' | 'fog' | 'open' | 'alternating';
   failingLoadKn: number;
@@ -14,6 +14,17 @@ interface DemoUnit {
   creepageMm: number;
   massKg: number;
   dryArcMm?: number;
+  cantileverStrengthKn?: number;
+  /** s, p (p1), p2, c, l, d in mm, and whether there are ribs below. */
+  sheds?: {
+    s: number | null;
+    p: number;
+    p2?: number;
+    c: number;
+    l: number;
+    d: number;
+    ribs: boolean;
+  };
   note?: string;
 }
 
@@ -33,6 +44,7 @@ const DEMO_UNITS: readonly DemoUnit[] = [
     diameterMm: 255,
     creepageMm: 320,
     massKg: 4.1,
+    sheds: { s: null, p: 95, c: 88, l: 62, d: 15, ribs: true },
   },
   {
     ...disc,
@@ -45,6 +57,7 @@ const DEMO_UNITS: readonly DemoUnit[] = [
     diameterMm: 280,
     creepageMm: 445,
     massKg: 5.6,
+    sheds: { s: null, p: 108, c: 64, l: 104, d: 22, ribs: true },
     note: 'Deep ribs',
   },
   {
@@ -58,6 +71,7 @@ const DEMO_UNITS: readonly DemoUnit[] = [
     diameterMm: 380,
     creepageMm: 365,
     massKg: 5.9,
+    sheds: { s: null, p: 158, c: 120, l: 170, d: 140, ribs: false },
     note: 'Self-cleaning',
   },
   {
@@ -83,6 +97,7 @@ const DEMO_UNITS: readonly DemoUnit[] = [
     diameterMm: 330,
     creepageMm: 545,
     massKg: 8.6,
+    sheds: { s: null, p: 132, c: 61, l: 140, d: 26, ribs: true },
     note: 'Deep ribs',
   },
   {
@@ -130,6 +145,7 @@ const DEMO_UNITS: readonly DemoUnit[] = [
     spacingMm: 2270,
     creepageMm: 7600,
     massKg: 8.9,
+    sheds: { s: 92, p: 62, p2: 44, c: 47, l: 171, d: 47, ribs: false },
     dryArcMm: 2000,
   },
   {
@@ -140,6 +156,7 @@ const DEMO_UNITS: readonly DemoUnit[] = [
     spacingMm: 1490,
     creepageMm: 4700,
     massKg: 5.7,
+    sheds: { s: 92, p: 62, p2: 44, c: 47, l: 171, d: 47, ribs: false },
     dryArcMm: 1260,
   },
   {
@@ -150,7 +167,21 @@ const DEMO_UNITS: readonly DemoUnit[] = [
     spacingMm: 2400,
     creepageMm: 8350,
     massKg: 10.6,
+    sheds: { s: 84, p: 66, p2: 54, c: 38, l: 178, d: 38, ribs: false },
     dryArcMm: 2100,
+  },
+  {
+    ...rod,
+    code: 'CP10-66',
+    kind: 'line-post',
+    failingLoadKn: 10,
+    cantileverStrengthKn: 10,
+    coupling: 'clamp',
+    spacingMm: 960,
+    creepageMm: 2350,
+    massKg: 14.5,
+    dryArcMm: 780,
+    sheds: { s: 76, p: 58, p2: 40, c: 42, l: 158, d: 42, ribs: false },
   },
 ];
 
@@ -311,6 +342,14 @@ function toUnitRow(unit: DemoUnit) {
     creepage_is_nominal: unit.kind === 'cap-and-pin',
     dry_arc_mm: unit.dryArcMm ?? null,
     mass_kg: unit.massKg,
+    cantilever_strength_kn: unit.cantileverStrengthKn ?? null,
+    shed_spacing_mm: unit.sheds?.s ?? null,
+    shed_overhang_mm: unit.sheds?.p ?? null,
+    second_shed_overhang_mm: unit.sheds?.p2 ?? null,
+    shed_clearance_mm: unit.sheds?.c ?? null,
+    shed_path_mm: unit.sheds?.l ?? null,
+    shed_path_clearance_mm: unit.sheds?.d ?? null,
+    shed_under_ribs: unit.sheds?.ribs ?? null,
     note: unit.note ?? null,
     source_document: 'Kelmarra company catalogue (invented)',
     source_edition: '2026',

@@ -1,4 +1,5 @@
 import type { Criterion, StringResult } from '../model';
+import { checkProfile } from '../profile';
 import { isKnown } from '../quantities';
 import { infoRings } from '../string-voltage';
 import type { Calculation } from '../trace';
@@ -172,6 +173,9 @@ export function cautionString(given: StringCase, parts: Parts, result: StringRes
   cautionCreepage(given, result, calculation);
   infoSoundSystem(given, parts, calculation);
   infoArrangement(given, calculation);
-  const { unit, devices, situation } = given;
+  const { unit, devices, situation, input } = given;
+  const pollution = input.site?.pollution;
+  const byClass = situation.basis === 'iec' && isKnown(pollution) && 'class' in pollution;
+  checkProfile({ unit, pollutionClass: byClass ? pollution.class : null, string: result }, calculation);
   infoRings({ unit, devices, highestVoltageKv: situation.highestVoltageKv }, calculation);
 }

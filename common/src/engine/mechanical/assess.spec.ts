@@ -1,5 +1,12 @@
 import { evaluate } from '../evaluate';
-import type { EvaluationContext, InsulatorUnit, MechanicalInput, MechanicalResult, StringInput } from '../model';
+import type {
+  EvaluationContext,
+  InsulatorUnit,
+  LoadCaseInput,
+  MechanicalInput,
+  MechanicalResult,
+  StringInput,
+} from '../model';
 import { aLoadCase, mechanicalLoads } from '../testing/loads';
 import { aCeramicRod, aCompositeRod, aContext, aDisc, aLine, aSuspensionUnit } from '../testing/specifications';
 import { assessMechanical } from './assess';
@@ -38,6 +45,8 @@ describe(assessMechanical.name, () => {
         factorRequired: 3,
         factorProvided: expect.closeTo(120000 / loadN, 9) as number,
         slackLeg: false,
+        legs: null,
+        post: null,
         verdict: 'met',
       },
     ]);
@@ -92,6 +101,8 @@ describe(assessMechanical.name, () => {
       const { mechanical, codes } = answer({ string: V, mechanical: { cases } });
       expect(mechanical.cases[0]?.loadPerStringN).toBeCloseTo(VERTICAL_N / Math.SQRT2, 9);
       expect(mechanical.cases[0]?.loadOneStringMissingN).toBeCloseTo(VERTICAL_N, 9);
+      expect(mechanical.cases[0]?.legs?.windwardN).toBeCloseTo(VERTICAL_N / Math.SQRT2, 9);
+      expect(mechanical.cases[0]?.legs?.leewardN).toBeCloseTo(VERTICAL_N / Math.SQRT2, 9);
       expect(codes).not.toContain('caution v-leg-slack');
     });
 
@@ -103,7 +114,25 @@ describe(assessMechanical.name, () => {
       const beyond = answer({ string: V, mechanical: { weightSpanM: 200 } });
       expect(beyond.mechanical.cases[0]).toMatchObject({ slackLeg: true });
       expect(beyond.mechanical.cases[0]?.loadPerStringN).toBeCloseTo(Math.hypot(15 * 200 + 900, HORIZONTAL_N), 9);
+      expect(beyond.mechanical.cases[0]?.legs).toEqual({
+        windwardN: expect.closeTo(Math.hypot(15 * 200 + 900, HORIZONTAL_N), 9) as number,
+        leewardN: 0,
+      });
       expect(beyond.codes).toContain('caution v-leg-slack');
+      const lean = ((Math.atan(HORIZONTAL_N / 3900) * 180) / Math.PI).toFixed(1);
+      expect(beyond.cautions.find(({ code }) => code === 'v-leg-slack')?.text).toContain(
+        `leans ${lean}° from the vertical, more than the 45° of the windward leg`,
+      );
+    });
+
+    // Equilibrium of a joint, the legs at 30 and 60 degrees from the vertical: horizontal and vertical parts add up.
+    it('keeps the joint in balance where its legs differ', () => {
+      const angles = { ...V, vAngleWindwardDeg: 60, vAngleLeewardDeg: 30 };
+      const { windwardN = 0, leewardN = 0 } = answer({ string: angles }).mechanical.cases[0]?.legs ?? {};
+      const [a1, a2] = [Math.PI / 3, Math.PI / 6];
+      expect(windwardN * Math.cos(a1) + leewardN * Math.cos(a2)).toBeCloseTo(VERTICAL_N, 8);
+      expect(windwardN * Math.sin(a1) - leewardN * Math.sin(a2)).toBeCloseTo(HORIZONTAL_N, 8);
+      expect([windwardN > 0, leewardN > 0]).toEqual([true, true]);
     });
 
     it('waits for its angles', () => {
@@ -202,10 +231,7 @@ describe(assessMechanical.name, () => {
     expect(codes).toEqual(expect.arrayContaining(['fail strength-short', 'caution strength-beyond-classes']));
   });
 
-  it('does not judge a line post, and gives no class while a case has no figure', () => {
-    const post = answer({ insulator: aCompositeRod({ kind: 'line-post' }) });
-    expect(post.mechanical.cases[0]?.verdict).toBe('unknown');
-    expect(post.codes).toContain('acceptance mechanical-not-assessed');
+  it('gives no class while a case has no figure', () => {
     const cases = [aLoadCase(), aLoadCase({ name: null, stringWeightN: null })];
     const half = answer({ mechanical: { cases } });
     expect(half.mechanical.cases.map(({ name, verdict }) => [name, verdict])).toEqual([
@@ -214,6 +240,137 @@ describe(assessMechanical.name, () => {
     ]);
     expect(half.mechanical.classRequiredKn).toBeNull();
     expect(half.why).toEqual(['Load case "case 2": The weight of the string is not filled in.']);
+  });
+
+  describe('ice', () => {
+    const iced = (overrides: Partial<LoadCaseInput> = {}): LoadCaseInput =>
+      aLoadCase({ name: 'ice', kind: 'ice', iceRadialMm: 20, iceDensityKgPerM3: 900, ...overrides });
+
+    it('adds its ring to weight and diameter of the conductor', () => {
+      const { mechanical, codes, trace } = answer({ mechanical: { cases: [iced()] } });
+      const iceNPerM = Math.PI * 900 * 9.80665 * 0.02 * (0.028 + 0.02);
+      expect(mechanical.cases[0]?.verticalN).toBeCloseTo((15 + iceNPerM) * 450 + 900, 8);
+      expect(mechanical.cases[0]?.horizontalN).toBeCloseTo(0.8 * 68 * 400 + 300, 8);
+      expect(codes).not.toContain('info ice-in-conductor-figures');
+      expect(trace.map(({ id }) => id)).toContain('mechanical.ice-weight:case-1');
+    });
+
+    it('is in the figures of the conductor where none is filled in, which is said', () => {
+      const { mechanical, codes } = answer({ mechanical: { cases: [aLoadCase({ kind: 'ice' })] } });
+      expect(mechanical.cases[0]?.verticalN).toBe(VERTICAL_N);
+      expect(codes).toContain('info ice-in-conductor-figures');
+    });
+
+    it('waits for its density and the conductor', () => {
+      const why = (given: Partial<LoadCaseInput>) => answer({ mechanical: { cases: [iced(given)] } }).why;
+      expect(why({ iceDensityKgPerM3: null })).toEqual(['Load case "ice": The density of the ice is not filled in.']);
+      expect(why({ conductorDiameterMm: null, windPressurePa: 0 })).toEqual([
+        'Load case "ice": The diameter of the conductor is not filled in.',
+      ]);
+      expect(why({ conductorWeightNPerM: null })).toEqual([
+        'Load case "ice": The weight of the conductor is not filled in.',
+      ]);
+    });
+
+    it('does not load a tension string by itself: the pull has to be that with the ice', () => {
+      const { codes, mechanical } = answer({ string: { arrangement: 'tension' }, mechanical: { cases: [iced()] } });
+      expect(mechanical.cases[0]?.loadPerStringN).toBe(30900);
+      expect(codes).toContain('info ice-in-pull');
+    });
+  });
+
+  describe('a line post', () => {
+    const post = (overrides: Partial<InsulatorUnit> = {}): InsulatorUnit =>
+      aCeramicRod({ code: 'P', kind: 'line-post', cantileverStrengthKn: 30, ...overrides });
+    const bent = (postAngleDeg: number | null, given: Given = {}) =>
+      answer({ insulator: post(), ...given, string: { postAngleDeg, ...given.string } });
+
+    it('is bent by the weight where it stands out, by the wind where it stands upright, and by both between', () => {
+      const [out] = bent(0).mechanical.cases;
+      expect(out?.loadPerStringN).toBeCloseTo(VERTICAL_N, 9);
+      expect(out?.post?.alongN).toBeCloseTo(HORIZONTAL_N, 9);
+      const [upright] = bent(90).mechanical.cases;
+      expect(upright?.loadPerStringN).toBeCloseTo(HORIZONTAL_N, 9);
+      expect(upright?.post?.alongN).toBeCloseTo(VERTICAL_N, 9);
+      const [between] = bent(12).mechanical.cases;
+      const { bendingN = 0, alongN = 0 } = between?.post ?? {};
+      // Turning the axes keeps the size of the force.
+      expect(bendingN).toBeGreaterThan(VERTICAL_N);
+      expect(bendingN).toBeLessThanOrEqual(Math.hypot(VERTICAL_N, HORIZONTAL_N));
+      expect(alongN).toBeGreaterThan(HORIZONTAL_N);
+    });
+
+    it('has its strength in bending compared, by the share of NESC Rule 277 (seen as quoted) and of RUS (memory)', () => {
+      const district = [aLoadCase({ name: 'heavy', kind: 'district' })];
+      const nesc = bent(0, { mechanical: { basis: 'nesc', cases: district } });
+      expect(nesc.mechanical.cases[0]).toMatchObject({ factorRequired: 2.5, verdict: 'met' });
+      expect(nesc.mechanical.strengthRequiredKn).toBeCloseTo((2.5 * VERTICAL_N) / 1000, 9);
+      const rus = bent(0, { mechanical: { basis: 'rus', cases: district } });
+      expect(rus.mechanical.cases[0]?.factorRequired).toBe(2.5);
+      const composite = post({ material: 'composite' });
+      const unheld = bent(0, { mechanical: { basis: 'rus', cases: district }, insulator: composite });
+      expect(unheld.why[0]).toContain('only the share of ceramic posts');
+      expect(bent(0).mechanical.cases[0]?.factorRequired).toBe(3);
+    });
+
+    it('fails above what the basis allows, and has no class', () => {
+      const cases = [aLoadCase({ name: 'heavy', kind: 'district' })];
+      const allowedKn = (2.5 * VERTICAL_N) / 1000;
+      const at = (cantileverStrengthKn: number) =>
+        bent(0, { mechanical: { basis: 'nesc', cases }, insulator: post({ cantileverStrengthKn }) });
+      expect(at(allowedKn).mechanical.cases[0]?.verdict).toBe('met');
+      const short = at(allowedKn - 0.1);
+      expect(short.mechanical.cases[0]?.verdict).toBe('short');
+      expect(short.codes).toContain('fail strength-short');
+      expect(short.cautions.find(({ code }) => code === 'strength-short')?.text).toContain('kN in bending');
+      expect([short.mechanical.classRequiredKn, short.mechanical.coupling]).toEqual([null, null]);
+      expect(short.notAssessed).toContainEqual({
+        part: 'mechanical.class',
+        why: 'No strength classes of line posts are held.',
+      });
+    });
+
+    it('says what bending alone leaves open', () => {
+      expect(bent(0).codes).toContain('caution post-along-axis');
+      expect(bent(0).codes).not.toContain('caution post-design-load');
+      expect(bent(0, { insulator: post({ material: 'composite' }) }).codes).toContain('caution post-design-load');
+    });
+
+    it('shares among posts side by side, and carries weight that lifts', () => {
+      const [two] = bent(0, { string: { parallelStrings: 2 } }).mechanical.cases;
+      expect(two?.loadPerStringN).toBeCloseTo(VERTICAL_N / 2, 9);
+      expect(two?.loadOneStringMissingN).toBeCloseTo(VERTICAL_N, 9);
+      const lifted = bent(0, { mechanical: { weightSpanM: -200 } });
+      expect(lifted.mechanical.cases[0]?.verticalN).toBe(2100);
+      expect(lifted.codes).not.toContain('stop mechanical-uplift');
+    });
+
+    it('waits for its angle, its strength and an arrangement that fits', () => {
+      expect(bent(null).why).toEqual([
+        'Load case "wind": The angle of the post above the horizontal is not filled in.',
+      ]);
+      const unknown = bent(0, { insulator: post({ cantileverStrengthKn: null }) });
+      expect(unknown.why).toEqual(['The catalogue has no strength in bending of P.']);
+      expect(unknown.mechanical.cases[0]?.verdict).toBe('unknown');
+      expect(unknown.codes).toContain('acceptance mechanical-not-assessed');
+      expect(bent(0, { string: { arrangement: 'tension' } }).why[0]).toContain('no tension string and no V');
+    });
+  });
+
+  it('asks of the fittings at least the strength of the string', () => {
+    const { codes, cautions } = answer({ mechanical: { fittingsStrengthKn: 100 } });
+    expect(codes).toContain('fail fittings-strength-short');
+    expect(cautions.find(({ code }) => code === 'fittings-strength-short')?.field).toBe(
+      'mechanical.fittingsStrengthKn',
+    );
+    expect(answer({ mechanical: { fittingsStrengthKn: 120 } }).codes.join()).not.toContain('fittings');
+  });
+
+  // Swiss LeV Art. 51 (seen).
+  it('cites why the factor stays the same with one string missing', () => {
+    const { trace } = answer({ string: { parallelStrings: 2 } });
+    const line = trace.find(({ id }) => id === 'mechanical.load-per-string:case-1-one-missing');
+    expect(line?.source).toMatchObject({ document: expect.stringContaining('LeV') as string, status: 'seen' });
   });
 
   it('is null and said to be missing where no loads are filled in', () => {

@@ -6,6 +6,7 @@ import type {
   MechanicalResult,
   StringInput,
 } from '../model';
+import { isComposite } from '../insulator-string/unit';
 import { isKnown, reaches } from '../quantities';
 import type { Situation } from '../situation';
 import type { Calculation } from '../trace';
@@ -39,8 +40,16 @@ const emptyCase = (name: string, kind: LoadCaseInput['kind']): MechanicalCaseRes
   factorRequired: null,
   factorProvided: null,
   slackLeg: false,
+  legs: null,
+  post: null,
   verdict: 'unknown',
 });
+
+const isPost = (unit: InsulatorUnit | null): boolean => unit?.kind === 'line-post';
+
+/** What the loads are held against: failing load, of line posts the strength in bending; null is not known. */
+const strengthOfUnit = (unit: InsulatorUnit): number | null =>
+  isPost(unit) ? (unit.cantileverStrengthKn ?? null) : unit.failingLoadKn;
 
 /** Strength that a load asks for by the factor, and for composite by its routine test load. */
 function strengthOf(
@@ -77,7 +86,7 @@ function assessCase(
 ): Assessed {
   const name = loadCase.name ?? `case ${index + 1}`;
   const as = `case-${index + 1}`;
-  const { whyNot, upliftN, ...loads } = caseLoads({ mechanical, string, loadCase, name, as }, calculation);
+  const { whyNot, upliftN, ...loads } = caseLoads({ mechanical, string, loadCase, unit, name, as }, calculation);
   const known: MechanicalCaseResult = { ...emptyCase(name, loadCase.kind), ...loads };
   if (upliftN !== null) {
     calculation.caution('mechanical-uplift', 'stop', `Load case "${name}": ${whyNot}`, 'mechanical.weightSpanM');
@@ -85,22 +94,19 @@ function assessCase(
   const factor = requiredFactor(mechanical, { kind: loadCase.kind, unit, as }, calculation);
   const missing = whyNot ?? (typeof factor === 'string' ? factor : null);
   if (missing !== null) calculation.missing(PART, `Load case "${name}": ${missing}`);
-  if (loads.slackLeg) {
-    const text = `Load case "${name}": the leeward leg of the V goes slack, and the windward leg carries the whole load.`;
-    calculation.caution('v-leg-slack', 'caution', text, 'string.vAngleWindwardDeg');
-  }
   if (typeof factor === 'string' || loads.loadPerStringN === null) {
     return { result: { ...known, factorRequired: typeof factor === 'string' ? null : factor }, strengthKn: null };
   }
   const loadN = Math.max(loads.loadPerStringN, loads.loadOneStringMissingN ?? 0);
   const strengthKn = strengthOf({ loadN, factor, testRatio, name, as }, calculation);
-  if (unit === null) return { result: { ...known, factorRequired: factor }, strengthKn };
+  const providedKn = unit === null ? null : strengthOfUnit(unit);
+  if (providedKn === null) return { result: { ...known, factorRequired: factor }, strengthKn };
   const factorProvided = calculation.run(
     factorOnLoad,
-    { strengthKn: unit.failingLoadKn, loadN },
+    { strengthKn: providedKn, loadN },
     { as, heading: `Factor provided, ${name}` },
   );
-  const met = reaches(unit.failingLoadKn, strengthKn);
+  const met = reaches(providedKn, strengthKn);
   return {
     result: { ...known, factorRequired: factor, factorProvided, verdict: met ? 'met' : 'short' },
     strengthKn,
@@ -109,7 +115,7 @@ function assessCase(
 
 /** Says where the chosen unit does not carry the loads, and what stands in the way of saying so. */
 function cautionStrength(
-  { unit }: Mechanical,
+  { mechanical, unit }: Mechanical,
   assessed: readonly Assessed[],
   { strengthKn, classKn }: { strengthKn: number | null; classKn: number | null },
   calculation: Calculation,
@@ -122,16 +128,43 @@ function cautionStrength(
   if (short.length > 0 && unit !== null) {
     const mostKn = Math.max(...short.map((one) => one.strengthKn ?? 0));
     const cases = short.map(({ result }) => `"${result.name}"`).join(', ');
-    const text = `${unit.code} has ${unit.failingLoadKn} kN; ${cases} ${short.length === 1 ? 'asks' : 'ask'} for ${mostKn.toFixed(1)} kN.`;
+    const has = `${strengthOfUnit(unit)} kN${isPost(unit) ? ' in bending' : ''}`;
+    const text = `${unit.code} has ${has}; ${cases} ${short.length === 1 ? 'asks' : 'ask'} for ${mostKn.toFixed(1)} kN.`;
     calculation.caution('strength-short', 'fail', text, UNIT_FIELD);
   }
-  if (strengthKn !== null && classKn === null) {
+  if (strengthKn !== null && classKn === null && !isPost(unit)) {
     const text = `The strength of ${strengthKn.toFixed(1)} kN lies above the last class that is held; more strings in parallel share the load.`;
     calculation.caution('strength-beyond-classes', 'caution', text, 'string.parallelStrings');
   }
-  if (unit !== null && strengthKn !== null) {
-    const text = `Fittings and their couplings have to carry at least the class of the string, ${unit.failingLoadKn} kN.`;
+  if (unit !== null && isPost(unit)) cautionPost(unit, assessed, calculation);
+  else if (unit !== null && strengthKn !== null) cautionFittings(mechanical, unit, calculation);
+}
+
+/** Hardware at least the string. */
+function cautionFittings(
+  { fittingsStrengthKn }: MechanicalInput,
+  { failingLoadKn }: InsulatorUnit,
+  calculation: Calculation,
+): void {
+  if (!isKnown(fittingsStrengthKn)) {
+    const text = `Fittings and their couplings have to carry at least the class of the string, ${failingLoadKn} kN.`;
     calculation.caution('fittings-strength', 'info', text, UNIT_FIELD);
+  } else if (!reaches(fittingsStrengthKn, failingLoadKn)) {
+    const text = `The fittings have ${fittingsStrengthKn} kN, less than the ${failingLoadKn} kN of the string.`;
+    calculation.caution('fittings-strength-short', 'fail', text, 'mechanical.fittingsStrengthKn');
+  }
+}
+
+/** What bending alone does not say of a line post. */
+function cautionPost(unit: InsulatorUnit, assessed: readonly Assessed[], calculation: Calculation): void {
+  const alongN = Math.max(0, ...assessed.map(({ result }) => result.post?.alongN ?? 0));
+  if (alongN > 0) {
+    const text = `Along their axis the posts take up to ${(alongN / 1000).toFixed(1)} kN, pressing or pulling; no strength for it is held. The maker's curve of combined loads has to cover bending and this together.`;
+    calculation.caution('post-along-axis', 'caution', text, UNIT_FIELD);
+  }
+  if (isComposite(unit)) {
+    const text = `The maker's largest design load in bending holds for ${unit.code} beside the factor; the catalogue does not have it.`;
+    calculation.caution('post-design-load', 'caution', text, UNIT_FIELD);
   }
 }
 
@@ -159,19 +192,18 @@ export function assessMechanical(given: Mechanical, calculation: Calculation): M
     calculation.missing(PART, 'No load case is filled in.');
     return NOTHING;
   }
-  if (unit?.kind === 'line-post') {
-    const text = 'A line post is loaded in bending; its strength is not that of a string and is not assessed here.';
-    calculation.missing(PART, text);
-    calculation.caution('mechanical-not-assessed', 'acceptance', text, UNIT_FIELD);
-    return { ...NOTHING, cases: unassessed };
+  if (unit !== null && strengthOfUnit(unit) === null) {
+    calculation.missing(PART, `The catalogue has no strength in bending of ${unit.code}.`);
   }
   if (unit === null) calculation.missing(PART, 'No insulator unit is chosen whose strength could be compared.');
-  const testRatio = unit === null ? null : routineTestRatio(unit, calculation);
+  const testRatio = unit === null || isPost(unit) ? null : routineTestRatio(unit, calculation);
   const assessed = cases.map((one, index) => assessCase({ ...given, string }, one, { index, testRatio }, calculation));
   const complete = assessed.every(({ strengthKn }) => strengthKn !== null);
   const most = assessed.reduce((one, other) => ((other.strengthKn ?? 0) > (one.strengthKn ?? 0) ? other : one));
   const strengthKn = complete ? most.strengthKn : null;
-  const next = strengthKn === null ? null : strengthClass(strengthKn, { unit, basis: situation.basis }, calculation);
+  const classed = strengthKn !== null && !isPost(unit);
+  const next = classed ? strengthClass(strengthKn, { unit, basis: situation.basis }, calculation) : null;
+  if (isPost(unit)) calculation.missing('mechanical.class', 'No strength classes of line posts are held.');
   cautionStrength(given, assessed, { strengthKn, classKn: next?.failingLoadKn ?? null }, calculation);
   return {
     cases: assessed.map(({ result }) => result),

@@ -44,7 +44,9 @@ function strengthRow(rule: StrengthShareRow['rule'], insulator: string, loadCase
   return row;
 }
 
-const NESC_TENSION = INSULATOR_STRENGTH.rows.find((one) => one.rule === 'NESC 277' && one.action === 'tension');
+const nescRow = (action: string) =>
+  INSULATOR_STRENGTH.rows.find((one) => one.rule === 'NESC 277' && one.action === action);
+const NESC = { tension: nescRow('tension'), cantilever: nescRow('cantilever') };
 const ROUTINE_TEST = strengthRow('purchaser standard after ANSI C29.12', 'composite suspension', 'factory proof test');
 
 function byShare(row: TableRow<StrengthShareRow>, as: string, calculation: Calculation): number {
@@ -89,9 +91,15 @@ export function requiredFactor(
     return `The factors of ${BASIS_NAMES[basis]} belong to its own loads (${own}), not to ${KIND_NAMES[kind]} loads.`;
   }
   if (basis === 'en-50341') return byRule('en-50341', as, calculation);
-  if (basis === 'nesc' && NESC_TENSION !== undefined) return byShare(NESC_TENSION, as, calculation);
+  const isPost = unit?.kind === 'line-post';
+  const nesc = isPost ? NESC.cantilever : NESC.tension;
+  if (basis === 'nesc' && nesc !== undefined) return byShare(nesc, as, calculation);
   if (basis === 'rus') {
     if (unit === null) return 'The share of the rating depends on the material, and no unit is chosen.';
+    if (isPost && (isComposite(unit) || kind !== 'district')) {
+      return 'Of RUS Bulletin 1724E-200 only the share of ceramic posts under district loads is held.';
+    }
+    if (isPost) return byShare(strengthRow('RUS 1724E-200', 'ceramic post', kind), as, calculation);
     const insulator = isComposite(unit) ? 'composite suspension' : 'ceramic or glass suspension';
     return byShare(strengthRow('RUS 1724E-200', insulator, kind), as, calculation);
   }

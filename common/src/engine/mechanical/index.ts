@@ -4,4 +4,5 @@ export * from './factors';
 export * from './formulas';
 export * from './ice';
 export * from './loads';
+export * from './post';
 export * from './v-string';

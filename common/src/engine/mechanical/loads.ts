@@ -1,5 +1,6 @@
-import type { LoadCaseInput, MechanicalInput, StringInput } from '../model';
+import type { InsulatorUnit, LoadCaseInput, MechanicalCaseResult, MechanicalInput, StringInput } from '../model';
 import { isKnown } from '../quantities';
+import { cite, SWISS_LEV } from '../sources';
 import type { Calculation } from '../trace';
 import {
   conductorPull,
@@ -11,6 +12,8 @@ import {
   verticalLoad,
   windwardLeg,
 } from './formulas';
+import { withIce } from './ice';
+import { postAlong, postBending } from './post';
 
 /** Loads of one case; null is not known, and then `whyNot` says why. */
 export interface CaseLoads {
@@ -19,6 +22,8 @@ export interface CaseLoads {
   loadPerStringN: number | null;
   loadOneStringMissingN: number | null;
   slackLeg: boolean;
+  legs: NonNullable<MechanicalCaseResult['legs']> | null;
+  post: NonNullable<MechanicalCaseResult['post']> | null;
   whyNot: string | null;
   /** Nothing holds the string down: its vertical load, N; null where there is no uplift. */
   upliftN: number | null;
@@ -28,11 +33,14 @@ export interface LoadCase {
   mechanical: MechanicalInput;
   string: StringInput;
   loadCase: LoadCaseInput;
+  /** Line posts are bent; every other unit hangs in line with its load. */
+  unit?: InsulatorUnit | null;
   /** Name of the case for headings, and its part of the ids of lines. */
   name: string;
   as: string;
 }
 
+const ONE_MISSING = cite(SWISS_LEV, 'Art. 51: the same factor after one branch has failed', 'seen');
 /** Below this a load is the dust of binary arithmetic, N. */
 const NO_LOAD_N = 1e-9;
 
@@ -42,6 +50,8 @@ const loads = (given: Partial<CaseLoads>): CaseLoads => ({
   loadPerStringN: null,
   loadOneStringMissingN: null,
   slackLeg: false,
+  legs: null,
+  post: null,
   whyNot: null,
   upliftN: null,
   ...given,
@@ -66,7 +76,7 @@ interface SetLoad {
 function share(
   { loadCase, string, name, as }: LoadCase,
   { loadN, lastLostN, slackLeg }: SetLoad,
-  parts: Pick<CaseLoads, 'verticalN' | 'horizontalN'>,
+  parts: Partial<CaseLoads>,
   calculation: Calculation,
 ): CaseLoads {
   const stringCount = string.parallelStrings;
@@ -78,7 +88,7 @@ function share(
       : calculation.run(
           loadPerString,
           { loadN, stringCount: stringCount - 1 },
-          { as: `${as}-one-missing`, heading: `Load per string with one missing, ${name}` },
+          { as: `${as}-one-missing`, heading: `Load per string with one missing, ${name}`, source: ONE_MISSING },
         );
   if (loadCase.kind !== 'broken-string') {
     return loads({ ...parts, loadPerStringN: wholeN, loadOneStringMissingN: missingN, slackLeg });
@@ -109,6 +119,10 @@ function tension(given: LoadCase, subconductorCount: number, calculation: Calcul
     { as, heading: `Load along the set, ${name}` },
   );
   if (loadN < NO_LOAD_N) return unknown('The case has no load.');
+  if ((loadCase.iceRadialMm ?? 0) > 0) {
+    const text = `Load case "${name}": a tension string is loaded by the pull of the conductor, which has to be that with the ice.`;
+    calculation.caution('ice-in-pull', 'info', text, 'mechanical');
+  }
   const parts = { verticalN: stringWeightN + hardwareWeightN, horizontalN };
   return share(given, { loadN, lastLostN: null, slackLeg: false }, parts, calculation);
 }
@@ -118,7 +132,7 @@ function legs(
   { string, name, as }: LoadCase,
   { verticalN, horizontalN }: { verticalN: number; horizontalN: number },
   calculation: Calculation,
-): SetLoad | string {
+): (SetLoad & Pick<CaseLoads, 'legs'>) | string {
   const { vAngleWindwardDeg: windwardDeg, vAngleLeewardDeg: leewardDeg } = string;
   if (!isKnown(windwardDeg) || !isKnown(leewardDeg)) return 'The angles of the V legs are not filled in.';
   const figures = { verticalN, horizontalN, windwardDeg, leewardDeg };
@@ -133,13 +147,38 @@ function legs(
     { as, heading: `Load on one leg alone, ${name}` },
   );
   const slackLeg = leewardN < 0;
-  return { loadN: slackLeg ? wholeN : Math.max(windwardN, leewardN), lastLostN: wholeN, slackLeg };
+  const carried = slackLeg ? { windwardN: wholeN, leewardN: 0 } : { windwardN, leewardN };
+  if (slackLeg) {
+    const leanDeg = (Math.atan2(horizontalN, verticalN) * 180) / Math.PI;
+    const text = `Load case "${name}": the load leans ${leanDeg.toFixed(1)}° from the vertical, more than the ${windwardDeg}° of the windward leg; the leeward leg of the V goes slack, and the windward leg carries the whole load.`;
+    calculation.caution('v-leg-slack', 'caution', text, 'string.vAngleWindwardDeg');
+  }
+  return { loadN: Math.max(carried.windwardN, carried.leewardN), lastLostN: wholeN, slackLeg, legs: carried };
+}
+
+/** Load at the tip of a line post, across it and along it; weight that lifts is taken by its size. */
+function postLoads(
+  { string, name, as }: LoadCase,
+  tip: { verticalN: number; horizontalN: number },
+  calculation: Calculation,
+): NonNullable<CaseLoads['post']> | string {
+  const { postAngleDeg } = string;
+  if (!isKnown(postAngleDeg)) return 'The angle of the post above the horizontal is not filled in.';
+  const figures = { ...tip, postAngleDeg };
+  return {
+    bendingN: calculation.run(postBending, figures, { as, heading: `Bending load of the posts, ${name}` }),
+    alongN: calculation.run(postAlong, figures, { as, heading: `Load along the posts, ${name}` }),
+  };
 }
 
 function suspension(given: LoadCase, subconductorCount: number, calculation: Calculation): CaseLoads {
   const { mechanical, string, loadCase, name, as } = given;
   const { weightSpanM, windSpanM, lineAngleDeg } = mechanical;
-  const { conductorWeightNPerM, stringWeightN, hardwareWeightN, windPressurePa } = loadCase;
+  const { stringWeightN, hardwareWeightN, windPressurePa } = loadCase;
+  const conductor = withIce(loadCase, { name, as }, calculation);
+  if (typeof conductor === 'string') return unknown(conductor);
+  const { conductorWeightNPerM, conductorDiameterMm } = conductor;
+  const isPost = given.unit?.kind === 'line-post';
   const windy = windPressurePa !== 0;
   const turned = lineAngleDeg !== 0;
   const whyNot = firstMissing({
@@ -150,12 +189,12 @@ function suspension(given: LoadCase, subconductorCount: number, calculation: Cal
     'The weight of the fittings': hardwareWeightN,
     'The wind pressure': windPressurePa,
     'The wind span': windy ? windSpanM : 0,
-    'The diameter of the conductor': windy ? loadCase.conductorDiameterMm : 0,
+    'The diameter of the conductor': windy ? conductorDiameterMm : 0,
     'The wind on the string': windy ? loadCase.stringWindN : 0,
     'The tension of the conductor': turned ? loadCase.conductorTensionN : 0,
   });
   if (whyNot !== null) return unknown(whyNot);
-  const verticalN = calculation.run(
+  const signedN = calculation.run(
     verticalLoad,
     {
       subconductorCount,
@@ -166,16 +205,17 @@ function suspension(given: LoadCase, subconductorCount: number, calculation: Cal
     },
     { as, heading: `Vertical load, ${name}` },
   );
-  if (verticalN < NO_LOAD_N) {
-    const text = `The vertical load of ${verticalN.toFixed(0)} N lifts the string; a suspension string cannot hold it.`;
-    return loads({ whyNot: text, upliftN: verticalN });
+  if (signedN < NO_LOAD_N && !isPost) {
+    const text = `The vertical load of ${signedN.toFixed(0)} N lifts the string; a suspension string cannot hold it.`;
+    return loads({ whyNot: text, upliftN: signedN });
   }
+  const verticalN = Math.abs(signedN);
   const horizontalN = calculation.run(
     horizontalLoad,
     {
       subconductorCount,
       windPressurePa: windPressurePa ?? 0,
-      conductorDiameterMm: loadCase.conductorDiameterMm ?? 0,
+      conductorDiameterMm: conductorDiameterMm ?? 0,
       windSpanM: windSpanM ?? 0,
       stringWindN: windy ? (loadCase.stringWindN ?? 0) : 0,
       conductorTensionN: turned ? (loadCase.conductorTensionN ?? 0) : 0,
@@ -186,7 +226,14 @@ function suspension(given: LoadCase, subconductorCount: number, calculation: Cal
   const parts = { verticalN, horizontalN };
   if (string.arrangement === 'v-suspension') {
     const found = legs(given, parts, calculation);
-    return typeof found === 'string' ? { ...unknown(found), ...parts } : share(given, found, parts, calculation);
+    if (typeof found === 'string') return { ...unknown(found), ...parts };
+    return share(given, found, { ...parts, legs: found.legs }, calculation);
+  }
+  if (isPost) {
+    const post = postLoads(given, parts, calculation);
+    if (typeof post === 'string') return { ...unknown(post), ...parts };
+    if (post.bendingN < NO_LOAD_N) return { ...unknown('The case does not bend the post.'), ...parts, post };
+    return share(given, { loadN: post.bendingN, lastLostN: null, slackLeg: false }, { ...parts, post }, calculation);
   }
   const loadN = calculation.run(resultantLoad, parts, { as, heading: `Load along the set, ${name}` });
   return share(given, { loadN, lastLostN: null, slackLeg: false }, parts, calculation);
@@ -196,6 +243,9 @@ function suspension(given: LoadCase, subconductorCount: number, calculation: Cal
 export function caseLoads(given: LoadCase, calculation: Calculation): CaseLoads {
   const { mechanical, string } = given;
   if (!isKnown(string.arrangement)) return unknown('The arrangement of the string is not filled in.');
+  if (given.unit?.kind === 'line-post' && string.arrangement !== 'suspension') {
+    return unknown('A line post is no tension string and no V; its loads are those of the arrangement "suspension".');
+  }
   if (!isKnown(mechanical.subconductors)) return unknown('The number of sub-conductors is not filled in.');
   return string.arrangement === 'tension'
     ? tension(given, mechanical.subconductors, calculation)

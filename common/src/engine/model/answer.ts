@@ -133,6 +133,10 @@ export interface MechanicalCaseResult {
   factorProvided: number | null;
   /** The lee leg of a V carries nothing. */
   slackLeg: boolean;
+  /** Loads of the two legs of a V, each leg with all its strings; null for other strings. */
+  legs?: { windwardN: number; leewardN: number } | null;
+  /** Line posts: what bends them at the tip, and what presses or pulls along their axis, of the whole set. */
+  post?: { bendingN: number; alongN: number } | null;
   verdict: Verdict;
 }
 

@@ -26,6 +26,24 @@ export interface StringFlashover {
   wetKvRms: number;
 }
 
+/** Dimensions of the sheds as profile checks read them, mm; null is not known. */
+export interface ShedDimensions {
+  /** From shed to next shed alike, s; of discs the spacing of the unit where this is not known. */
+  spacingMm: number | null;
+  /** Overhang of the (larger) sheds over the core or stem, p or p1. */
+  overhangMm: number | null;
+  /** Overhang of the smaller sheds between them, p2. */
+  secondOverhangMm: number | null;
+  /** Least distance between neighbouring sheds alike, from rim at right angles to the shed below, c. */
+  clearanceMm: number | null;
+  /** Creepage between the two points of the profile where it is longest for their distance, l. */
+  pathMm: number | null;
+  /** Distance through air between the same two points, d. */
+  pathClearanceMm: number | null;
+  /** Ribs on the underside. */
+  underRibs: boolean | null;
+}
+
 /** One catalogue unit in one version. Lengths in mm, strength in kN; null is not known. */
 export interface InsulatorUnit {
   code: string;
@@ -50,6 +68,9 @@ export interface InsulatorUnit {
   massKg: number | null;
   /** Routine test load of a composite unit, kN. */
   routineTestLoadKn: number | null;
+  /** Strength of a line post in bending, load at its tip, kN. */
+  cantileverStrengthKn?: number | null;
+  sheds?: ShedDimensions | null;
   wetFlashover: StringFlashover[] | null;
   note: string | null;
   source: SourceReference;

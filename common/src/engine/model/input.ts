@@ -92,6 +92,8 @@ export interface StringInput {
   hardwareLengthMm?: number | null;
   vAngleWindwardDeg?: number | null;
   vAngleLeewardDeg?: number | null;
+  /** Axis of a line post above the horizontal: 0 stands out from the pole, 90 stands upright. */
+  postAngleDeg?: number | null;
 }
 
 export interface ClearanceInput {
@@ -110,6 +112,10 @@ export interface LoadCaseInput {
   conductorWeightNPerM: number | null;
   windPressurePa: number | null;
   conductorDiameterMm: number | null;
+  /** Ice all round the conductor; null where weight and diameter are already those of the iced conductor. */
+  iceRadialMm?: number | null;
+  iceDensityKgPerM3?: number | null;
+  /** Of the loaded state: with ice, the pull with that ice. */
   conductorTensionN: number | null;
   stringWindN: number | null;
   stringWeightN: number | null;
@@ -124,6 +130,8 @@ export interface MechanicalInput {
   windSpanM: number | null;
   weightSpanM: number | null;
   lineAngleDeg: number | null;
+  /** Strength of the weakest fitting of one string, kN. */
+  fittingsStrengthKn?: number | null;
   cases: LoadCaseInput[] | null;
 }
 

@@ -8,6 +8,7 @@ import { IEC_60433_CLASSES } from './iec-60433';
 import { IEC_61466_1_CLASSES } from './iec-61466-1';
 import { IEC_61936_1_CLEARANCES } from './iec-61936-1';
 import { IEC_TS_60815_USCD } from './iec-ts-60815';
+import { PROFILE_LIMITS } from './iec-ts-60815-profile';
 import { INSULATOR_STRENGTH } from './insulator-strength';
 import { NATIONAL_ALTITUDE_RULES } from './national-altitude-rules';
 import { RUS_CONTAMINATION, RUS_SUSPENSION_LEVELS, RUS_SWING_CLEARANCES } from './rus-1724e-200';
@@ -25,6 +26,7 @@ export * from './iec-60433';
 export * from './iec-61466-1';
 export * from './iec-61936-1';
 export * from './iec-ts-60815';
+export * from './iec-ts-60815-profile';
 export * from './insulator-strength';
 export * from './look-up';
 export * from './national-altitude-rules';
@@ -42,6 +44,7 @@ export const ALL_TABLES = [
   IEC_60071_1_TABLE_A2,
   IEC_60071_1_TABLE_A3,
   IEC_TS_60815_USCD,
+  PROFILE_LIMITS,
   IEC_60305_UNITS,
   ANSI_C29_2_UNITS,
   IEC_60433_CLASSES,

@@ -55,7 +55,27 @@ function dimensionsOf(unit: CatalogueUnit): (readonly [string, string | null])[]
     ...(unit.routineTestLoadKn === null
       ? []
       : ([['Routine test load', measure(unit.routineTestLoadKn, 'kN')]] as const)),
+    ...(unit.kind === 'line-post'
+      ? ([['Strength in bending', measure(unit.cantileverStrengthKn ?? null, 'kN')]] as const)
+      : []),
     ['Coupling', unit.coupling],
+  ];
+}
+
+/** Symbols as the profile checks write them. */
+function shedsOf({ sheds, kind, profile, spacingMm }: CatalogueUnit): (readonly [string, string | null])[] {
+  if (!sheds) return [];
+  const ofUnit = kind === 'cap-and-pin' && sheds.spacingMm === null;
+  return [
+    ['Shed spacing, s', ofUnit ? `${measure(spacingMm, 'mm')} of the unit` : measure(sheds.spacingMm, 'mm')],
+    [profile === 'alternating' ? 'Overhang, p1' : 'Overhang, p', measure(sheds.overhangMm, 'mm')],
+    ...(profile === 'alternating'
+      ? ([['Overhang of the smaller sheds, p2', measure(sheds.secondOverhangMm, 'mm')]] as const)
+      : []),
+    ['Distance between sheds, c', measure(sheds.clearanceMm, 'mm')],
+    ['Creepage where it is densest, l', measure(sheds.pathMm, 'mm')],
+    ['Distance through air there, d', measure(sheds.pathClearanceMm, 'mm')],
+    ['Ribs below', sheds.underRibs === null ? null : CHOICE_LABELS.yesNo[sheds.underRibs ? 'yes' : 'no']],
   ];
 }
 
@@ -88,6 +108,11 @@ function UnitView({ unit }: { unit: CatalogueUnit }) {
           <Ledger rows={dimensionsOf(unit)} />
           {unit.withdrawn && unit.note && <p className="soft">{unit.note}</p>}
         </Sheet>
+        {unit.sheds && (
+          <Sheet title="Sheds" note="for the checks of the profile">
+            <Ledger rows={shedsOf(unit)} />
+          </Sheet>
+        )}
         <Sheet title="Source">
           <Ledger
             rows={[

@@ -91,6 +91,7 @@ function StringGroup() {
       <ChoiceAt path="string.arrangement" />
       <NumberAt path="string.vAngleWindwardDeg" />
       <NumberAt path="string.vAngleLeewardDeg" />
+      <NumberAt path="string.postAngleDeg" note="0 stands out from the pole, 90 stands upright" />
       <ParallelStringsAt />
       <NumberAt path="string.rodsInSeries" />
       <ChoiceAt path="string.surroundings" />

@@ -12,7 +12,8 @@ export function MechanicalBlock({ evaluation }: { evaluation: Evaluation }) {
   const { mechanical } = evaluation;
   if (!mechanical) return null;
   const { cases, governedBy, strengthRequiredKn, classRequiredKn, coupling } = mechanical;
-  const why = whyNot(evaluation, 'mechanical');
+  const why = evaluation.notAssessed.find(({ part }) => part === 'mechanical')?.why;
+  const bent = cases.some(({ post }) => post);
   return (
     <LedgerBlock title="Mechanical loads" aside="of the whole set, and of one string">
       {why && <p className="zone-note">not assessed: {lowerFirst(why)}</p>}
@@ -22,7 +23,7 @@ export function MechanicalBlock({ evaluation }: { evaluation: Evaluation }) {
             <thead>
               <tr>
                 <th scope="col">case</th>
-                <th scope="col">a string</th>
+                <th scope="col">{bent ? 'a post, bending' : 'a string'}</th>
                 <th scope="col">factor needed</th>
                 <th scope="col">given</th>
               </tr>
@@ -42,7 +43,11 @@ export function MechanicalBlock({ evaluation }: { evaluation: Evaluation }) {
               unit="kN"
               name="mechanical.class"
               label="Class needed"
-              why={strengthRequiredKn === null ? undefined : 'above the last class'}
+              why={
+                strengthRequiredKn === null
+                  ? undefined
+                  : lowerFirst(whyNot(evaluation, 'mechanical.class') ?? 'above the last class')
+              }
             />
           </LedgerRow>
         </dl>
@@ -54,7 +59,8 @@ export function MechanicalBlock({ evaluation }: { evaluation: Evaluation }) {
 const kilo = (valueN: number | null): number | null => (valueN === null ? null : valueN / 1000);
 
 function CaseRows({ result, index, governs }: { result: MechanicalCaseResult; index: number; governs: boolean }) {
-  const { name, kind, verticalN, horizontalN, loadPerStringN, loadOneStringMissingN, slackLeg, verdict } = result;
+  const { name, kind, verticalN, horizontalN, loadPerStringN, loadOneStringMissingN, legs, post, slackLeg, verdict } =
+    result;
   return (
     <tbody className={governs ? 'is-governing' : undefined}>
       <tr>
@@ -97,7 +103,17 @@ function CaseRows({ result, index, governs }: { result: MechanicalCaseResult; in
                 , one string missing <Figure value={kilo(loadOneStringMissingN)} unit="kN" decimals={1} round="up" />
               </>
             )}
-            {slackLeg && ', leeward leg slack'}
+            {legs && (
+              <>
+                , windward leg <Figure value={kilo(legs.windwardN)} unit="kN" decimals={1} round="up" />, leeward leg{' '}
+                {slackLeg ? 'slack' : <Figure value={kilo(legs.leewardN)} unit="kN" decimals={1} round="up" />}
+              </>
+            )}
+            {post && (
+              <>
+                , along the post <Figure value={kilo(post.alongN)} unit="kN" decimals={1} round="up" />
+              </>
+            )}
           </small>
         </td>
       </tr>

@@ -1,3 +1,4 @@
+import type { LoadCaseInput } from '@bellgap/common/api';
 import { MOST_LOAD_CASES } from '@bellgap/common/schemas';
 import { Button } from 'antd';
 import { useForm } from '../hooks/form-context';
@@ -37,6 +38,7 @@ export function MechanicalGroup() {
       <NumberAt path="mechanical.windSpanM" />
       <NumberAt path="mechanical.weightSpanM" />
       <NumberAt path="mechanical.lineAngleDeg" />
+      <NumberAt path="mechanical.fittingsStrengthKn" note="the weakest one of a string" />
       {cases.map((_, index) => (
         <LoadCase key={index} index={index} isOnly={cases.length === 1} />
       ))}
@@ -63,8 +65,13 @@ export function MechanicalGroup() {
   );
 }
 
+/** Kinds of case in which ice may hang on the conductor. */
+const ICY = new Set<LoadCaseInput['kind']>(['ice', 'district', 'extreme', 'broken-string']);
+
 function LoadCase({ index, isOnly }: { index: number; isOnly: boolean }) {
-  const { readOnly, change } = useForm();
+  const { values, readOnly, change } = useForm();
+  const loadCase = casesOf(values)[index];
+  const isIcy = ICY.has(loadCase?.kind ?? null) || typeof loadCase?.iceRadialMm === 'number';
   const at = (name: Parameters<typeof casePath>[1]) => casePath(index, name);
   return (
     <fieldset className="load-case">
@@ -81,8 +88,14 @@ function LoadCase({ index, isOnly }: { index: number; isOnly: boolean }) {
       )}
       <TextAt path={at('name')} maxLength={80} />
       <ChoiceAt path={at('kind')} />
-      <NumberAt path={at('conductorWeightNPerM')} note="with its ice, of one sub-conductor" />
+      <NumberAt path={at('conductorWeightNPerM')} note="of one sub-conductor" />
       <NumberAt path={at('conductorDiameterMm')} />
+      {isIcy && (
+        <>
+          <NumberAt path={at('iceRadialMm')} note="left empty: weight and diameter are those with the ice" />
+          <NumberAt path={at('iceDensityKgPerM3')} />
+        </>
+      )}
       <NumberAt path={at('windPressurePa')} />
       <NumberAt path={at('conductorTensionN')} />
       <NumberAt path={at('stringWindN')} />

@@ -21,6 +21,8 @@ const RULES: Record<string, Rule> = {
   'string.arcGapMm': (ask) => ask('string.arcingDevices') === 'horns' || ask('string.arcingDevices') === 'rings',
   'string.vAngleWindwardDeg': (ask) => ask('string.arrangement') === 'v-suspension',
   'string.vAngleLeewardDeg': (ask) => ask('string.arrangement') === 'v-suspension',
+  'string.postAngleDeg': (_, unit) => unit?.kind === 'line-post',
+  'mechanical.fittingsStrengthKn': (_, unit) => unit?.kind !== 'line-post',
   'mechanical.crossing': (ask) => ask('mechanical.basis') === 'rd-223',
   'mechanical.acceptedStatistically': (ask) => ask('mechanical.basis') === 'rd-223',
   'clearance.shapePhaseToEarth': (ask) => [null, 'iec-table'].includes(ask('clearance.method') as string | null),

@@ -8,6 +8,8 @@ const BLANK_CASE: LoadCaseInput = {
   conductorWeightNPerM: null,
   windPressurePa: null,
   conductorDiameterMm: null,
+  iceRadialMm: null,
+  iceDensityKgPerM3: null,
   conductorTensionN: null,
   stringWindN: null,
   stringWeightN: null,
@@ -22,6 +24,7 @@ const BLANK: MechanicalInput = {
   windSpanM: null,
   weightSpanM: null,
   lineAngleDeg: null,
+  fittingsStrengthKn: null,
   cases: [BLANK_CASE],
 };
 

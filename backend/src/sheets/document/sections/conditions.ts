@@ -97,9 +97,14 @@ function stringRows({ string }: SpecificationInput): Placed[] {
           },
         ]
       : [];
+  const post =
+    typeof string.postAngleDeg === 'number'
+      ? [{ path: 'string', label: 'Post above the horizontal', value: `${plain(string.postAngleDeg)}°` }]
+      : [];
   return [
     { path: 'string', label: 'Arrangement', value: choice(CHOICE_LABELS.arrangement, string.arrangement) },
     ...angles,
+    ...post,
     {
       path: 'string',
       label: 'Strings in parallel',

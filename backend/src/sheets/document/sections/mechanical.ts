@@ -4,12 +4,16 @@ import { cell, figures, heading, type Block, type Pairs, type Row } from '../blo
 import type { SheetContent } from '../content';
 import { choice, down, inputWords, up, UNKNOWN, withUnit } from '../words';
 
-const INPUTS = ['subconductors', 'windSpanM', 'weightSpanM', 'lineAngleDeg'] as const;
+const INPUTS = ['subconductors', 'windSpanM', 'weightSpanM', 'lineAngleDeg', 'fittingsStrengthKn'] as const;
+/** Inputs that are printed only where they are filled in. */
+const WHERE_GIVEN: ReadonlySet<string> = new Set(['iceRadialMm', 'iceDensityKgPerM3', 'fittingsStrengthKn']);
 /** Inputs that only one basis asks for. */
 const INPUTS_OF_RD_223 = ['crossing', 'acceptedStatistically'] as const;
 const CASE_INPUTS = [
   'conductorWeightNPerM',
   'conductorDiameterMm',
+  'iceRadialMm',
+  'iceDensityKgPerM3',
   'windPressurePa',
   'conductorTensionN',
   'stringWindN',
@@ -22,6 +26,7 @@ export function mechanical({ input, evaluation }: SheetContent): Block[] {
   const given = input.mechanical;
   const answer = evaluation.mechanical;
   if (!given || !answer) return [];
+  const bent = answer.cases.some(({ post }) => post);
   return [
     heading(1, 'Mechanical loads'),
     { kind: 'pairs', labelShare: 0.45, rows: inputRows(given) },
@@ -35,7 +40,7 @@ export function mechanical({ input, evaluation }: SheetContent): Block[] {
               { head: 'case', share: 2.2 },
               { head: 'vertical', share: 1.2, align: 'right' as const },
               { head: 'horizontal', share: 1.2, align: 'right' as const },
-              { head: 'a string', share: 1.2, align: 'right' as const },
+              { head: bent ? 'a post, bending' : 'a string', share: 1.2, align: 'right' as const },
               { head: 'one string missing', share: 1.4, align: 'right' as const },
               { head: 'factor needed', share: 1, align: 'right' as const },
               { head: 'given', share: 0.9, align: 'right' as const },
@@ -62,7 +67,7 @@ export function mechanical({ input, evaluation }: SheetContent): Block[] {
       {
         kind: 'pairs',
         labelShare: 0.45,
-        rows: CASE_INPUTS.map((name) => {
+        rows: CASE_INPUTS.filter((name) => isPrinted(name, one[name])).map((name) => {
           const path = `mechanical.cases.${name}`;
           return { label: fieldOf(path)?.label ?? name, value: inputWords(path, one[name]) };
         }),
@@ -71,25 +76,38 @@ export function mechanical({ input, evaluation }: SheetContent): Block[] {
   ];
 }
 
+const isPrinted = (name: string, value: unknown): boolean =>
+  !WHERE_GIVEN.has(name) || (value !== null && value !== undefined);
+
 function inputRows(given: MechanicalInput): Pairs['rows'] {
   const names = given.basis === 'rd-223' ? [...INPUTS_OF_RD_223, ...INPUTS] : INPUTS;
   return [
     { label: 'Strength basis', value: choice(CHOICE_LABELS.mechanicalBasis, given.basis) },
-    ...names.map((name) => {
-      const path = `mechanical.${name}`;
-      return { label: fieldOf(path)?.label ?? name, value: inputWords(path, given[name]) };
-    }),
+    ...names
+      .filter((name) => isPrinted(name, given[name]))
+      .map((name) => {
+        const path = `mechanical.${name}`;
+        return { label: fieldOf(path)?.label ?? name, value: inputWords(path, given[name]) };
+      }),
   ];
 }
 
 const kilo = (valueN: number | null): string => (valueN === null ? UNKNOWN : withUnit(up(valueN / 1000, 1), 'kN'));
+
+/** Legs of a V and the load along a post, which have no column of their own. */
+function partWords({ legs, post, slackLeg }: MechanicalCaseResult): string {
+  if (post) return `; along the post ${kilo(post.alongN)}`;
+  if (!legs) return slackLeg ? '; leeward leg slack' : '';
+  const leeward = slackLeg ? 'leeward leg slack' : `leeward leg ${kilo(legs.leewardN)}`;
+  return `; windward leg ${kilo(legs.windwardN)}, ${leeward}`;
+}
 
 function caseRow(one: MechanicalCaseResult, governs: boolean): Row {
   const kind = one.kind ? CHOICE_LABELS.loadCaseKind[one.kind].toLowerCase() : 'kind not stated';
   return {
     governs,
     cells: [
-      cell(`${one.name}, ${kind}${governs ? ', governs' : ''}${one.slackLeg ? '; leeward leg slack' : ''}`),
+      cell(`${one.name}, ${kind}${governs ? ', governs' : ''}${partWords(one)}`),
       figures(kilo(one.verticalN)),
       figures(kilo(one.horizontalN)),
       figures(kilo(one.loadPerStringN)),

@@ -13,6 +13,8 @@ const PARTS: Record<string, string> = {
   phaseSpacing: 'Spacing at mid span',
   bay: 'Substation bay',
   voltageSharing: 'Voltage along the string',
+  profile: 'Profile of the unit',
+  class: 'Strength class',
   extraUnits: 'Extra units',
   phaseToEarthMm: 'Distance to earth',
   phaseToPhaseMm: 'Distance between phases',
