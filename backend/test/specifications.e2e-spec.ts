@@ -342,7 +342,14 @@ describe('specifications', () => {
       expect((await client.call(revision, { params: at('S-40') })).status).toBe(404);
       const { answer } = await client.call(specifications, { params: { code: 'L1' } });
       expect(answer).toEqual({ items: [], next: null, previous: null });
-      expect((await client.call(contract.desk)).answer).toEqual({ drafts: [], outdated: [] });
+      expect((await client.call(contract.desk)).answer).toEqual({
+        waiting: [],
+        returned: [],
+        drafts: [],
+        outdated: [],
+        issued: [],
+        endingConcessions: [],
+      });
     });
 
     it('a checker may read and not write', async () => {

@@ -13,6 +13,6 @@ export class DeskService {
       this.specifications.ownDrafts(person),
       this.specifications.outdatedDrafts(person),
     ]);
-    return { drafts, outdated };
+    return { waiting: [], returned: [], drafts, outdated, issued: [], endingConcessions: [] };
   }
 }

@@ -1,11 +1,14 @@
 import type { Revision } from '@bellgap/common/api';
 import { mayWriteDrafts, type SignedIn } from '../platform/person';
 import { newerBasisRevision, type StoredRevision } from './revision-row';
+import { editBarsSigning, figuresHidden, movesOf } from './rights';
 import { siteDay } from '../platform/site-day';
 
 /** A revision as a person sees it. */
-export function revisionAnswer(stored: StoredRevision, person: Pick<SignedIn, 'grants'>): Revision {
-  const { lastSheet } = stored;
+export function revisionAnswer(stored: StoredRevision, person: Pick<SignedIn, 'id' | 'grants'>): Revision {
+  const { siteTimeZone } = stored;
+  const hidden = figuresHidden(person, stored);
+  const lastSheet = hidden ? null : stored.lastSheet;
   return {
     id: stored.id,
     specificationId: stored.specificationId,
@@ -20,13 +23,30 @@ export function revisionAnswer(stored: StoredRevision, person: Pick<SignedIn, 'g
     basis: stored.basis,
     newerBasisRevision: newerBasisRevision(stored.basis?.revision ?? null, stored.newestBasisRevision),
     context: stored.context,
-    evaluation: stored.evaluation,
+    evaluation: hidden ? null : stored.evaluation,
+    figuresHidden: hidden,
     lockVersion: stored.lockVersion,
     savedAt: stored.savedAt.toISOString(),
     savedBy: stored.savedBy,
-    drafted: stored.draftedBy ? { name: stored.draftedBy, on: siteDay(stored.createdAt, stored.siteTimeZone) } : null,
-    checked: null,
-    approved: null,
+    drafted: stored.draftedBy ? { name: stored.draftedBy, on: siteDay(stored.createdAt, siteTimeZone) } : null,
+    checked: stored.checked && { name: stored.checked.by, on: siteDay(stored.checked.at, siteTimeZone) },
+    approved: stored.approved && { name: stored.approved.by, on: siteDay(stored.approved.at, siteTimeZone) },
+    labels: stored.labels,
+    derivedFrom: stored.derivedFrom?.label ?? null,
+    submitted: stored.submitted && {
+      name: stored.submitted.by,
+      on: siteDay(stored.submitted.at, siteTimeZone),
+      dueOn: stored.submitted.dueOn,
+      checkCategory: stored.submitted.checkCategory,
+      note: stored.submitted.note,
+    },
+    returned: stored.returned && { at: stored.returned.at.toISOString(), note: stored.returned.note },
+    contentCode: stored.contentCode,
+    authors: stored.authors.map(({ name }) => name),
+    openRemarks: stored.openRemarks,
+    sheetId: stored.issuedSheetId,
+    moves: movesOf(person, stored),
+    editBarsSigning: editBarsSigning(person, stored),
     mayEdit: stored.state === 'draft' && mayWriteDrafts(person, stored.projectId),
     lastSheet: lastSheet && {
       id: lastSheet.id,

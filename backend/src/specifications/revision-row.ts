@@ -33,6 +33,30 @@ export interface StoredRevision {
   savedBy: string | null;
   createdAt: Date;
   draftedBy: string | null;
+  draftedById: string;
+  /** Letters and number that the revision has had, in order. */
+  labels: string[];
+  derivedFrom: { id: string; label: string } | null;
+  /** Who has changed the content, the first first. */
+  authors: { id: string; name: string }[];
+  submitted: {
+    id: string;
+    by: string;
+    byId: string;
+    at: Date;
+    label: string;
+    dueOn: string | null;
+    checkCategory: number;
+    note: string;
+  } | null;
+  /** Checkers who have entered their own figures for this submission. */
+  ownFiguresBy: string[];
+  checked: { by: string; byId: string; at: Date } | null;
+  approved: { by: string; byId: string; at: Date } | null;
+  returned: { at: Date; note: string } | null;
+  contentCode: string | null;
+  openRemarks: number;
+  issuedSheetId: string | null;
   lastSheet: StoredSheet | null;
 }
 
@@ -67,12 +91,40 @@ export interface RevisionRow {
   saved_by_name: string | null;
   created_at: Date;
   drafted_by_name: string | null;
+  drafted_by: string;
+  labels: string[];
+  derived_from: string | null;
+  derived_from_label: string;
+  authors: { id: string; name: string }[];
+  submission: {
+    id: string;
+    by: string;
+    by_id: string;
+    at: string;
+    label: string;
+    due_on: string | null;
+    check_category: number;
+    note: string;
+    own_figures_by: string[];
+  } | null;
+  checked_by: string | null;
+  checked_by_name: string;
+  checked_at: Date;
+  approved_by: string | null;
+  approved_by_name: string;
+  issued_at: Date;
+  returned_at: Date | null;
+  return_note: string;
+  content_code: string | null;
+  open_remarks: number;
+  issued_sheet_id: string | null;
   basis_id: string | null;
   basis_number: string;
   basis_revision: number;
   basis_basis: string;
   basis_system: DesignBasis['system'];
   basis_rules: DesignBasis['rules'];
+  basis_worksheet: DesignBasis['worksheet'];
   basis_note: string;
   basis_created_at: Date;
   basis_created_by_name: string | null;
@@ -107,12 +159,26 @@ export function revisionColumns(db: Knex) {
     'saver.name as saved_by_name',
     'r.created_at',
     'drafter.name as drafted_by_name',
+    'r.drafted_by',
+    'r.derived_from',
+    'r.checked_by',
+    'r.checked_at',
+    'r.approved_by',
+    'r.issued_at',
+    'r.returned_at',
+    'r.return_note',
+    'r.content_code',
+    'checker.name as checked_by_name',
+    'approver.name as approved_by_name',
+    'issued_sheet.id as issued_sheet_id',
+    ...workflowColumns(db),
     'b.id as basis_id',
     'b.number as basis_number',
     'b.revision as basis_revision',
     'b.basis as basis_basis',
     'b.system as basis_system',
     'b.rules as basis_rules',
+    'b.worksheet as basis_worksheet',
     'b.note as basis_note',
     'b.created_at as basis_created_at',
     'basis_author.name as basis_created_by_name',
@@ -123,6 +189,24 @@ export function revisionColumns(db: Knex) {
     'sheet.file_sha256 as sheet_sha256',
     newestBasisRevision(db),
   ];
+}
+
+/** What stands in tables of its own and is needed whole: few rows each. */
+function workflowColumns(db: Knex): Knex.Raw[] {
+  return [
+    `array(select l.label from revision_labels as l where l.revision_id = r.id order by l.given_at, l.label) as labels`,
+    `(select parent.label from revisions as parent where parent.id = r.derived_from) as derived_from_label`,
+    `(select coalesce(json_agg(json_build_object('id', u.id, 'name', u.name) order by c.first), '[]')
+      from (select changed_by, min(id) as first from revision_changes where revision_id = r.id group by changed_by) as c
+      join users as u on u.id = c.changed_by) as authors`,
+    `(select json_build_object('id', m.id, 'by', u.name, 'by_id', m.submitted_by, 'at', m.submitted_at,
+        'label', m.label, 'due_on', m.due_on, 'check_category', m.check_category, 'note', m.note, 'own_figures_by',
+        array(select k.checker_id from check_records as k where k.submission_id = m.id))
+      from submissions as m join users as u on u.id = m.submitted_by
+      where m.revision_id = r.id and r.state <> 'draft'
+      order by m.submitted_at desc limit 1) as submission`,
+    `(select count(*)::integer from review_remarks as m where m.revision_id = r.id and m.closed_at is null) as open_remarks`,
+  ].map((column) => db.raw(column));
 }
 
 /** Number of the newest revision of the design basis of the project `s.project_id`. */
@@ -162,6 +246,27 @@ export function toStoredRevision(row: RevisionRow): StoredRevision {
     savedBy: row.saved_by_name,
     createdAt: row.created_at,
     draftedBy: row.drafted_by_name,
+    draftedById: row.drafted_by,
+    labels: row.labels,
+    derivedFrom: row.derived_from === null ? null : { id: row.derived_from, label: row.derived_from_label },
+    authors: row.authors,
+    submitted: row.submission && {
+      id: row.submission.id,
+      by: row.submission.by,
+      byId: row.submission.by_id,
+      at: new Date(row.submission.at),
+      label: row.submission.label,
+      dueOn: row.submission.due_on,
+      checkCategory: row.submission.check_category,
+      note: row.submission.note,
+    },
+    ownFiguresBy: row.submission?.own_figures_by ?? [],
+    checked: row.checked_by === null ? null : { by: row.checked_by_name, byId: row.checked_by, at: row.checked_at },
+    approved: row.approved_by === null ? null : { by: row.approved_by_name, byId: row.approved_by, at: row.issued_at },
+    returned: row.returned_at === null ? null : { at: row.returned_at, note: row.return_note },
+    contentCode: row.content_code,
+    openRemarks: row.open_remarks,
+    issuedSheetId: row.issued_sheet_id,
     lastSheet:
       row.sheet_id === null
         ? null
@@ -183,6 +288,7 @@ function toBasis(row: RevisionRow, id: string): DesignBasis {
     basis: row.basis_basis,
     system: row.basis_system,
     rules: row.basis_rules,
+    worksheet: row.basis_worksheet,
     note: row.basis_note,
     createdAt: row.basis_created_at.toISOString(),
     createdBy: row.basis_created_by_name,

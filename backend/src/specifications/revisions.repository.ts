@@ -1,5 +1,5 @@
 import { Inject, Injectable } from '@nestjs/common';
-import type { Evaluation, EvaluationContext, SpecificationInput } from '@bellgap/common/api';
+import { STATES_SHOWN, type Evaluation, type EvaluationContext, type SpecificationInput } from '@bellgap/common/api';
 import { KNEX, type Database } from '../platform/knex';
 import type { Override } from './inheritance';
 import { listColumnsOf } from './list-columns';
@@ -40,13 +40,20 @@ export interface RevisionContent {
   evaluation: Evaluation;
 }
 
+export interface FindOptions {
+  db?: Database;
+  forUpdate?: boolean;
+  /** Issued, superseded and withdrawn ones alone. */
+  shownOnly?: boolean;
+}
+
 @Injectable()
 export class RevisionsRepository {
   constructor(@Inject(KNEX) private readonly knex: Database) {}
 
   async find(
     { projectCode, number, label }: RevisionAddress,
-    { db = this.knex, forUpdate = false }: { db?: Database; forUpdate?: boolean } = {},
+    { db = this.knex, forUpdate = false, shownOnly = false }: FindOptions = {},
   ): Promise<StoredRevision | null> {
     const query = db('revisions as r')
       .join('specifications as s', 's.id', 'r.specification_id')
@@ -54,6 +61,12 @@ export class RevisionsRepository {
       .leftJoin('design_bases as b', 'b.id', 'r.basis_revision_id')
       .leftJoin('users as saver', 'saver.id', 'r.saved_by')
       .leftJoin('users as drafter', 'drafter.id', 'r.drafted_by')
+      .leftJoin('users as checker', 'checker.id', 'r.checked_by')
+      .leftJoin('users as approver', 'approver.id', 'r.approved_by')
+      .leftJoin(
+        'sheets as issued_sheet',
+        (on) => void on.on('issued_sheet.revision_id', 'r.id').onVal('issued_sheet.kind', 'issued'),
+      )
       .leftJoin('users as basis_author', 'basis_author.id', 'b.created_by')
       .leftJoin('sheets as sheet', (on) => void on.on('sheet.revision_id', 'r.id').onVal('sheet.kind', 'draft'))
       .leftJoin('users as sheet_author', 'sheet_author.id', 'sheet.drawn_by')
@@ -67,6 +80,7 @@ export class RevisionsRepository {
         (on) => void on.on('l.revision_id', 'r.id').on('l.specification_id', 's.id').onVal('l.label', label),
       );
     }
+    if (shownOnly) void query.whereIn('r.state', [...STATES_SHOWN]);
     if (forUpdate) void query.forUpdate('r');
     const row = await query;
     return row ? toStoredRevision(row) : null;

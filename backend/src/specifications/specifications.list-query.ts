@@ -1,10 +1,12 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
-import type { RevisionState, SpecificationRow } from '@bellgap/common/api';
+import { STATES_SHOWN, type RevisionState, type SpecificationRow } from '@bellgap/common/api';
 import { KNEX, type Database } from '../platform/knex';
 import { likePattern, listPage, type Page, type SortColumn } from '../platform/list';
 import { worstCautionOf } from './list-columns';
+import type { SignedIn } from '../platform/person';
 import { newerBasisRevision, newestBasisRevision } from './revision-row';
+import { figuresHidden } from './rights';
 
 const SORTS: Record<string, SortColumn> = {
   number: { column: 's.number', type: 'text' },
@@ -15,9 +17,6 @@ const SORTS: Record<string, SortColumn> = {
   highestVoltageKv: { column: 'r.highest_voltage_kv', type: 'double precision' },
   worstMarginPercent: { column: 'r.worst_margin_percent', type: 'double precision' },
 };
-
-/** States that people without a role on drafts may know of. */
-const SHOWN_TO_ALL: readonly RevisionState[] = ['issued', 'superseded', 'withdrawn'];
 
 /** Most rows of a part of the desk; the rest is found in the lists of the projects. */
 const DESK_LIMIT = 50;
@@ -46,6 +45,11 @@ interface ListRow {
   drafted_by_name: string | null;
   saved_by_name: string | null;
   saved_at: Date;
+  due_on: string | null;
+  returned_at: Date | null;
+  project_id: string;
+  authors: string[];
+  own_figures_by: string[];
 }
 
 /** Lists of specifications, each in its newest revision that the asker may know of; plain columns only. */
@@ -56,6 +60,7 @@ export class SpecificationsListQuery {
   ofProject(
     projectId: string,
     asked: { limit?: string; cursor?: string; sort?: string; search?: string; state?: string },
+    person: SignedIn,
     { drafts }: { drafts: boolean },
   ): Promise<Page<SpecificationRow>> {
     const query = this.rows(drafts).where('s.project_id', projectId);
@@ -71,24 +76,24 @@ export class SpecificationsListQuery {
       sorts: SORTS,
       defaultSort: 'number',
       idColumn: 's.id',
-      toItem,
+      toItem: (row) => toItem(row, person),
     });
   }
 
   /** Drafts that a person began or saved last, newest save first. */
-  async draftsOf(personId: string, projects: 'all' | string[]): Promise<SpecificationRow[]> {
+  async draftsOf(person: SignedIn, projects: 'all' | string[]): Promise<SpecificationRow[]> {
     const query = this.drafts(projects).where(
-      (either) => void either.where('r.drafted_by', personId).orWhere('r.saved_by', personId),
+      (either) => void either.where('r.drafted_by', person.id).orWhere('r.saved_by', person.id),
     );
-    return ((await query) as ListRow[]).map(toItem);
+    return ((await query) as ListRow[]).map((row) => toItem(row, person));
   }
 
   /** Drafts that are pinned to a revision of the basis that is no longer the newest. */
-  async outdatedDrafts(projects: 'all' | string[]): Promise<SpecificationRow[]> {
+  async outdatedDrafts(person: SignedIn, projects: 'all' | string[]): Promise<SpecificationRow[]> {
     const query = this.drafts(projects).whereRaw(
       'exists (select 1 from design_bases as n where n.project_id = s.project_id and n.revision > b.revision)',
     );
-    return ((await query) as ListRow[]).map(toItem);
+    return ((await query) as ListRow[]).map((row) => toItem(row, person));
   }
 
   private drafts(projects: 'all' | string[]): Knex.QueryBuilder {
@@ -105,7 +110,7 @@ export class SpecificationsListQuery {
           where newest.specification_id = s.id ${drafts ? '' : 'and newest.state = any(?)'}
           order by newest.created_at desc limit 1
         ) as r on true`,
-        drafts ? [] : [[...SHOWN_TO_ALL]],
+        drafts ? [] : [[...STATES_SHOWN]],
       )
       .leftJoin('design_bases as b', 'b.id', 'r.basis_revision_id')
       .leftJoin('users as saver', 'saver.id', 'r.saved_by')
@@ -133,12 +138,38 @@ export class SpecificationsListQuery {
         'drafter.name as drafted_by_name',
         'saver.name as saved_by_name',
         'r.saved_at',
+        'r.due_on',
+        'r.returned_at',
+        's.project_id',
+        ...signersColumns(this.knex),
         newestBasisRevision(this.knex),
       );
   }
 }
 
-function toItem(row: ListRow): SpecificationRow {
+/** Who wrote in a revision, and who has entered his own figures for what is submitted: they see what others do not yet. */
+function signersColumns(knex: Knex): Knex.Raw[] {
+  return [
+    knex.raw(
+      `case when r.state in ('draft', 'in_check')
+        then array(select distinct c.changed_by from revision_changes as c where c.revision_id = r.id) else '{}' end as authors`,
+    ),
+    knex.raw(
+      `case when r.state = 'in_check'
+        then array(select k.checker_id from check_records as k join submissions as m on m.id = k.submission_id
+          where m.revision_id = r.id and m.label = r.label) else '{}' end as own_figures_by`,
+    ),
+  ];
+}
+
+function toItem(row: ListRow, person: SignedIn): SpecificationRow {
+  const hidden = figuresHidden(person, {
+    state: row.state,
+    projectId: row.project_id,
+    authors: row.authors.map((id) => ({ id, name: '' })),
+    ownFiguresBy: row.own_figures_by,
+  });
+  const shown = <T>(value: T): T | null => (hidden ? null : value);
   return {
     id: row.id,
     projectCode: row.project_code,
@@ -147,22 +178,27 @@ function toItem(row: ListRow): SpecificationRow {
     kind: row.kind,
     label: row.label,
     state: row.state,
-    units: row.units,
+    units: shown(row.units),
     insulatorCode: row.insulator_code,
-    governedBy: row.governed_by,
+    governedBy: shown(row.governed_by),
     highestVoltageKv: row.highest_voltage_kv,
     altitudeM: row.altitude_m,
     pollutionSeverity: row.severity,
-    worstMarginPercent: row.worst_margin_percent,
-    worstCaution: worstCautionOf({
-      cautionsCount: row.cautions_count,
-      acceptancesCount: row.acceptances_count,
-      failsCount: row.fails_count,
-      stopsCount: row.stops_count,
-    }),
+    worstMarginPercent: shown(row.worst_margin_percent),
+    worstCaution: hidden
+      ? null
+      : worstCautionOf({
+          cautionsCount: row.cautions_count,
+          acceptancesCount: row.acceptances_count,
+          failsCount: row.fails_count,
+          stopsCount: row.stops_count,
+        }),
     newerBasisRevision: newerBasisRevision(row.basis_revision, row.newest_basis_revision),
     draftedBy: row.drafted_by_name,
     savedBy: row.saved_by_name,
     savedAt: row.saved_at.toISOString(),
+    figuresHidden: hidden,
+    dueOn: row.due_on,
+    returnedAt: row.returned_at?.toISOString() ?? null,
   };
 }

@@ -7,10 +7,11 @@ import { Clock } from '../platform/clock';
 import { forbidden, invalid, invalidAt, newerVersion, notFound, wrongState } from '../platform/domain-error';
 import { KNEX, type Database } from '../platform/knex';
 import type { Page } from '../platform/list';
-import { mayReadDrafts, mayWriteDrafts, requireDraftReader, type SignedIn } from '../platform/person';
+import { mayReadDrafts, mayWriteDrafts, type SignedIn } from '../platform/person';
 import { ProjectsService } from '../projects/projects.service';
 import { inheritanceFaults, inputFromBasis, overrideCautions, takeBasisOver, type Override } from './inheritance';
 import { revisionAnswer } from './revision-answer';
+import { maySee } from './rights';
 import type { StoredRevision } from './revision-row';
 import { RevisionsRepository, type RevisionAddress, type RevisionContent } from './revisions.repository';
 import { SpecificationsListQuery } from './specifications.list-query';
@@ -42,15 +43,15 @@ export class SpecificationsService {
     asked: QueryOf<typeof contract.specifications>,
   ): Promise<Page<SpecificationRow>> {
     const project = await this.projects.known(person, projectCode);
-    return this.lists.ofProject(project.id, asked, { drafts: mayReadDrafts(person, project.id) });
+    return this.lists.ofProject(project.id, asked, person, { drafts: mayReadDrafts(person, project.id) });
   }
 
   ownDrafts(person: SignedIn): Promise<SpecificationRow[]> {
-    return this.lists.draftsOf(person.id, draftProjects(person));
+    return this.lists.draftsOf(person, draftProjects(person));
   }
 
   outdatedDrafts(person: SignedIn): Promise<SpecificationRow[]> {
-    return this.lists.outdatedDrafts(draftProjects(person));
+    return this.lists.outdatedDrafts(person, draftProjects(person));
   }
 
   /** What is stored of a revision, for features that build on it; 404 to who may not see it. */
@@ -166,9 +167,12 @@ export class SpecificationsService {
     options?: { db: Database; forUpdate: boolean },
   ): Promise<StoredRevision> {
     const stored = await this.revisions.find(address, options);
-    if (!stored) throw notFound('specification');
-    requireDraftReader(person, stored.projectId, 'specification');
-    return stored;
+    if (stored && maySee(person, stored)) return stored;
+    // The newest that others may know of: a draft that is newer does not exist for them.
+    const shown =
+      address.label === 'latest' ? await this.revisions.find(address, { ...options, shownOnly: true }) : null;
+    if (!shown || !maySee(person, shown)) throw notFound('specification');
+    return shown;
   }
 
   private async evaluated(

@@ -11,28 +11,12 @@ import type { WorksheetInput } from '../engine/worksheet-model';
 import { companySettingsSchema } from '../schemas/company-settings';
 import { PAPERS, PROJECT_KINDS, basisRulesSchema } from '../schemas/projects';
 import { overrideSchema } from '../schemas/specifications';
+import { day, engineValue, flag, instant, nullableNumber, nullableText, number, words } from './answer-parts';
 import { ROLES } from './roles';
 import { REVISION_STATES } from './states';
+import { concessionAnswer, moveAnswer, registerRowAnswer } from './workflow-answers';
 
 /** Schemas of answers. Instants are RFC 3339 in UTC, dates YYYY-MM-DD. */
-
-const instant = () => yup.string().required();
-const day = () => yup.string().required();
-const nullableText = () => yup.string().nullable().defined();
-const nullableNumber = () => yup.number().nullable().defined();
-const flag = () => yup.boolean().required();
-const number = () => yup.number().required();
-const words = () => yup.string().defined();
-
-/** A value of a shape that the engine's own types describe. */
-const engineValue = <T>() => yup.mixed<T & object>().required();
-
-export function listOf<S extends yup.AnySchema>(item: S) {
-  return yup
-    .object({ items: yup.array().of(item).required(), next: nullableText(), previous: nullableText() })
-    .noUnknown()
-    .required();
-}
 
 export const grantAnswer = yup
   .object({
@@ -189,6 +173,10 @@ export const specificationRowAnswer = yup
     draftedBy: nullableText(),
     savedBy: nullableText(),
     savedAt: instant(),
+    /** The asker is a checker who has not yet entered his own figures: those of the row are null. */
+    figuresHidden: flag(),
+    dueOn: nullableText(),
+    returnedAt: nullableText(),
   })
   .noUnknown();
 export type SpecificationRow = yup.InferType<typeof specificationRowAnswer>;
@@ -213,14 +201,39 @@ export const revisionAnswer = yup
     /** Number of a newer revision of the basis, or null. */
     newerBasisRevision: nullableNumber(),
     context: engineValue<EvaluationContext>(),
-    evaluation: engineValue<Evaluation>(),
+    /** Null for a checker who has not yet entered his own figures: `figuresHidden` says so. */
+    evaluation: yup.mixed<Evaluation & object>().nullable().defined(),
+    figuresHidden: flag(),
     lockVersion: number(),
     savedAt: instant(),
     savedBy: nullableText(),
     drafted: yup.object({ name: words(), on: day() }).noUnknown().nullable().defined().default(undefined),
     checked: yup.object({ name: words(), on: day() }).noUnknown().nullable().defined().default(undefined),
     approved: yup.object({ name: words(), on: day() }).noUnknown().nullable().defined().default(undefined),
+    /** Letters and number that this revision has had, in order. */
+    labels: yup.array().of(yup.string().required()).required(),
+    /** The revision that this one was begun from. */
+    derivedFrom: nullableText(),
+    submitted: yup
+      .object({ name: words(), on: day(), dueOn: nullableText(), checkCategory: number(), note: words() })
+      .noUnknown()
+      .nullable()
+      .defined()
+      .default(undefined),
+    /** The last return: when and why. */
+    returned: yup.object({ at: instant(), note: words() }).noUnknown().nullable().defined().default(undefined),
+    /** Code of the content that was submitted. */
+    contentCode: nullableText(),
+    /** Who has changed the content; none of them can check or approve it. */
+    authors: yup.array().of(yup.string().required()).required(),
+    openRemarks: number(),
+    /** The issued sheet, where there is one. */
+    sheetId: nullableText(),
+    /** Every move from this state, and why the asker may not make it. */
+    moves: yup.array().of(moveAnswer.required()).required(),
     mayEdit: flag(),
+    /** The asker could check or approve this revision: once he edits it, he no longer can, so he is asked first. */
+    editBarsSigning: flag(),
     lastSheet: yup
       .object({
         id: words(),
@@ -383,15 +396,52 @@ export const healthAnswer = yup
   .noUnknown()
   .required();
 
+/** Why something waits for a person. */
+export const WAITING = {
+  check: 'Waits for your check',
+  'go-on-checking': 'You have begun to check it',
+  approve: 'Waits for your approval',
+  answer: 'A remark waits for your answer',
+  close: 'Your remark was answered: close it or write again',
+} as const;
+export type Waiting = keyof typeof WAITING;
+
 export const deskAnswer = yup
   .object({
+    /** What the asker can act on now, what is due first on top. */
+    waiting: yup
+      .array()
+      .of(
+        yup
+          .object({
+            why: yup
+              .string()
+              .oneOf(Object.keys(WAITING) as Waiting[])
+              .required(),
+            since: instant(),
+            row: specificationRowAnswer.required(),
+          })
+          .noUnknown()
+          .required(),
+      )
+      .required(),
+    /** Own drafts that were returned, with the reason. */
+    returned: yup
+      .array()
+      .of(yup.object({ note: words(), row: specificationRowAnswer.required() }).noUnknown().required())
+      .required(),
     /** Drafts that the asker began or last saved. */
     drafts: yup.array().of(specificationRowAnswer.required()).required(),
     /** Drafts whose design basis has a newer revision. */
     outdated: yup.array().of(specificationRowAnswer.required()).required(),
+    /** Issued of late, in the projects of the asker. */
+    issued: yup.array().of(registerRowAnswer.required()).required(),
+    /** Concessions that end within 60 days, or have ended. */
+    endingConcessions: yup.array().of(concessionAnswer.required()).required(),
   })
   .noUnknown()
   .required();
+export type Desk = yup.InferType<typeof deskAnswer>;
 
 export const sheetAnswer = yup
   .object({

@@ -24,7 +24,6 @@ import {
   insulationLevelAnswer,
   insulatorAnswer,
   invitationAnswer,
-  listOf,
   projectAnswer,
   revisionAnswer,
   sessionAnswer,
@@ -34,29 +33,18 @@ import {
   userAnswer,
 } from './answers';
 import { accountEndpoints } from './account-endpoints';
+import { listOf } from './answer-parts';
 import { endpoint } from './endpoint';
+import { listQuery, sortable } from './list-query';
 import { methodEndpoints } from './method-endpoints';
 import { DRAFT_READERS, DRAFT_WRITERS } from './roles';
+import { workflowEndpoints } from './workflow-endpoints';
+import { trailEndpoints } from './trail-endpoints';
 
 const ADMINISTRATOR = ['administrator'] as const;
 
 /** Most evaluations of one batch. */
 export const BATCH_LIMIT = 500;
-
-/** Query strings are text; numbers in them are read by the list code of the server. */
-const listQuery = {
-  limit: yup
-    .string()
-    .matches(/^\d{1,3}$/, 'limit: a number from 1 to 200')
-    .optional(),
-  cursor: yup.string().max(500).optional(),
-};
-
-const sortable = <const T extends string>(columns: readonly T[]) =>
-  yup
-    .string()
-    .oneOf(columns.flatMap((column) => [column, `-${column}` as const]))
-    .optional();
 
 export const SPECIFICATION_SORTS = [
   'number',
@@ -448,6 +436,12 @@ export const contract = {
 
   // tables and formulas, known answers, what would be if
   ...methodEndpoints,
+
+  // from draft to issued, and what is issued
+  ...workflowEndpoints,
+
+  // who did what, when and why
+  ...trailEndpoints,
 } as const;
 
 export type Contract = typeof contract;

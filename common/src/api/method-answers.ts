@@ -4,14 +4,10 @@ import { CRITERIA, SEVERITIES, STATUSES } from '../engine/model';
 import type { FlashoverRisk } from '../engine/risk/model';
 import type { WorksheetAnswer } from '../engine/worksheet-model';
 import { caseFiguresSchema, CONFIRMATION_OUTCOMES, revisionNoteSchema, SWEEP_CLASSES } from '../schemas/method';
+import { flag, nullableNumber, nullableText, number, words } from './answer-parts';
 
 /** Answers about the method itself: its tables and formulas, its known answers, and what would be if. */
 
-const words = () => yup.string().defined();
-const nullableText = () => yup.string().nullable().defined();
-const nullableNumber = () => yup.number().nullable().defined();
-const number = () => yup.number().required();
-const flag = () => yup.boolean().required();
 const status = () =>
   yup
     .string()

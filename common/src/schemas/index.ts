@@ -7,5 +7,7 @@ export * from './people';
 export * from './projects';
 export * from './specifications';
 export * from './standing-cautions';
+export * from './trail';
+export * from './workflow';
 export * from './worksheet';
 export * from './risk';

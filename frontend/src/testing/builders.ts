@@ -72,5 +72,8 @@ export const aSpecificationRow = (given: Partial<SpecificationRow> = {}): Specif
   draftedBy: 'Tamsin Orvelle',
   savedBy: 'Tamsin Orvelle',
   savedAt: '2026-03-12T10:02:31Z',
+  figuresHidden: false,
+  dueOn: null,
+  returnedAt: null,
   ...given,
 });

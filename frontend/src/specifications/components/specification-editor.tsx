@@ -15,6 +15,7 @@ import { useTraceSource } from '../hooks/use-trace-source';
 import { asStored, bodyOf, formOf, type FormValues } from '../model/form';
 import { faultsOf, isReadable } from '../model/faults';
 import { setOffers, takeOffers } from '../model/kept-draft';
+import type { ShownRevision } from '../model/shown-revision';
 import { useUnit } from '../hooks/use-unit';
 import { paramsOf } from '../queries/use-revision';
 import { AnswerBar } from './answer-bar';
@@ -33,7 +34,7 @@ const NOT_SAVED = 'The draft has to be saved before it can rest on the newer bas
 
 interface Properties {
   /** The revision as it was fetched; the form begins from it. */
-  first: Revision;
+  first: ShownRevision;
 }
 
 /** Input of earlier visits that the server does not have. */
@@ -46,7 +47,7 @@ function offersOf(first: Revision, key: string) {
 }
 
 export function SpecificationEditor({ first }: Properties) {
-  const [revision, setRevision] = useState(first);
+  const [revision, setRevision] = useState<Revision>(first);
   const address = useMemo(
     () => ({ code: first.projectCode, number: first.number, label: first.label }),
     [first.projectCode, first.number, first.label],

@@ -5,6 +5,7 @@ import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
 import { useTitle } from '../../ui/use-title';
 import { SpecificationEditor } from '../components/specification-editor';
+import { isShown } from '../model/shown-revision';
 import { useRevision } from '../queries/use-revision';
 
 /** A specification in its newest revision: inputs, drawing, ledger of results, title block. */
@@ -23,7 +24,16 @@ export function SpecificationPage() {
         </EmptyState>
       }
     >
-      {(revision) => <SpecificationEditor key={revision.id} first={revision as Revision} />}
+      {(found) => {
+        const revision = found as Revision;
+        return isShown(revision) ? (
+          <SpecificationEditor key={revision.id} first={revision} />
+        ) : (
+          <EmptyState level={1} title={`${revision.number} ${revision.title}`}>
+            The figures of the author stay hidden from checkers until they have entered their own.
+          </EmptyState>
+        );
+      }}
     </QueryState>
   );
 }

@@ -1,5 +1,6 @@
-import type { Evaluation, Revision, RevisionNote, SpecificationInput, Sweep, WhatIf } from '@bellgap/common/api';
+import type { Evaluation, RevisionNote, SpecificationInput, Sweep, WhatIf } from '@bellgap/common/api';
 import { suspensionCase, discUnit } from '@bellgap/common/drawing/fixtures';
+import type { ShownRevision } from '../model/shown-revision';
 import { aDesignBasis, aPerson } from '../../testing/builders';
 
 export interface Answered {
@@ -14,7 +15,7 @@ export interface Asked {
   body: unknown;
 }
 
-export const aRevision = (given: Partial<Revision> = {}): Revision => ({
+export const aRevision = (given: Partial<ShownRevision> = {}): ShownRevision => ({
   id: 'revision-1',
   specificationId: 'specification-1',
   projectCode: 'KL221',
@@ -35,7 +36,18 @@ export const aRevision = (given: Partial<Revision> = {}): Revision => ({
   drafted: { name: 'Tamsin Orvelle', on: '2026-03-12' },
   checked: null,
   approved: null,
+  labels: ['A'],
+  derivedFrom: null,
+  submitted: null,
+  returned: null,
+  contentCode: null,
+  authors: ['Tamsin Orvelle'],
+  openRemarks: 0,
+  sheetId: null,
+  moves: [{ name: 'submit', allowed: true, why: null }],
+  figuresHidden: false,
   mayEdit: true,
+  editBarsSigning: false,
   lastSheet: null,
   ...given,
 });
@@ -117,7 +129,7 @@ export class FakeServer {
     if (path === '/evaluations/what-if') return { status: 200, body: this.whatIf };
     if (path === '/evaluations/sweep') return { status: 200, body: this.sweep };
     if (path.includes('/notes')) return this.answerNotes(method, path, body as Partial<RevisionNote>);
-    if (method === 'PUT') return this.refuseSave?.() ?? this.take(body as Partial<Revision>);
+    if (method === 'PUT') return this.refuseSave?.() ?? this.take(body as Partial<ShownRevision>);
     if (path.endsWith('/basis')) {
       this.revision = {
         ...this.revision,
@@ -140,7 +152,7 @@ export class FakeServer {
     return { status: 201, body: note };
   }
 
-  private take(body: Partial<Revision>): Answered {
+  private take(body: Partial<ShownRevision>): Answered {
     const { lockVersion } = this.revision;
     this.revision = { ...this.revision, ...body, lockVersion: lockVersion + 1, savedAt: '2026-03-12T14:02:31Z' };
     return { status: 200, body: this.revision };
