@@ -30,6 +30,7 @@ bench: node browser packages build
 	@node backend/bench/run.cjs
 
 shots: node browser packages build
+	@rm -rf shots
 	@SHOTS=all node_modules/.bin/jest --selectProjects browser --testPathPatterns frontend/e2e/pages
 
 clean: stop

@@ -41,7 +41,8 @@ export async function openContext(
     timezoneId: 'UTC',
     acceptDownloads: true,
   });
-  context.setDefaultTimeout(10_000);
+  // As with the tests' own time: enough for a busy machine.
+  context.setDefaultTimeout(30_000);
   return context;
 }
 

@@ -37,12 +37,6 @@ export async function sidewaysScroll(page: Page): Promise<string[]> {
 /** Waits until the page has fetched what it shows and painted it without skeletons. */
 export async function settle(page: Page): Promise<void> {
   await page.waitForLoadState('networkidle');
-  await page.waitForFunction(
-    () => !document.querySelector('.ant-skeleton, .ant-spin-spinning, [aria-busy="true"]'),
-    undefined,
-    {
-      timeout: 10_000,
-    },
-  );
+  await page.waitForFunction(() => !document.querySelector('.ant-skeleton, .ant-spin-spinning, [aria-busy="true"]'));
   await page.evaluate(() => document.fonts.ready.then(() => undefined));
 }
