@@ -15,6 +15,7 @@ import { idOf, useSchemaForm, type SchemaForm } from '../../ui/forms/use-schema-
 import { basisBody, basisValues, type BasisValues } from '../model/basis-values';
 import './basis-form.css';
 import { LevelChoice } from './level-choice';
+import { WorksheetPart } from './worksheet';
 
 type Form = SchemaForm<BasisValues>;
 
@@ -124,6 +125,7 @@ export function BasisForm({ code, current, saved, cancel }: BasisFormProps) {
     >
       <UnsavedGuard unsaved={form.formik.dirty && !form.formik.isSubmitting} />
       <BasisFields form={form} />
+      <WorksheetPart form={form} />
       <div className="form-columns basis-words">
         <TextField form={form} path="number" label="Number" mono />
         <div className="form-wide">

@@ -3,8 +3,16 @@ import { Moment } from '../../ui/moment';
 import { Sheet } from '../../ui/page/sheet';
 import { basisChanges } from '../model/basis-rows';
 import './basis-history.css';
+import { StoredWorksheet } from './worksheet';
 
-function Entry({ basis, before }: { basis: DesignBasis; before: DesignBasis | undefined }) {
+interface EntryProps {
+  basis: DesignBasis;
+  before: DesignBasis | undefined;
+  /** The one in force shows its worksheet above. */
+  isInForce: boolean;
+}
+
+function Entry({ basis, before, isInForce }: EntryProps) {
   const changes = before ? basisChanges(before, basis) : [];
   return (
     <li>
@@ -26,6 +34,7 @@ function Entry({ basis, before }: { basis: DesignBasis; before: DesignBasis | un
         </ul>
       )}
       {!before && <p className="soft">The first revision</p>}
+      {!isInForce && basis.worksheet && <StoredWorksheet worksheet={basis.worksheet} />}
     </li>
   );
 }
@@ -37,7 +46,7 @@ export function BasisHistory({ current, earlier }: { current: DesignBasis; earli
     <Sheet title="Revisions">
       <ol className="basis-history">
         {all.map((basis, index) => (
-          <Entry key={basis.id} basis={basis} before={all[index + 1]} />
+          <Entry key={basis.id} basis={basis} before={all[index + 1]} isInForce={index === 0} />
         ))}
       </ol>
     </Sheet>

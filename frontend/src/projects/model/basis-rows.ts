@@ -1,5 +1,6 @@
 import type { DesignBasis } from '@bellgap/common/api';
 import { CHOICE_LABELS, fieldOf, type FieldPath } from '@bellgap/common/schemas';
+import { worksheetRows } from './worksheet-groups';
 
 export interface BasisRow {
   label: string;
@@ -58,11 +59,33 @@ export function basisRows(basis: DesignBasis): BasisRow[] {
   ];
 }
 
-/** What a revision changed over the one before it. */
-export function basisChanges(before: DesignBasis, after: DesignBasis): { label: string; from: string; to: string }[] {
-  const earlier = basisRows(before);
-  return basisRows(after).flatMap(({ label, text }, row) => {
+interface BasisChange {
+  label: string;
+  from: string;
+  to: string;
+}
+
+function changesOf(earlier: readonly BasisRow[], later: readonly BasisRow[]): BasisChange[] {
+  return later.flatMap(({ label, text }, row) => {
     const from = earlier[row]?.text ?? null;
     return from === text ? [] : [{ label, from: from ?? 'not set', to: text ?? 'not set' }];
   });
+}
+
+function worksheetChanges(before: DesignBasis['worksheet'], after: DesignBasis['worksheet']): BasisChange[] {
+  if (!before && !after) return [];
+  if (before && after) {
+    const rowsOf = (worksheet: typeof before) =>
+      worksheetRows(worksheet).flatMap(({ title, rows }) =>
+        rows.map(({ label, text }) => ({ label: `Worksheet, ${title.toLowerCase()}: ${label.toLowerCase()}`, text })),
+      );
+    return changesOf(rowsOf(before), rowsOf(after));
+  }
+  const words = (worksheet: DesignBasis['worksheet']) => (worksheet ? 'kept' : 'none');
+  return [{ label: 'Insulation level worksheet', from: words(before), to: words(after) }];
+}
+
+/** What a revision changed over the one before it. */
+export function basisChanges(before: DesignBasis, after: DesignBasis): BasisChange[] {
+  return [...changesOf(basisRows(before), basisRows(after)), ...worksheetChanges(before.worksheet, after.worksheet)];
 }

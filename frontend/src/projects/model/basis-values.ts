@@ -1,5 +1,6 @@
 import type { DesignBasis } from '@bellgap/common/api';
 import { levelOf, type Level } from './levels';
+import { worksheetBody, worksheetValues, type WorksheetValues } from './worksheet-values';
 
 /** A figure as the form holds it: read, empty, or text that could not be read. */
 type Typed = number | string | null;
@@ -25,6 +26,7 @@ export interface BasisValues {
     faultDurationS: Typed;
   };
   rules: { unitsOutForLiveWork: Typed; maximumStringKinds: Typed };
+  worksheet: WorksheetValues;
   note: string;
 }
 
@@ -55,12 +57,13 @@ export function basisValues(current: DesignBasis | null, number: string): BasisV
       unitsOutForLiveWork: current?.rules.unitsOutForLiveWork ?? null,
       maximumStringKinds: current?.rules.maximumStringKinds ?? null,
     },
+    worksheet: worksheetValues(current?.worksheet),
     note: '',
   };
 }
 
 /** The body of the request: the level as the API has it, no overvoltages where none is known. */
-export function basisBody({ number, basis, system, rules, note }: BasisValues): unknown {
+export function basisBody({ number, basis, system, rules, worksheet, note }: BasisValues): unknown {
   const { level, levelHoldsToM, overvoltages, frequencyHz, ...rest } = system;
   const studied = Object.values(overvoltages).some((figure) => figure !== null);
   return {
@@ -73,6 +76,7 @@ export function basisBody({ number, basis, system, rules, note }: BasisValues): 
       overvoltages: studied ? overvoltages : null,
     },
     rules,
+    worksheet: worksheetBody(worksheet, system.highestVoltageKv),
     note,
   };
 }

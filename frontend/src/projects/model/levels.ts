@@ -30,3 +30,12 @@ export function rowsFor(rows: readonly InsulationLevelRow[], highestVoltageKv: n
   const nearestKv = Math.min(...fitting);
   return rows.filter((row) => row.highestVoltageKv === nearestKv);
 }
+
+/** A level in words, with the basis of every voltage. */
+export function levelText({ lightningKv, switchingKv, powerFrequencyKv }: Level): string {
+  const words: string[] = [];
+  if (powerFrequencyKv !== null) words.push(`power frequency ${powerFrequencyKv} kV rms`);
+  if (switchingKv !== null) words.push(`switching ${switchingKv} kV peak to earth`);
+  if (lightningKv !== null) words.push(`lightning ${lightningKv} kV peak`);
+  return words.join(', ');
+}

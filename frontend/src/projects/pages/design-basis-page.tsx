@@ -14,15 +14,19 @@ import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
 import { BasisForm } from '../components/basis-form';
 import { BasisHistory } from '../components/basis-history';
+import { StoredWorksheet } from '../components/worksheet';
 import { basisRows } from '../model/basis-rows';
 
 function BasisInForce({ basis }: { basis: DesignBasis }) {
   return (
-    <div className="basis-in-force">
-      <Ledger
-        rows={basisRows(basis).map(({ label, text }) => [label, text ?? <span className="soft">not set</span>])}
-      />
-    </div>
+    <>
+      <div className="basis-in-force">
+        <Ledger
+          rows={basisRows(basis).map(({ label, text }) => [label, text ?? <span className="soft">not set</span>])}
+        />
+      </div>
+      {basis.worksheet && <StoredWorksheet worksheet={basis.worksheet} />}
+    </>
   );
 }
 

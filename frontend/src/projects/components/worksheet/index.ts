@@ -1,0 +1,2 @@
+export { StoredWorksheet } from './stored-worksheet';
+export { WorksheetPart } from './worksheet-part';
