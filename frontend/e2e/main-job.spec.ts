@@ -6,7 +6,7 @@ import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { DEMO_PASSWORD } from '@bellgap/database';
 import { startProduct, type ProductProcess } from '../../backend/test/support/product-process';
 import { Complaints, DESKTOP, launchBrowser, openContext } from './support/browser';
-import { settle } from './support/checks';
+import { accessibilityFaults, settle, sidewaysScroll } from './support/checks';
 import { choose, fill, inputs, search, untilAnswered, untilSaved } from './support/form';
 
 const NUMBER = 'INS-221-901';
@@ -133,6 +133,26 @@ describe('specifying a string', () => {
     await fill(page, /^Altitude/, '900');
     await untilAnswered(page);
     await untilSaved(page);
+  }, 60_000);
+
+  it('keeps a case of what if as a note with its numbers, and takes it away again', async () => {
+    await page.getByRole('button', { name: 'What if' }).click();
+    const drawer = page.getByRole('dialog', { name: 'What if' });
+    await drawer
+      .getByRole('button', { name: /^Keep as note/ })
+      .first()
+      .click();
+    await drawer.getByLabel('Why it is kept, if you like').fill('Asked for by the line owner.');
+    await drawer.getByRole('button', { name: 'Keep', exact: true }).click();
+    const notes = drawer.getByRole('region', { name: 'Notes of this revision' });
+    await notes.getByText('Asked for by the line owner.').waitFor();
+    await settle(page);
+    expect(await sidewaysScroll(page)).toEqual([]);
+    expect(await accessibilityFaults(page)).toEqual([]);
+    await notes.getByRole('button', { name: /^Delete the note/ }).click();
+    await notes.getByText('None yet.', { exact: false }).waitFor();
+    await drawer.getByRole('button', { name: 'Close' }).click();
+    await drawer.waitFor({ state: 'hidden' });
   }, 60_000);
 
   it('hands over the sheet as PDF with the same figures', async () => {
