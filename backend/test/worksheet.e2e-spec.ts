@@ -1,4 +1,4 @@
-import { contract } from '@bellgap/common/api';
+import { contract, type Evaluation } from '@bellgap/common/api';
 import { aWorksheet } from '../../common/src/engine/testing/worksheets';
 import { makeLine, SYSTEM_220 } from './support/line-project';
 import { TestApp } from './support/test-app';
@@ -51,5 +51,30 @@ describe('the insulation level worksheet', () => {
     const odd = { ...body, worksheet: { ...aWorksheet(), altitudeM: 'high' } };
     const refused = await engineer.call(saveDesignBasis, { params, version: 2, body: odd });
     expect(refused.problem.errors.map(({ path }) => path)).toEqual(['worksheet.altitudeM']);
+  });
+
+  it('carries the altitude of the level on into a specification that inherits the basis', async () => {
+    const { number, basis, rules } = await makeLine(engineer, 'WORK2');
+    const { answer: found } = await engineer.call(insulationLevelWorksheet, { body: aWorksheet({ altitudeM: 2310 }) });
+    const { lightningKv, switchingKv, powerFrequencyKv, switchingPhaseRatio } = found.proposedLevel!;
+    const { levelHoldsToM } = found;
+    const insulationLevel = { lightningKv, switchingKv, powerFrequencyKv, switchingPhaseRatio, levelHoldsToM };
+    const worksheet = aWorksheet({ altitudeM: 2310 });
+    const body = { number, basis, rules, system: { ...SYSTEM_220, insulationLevel }, note: '', worksheet };
+    await engineer.call(saveDesignBasis, { params: { code: 'WORK2' }, version: 1, body });
+
+    const { answer: draft } = await engineer.call(contract.createSpecification, {
+      params: { code: 'WORK2' },
+      body: { number: 'INS-WORK-001', title: 'Strings at 2310 m', kind: 'line' },
+    });
+    expect(draft.basis?.worksheet).toEqual(worksheet);
+    expect(draft.input.system?.insulationLevel).toMatchObject({ lightningKv: 1050, levelHoldsToM: 2310 });
+    const at = async (altitudeM: number) => {
+      const input = { ...draft.input, site: { altitudeM, pollution: null } } as never;
+      const { answer } = await engineer.call(contract.evaluate, { body: { input, trace: false } });
+      return (answer as Evaluation).clearances!.rows.find(({ method }) => method === 'iec-table')!;
+    };
+    expect(await at(2310)).toMatchObject({ h0M: 2310, altitudeFactor: 1, valueMm: 2100 });
+    expect((await at(2400)).altitudeFactor).toBeGreaterThan(1);
   });
 });

@@ -4,6 +4,7 @@ import { useCallback, useMemo } from 'react';
 import type { Choice } from '../../ui/fields';
 import { useForm } from '../hooks/form-context';
 import { valueAt } from '../model/form';
+import { levelHoldsFrom } from '../model/inheritance';
 import { levelChoices, levelFigures, levelKey, levelsOf, levelWords } from '../model/levels';
 import { unitWords } from '../model/words';
 import { useCatalogue, useInsulationLevels } from '../queries/use-catalogue';
@@ -42,7 +43,7 @@ export function ParallelStringsAt() {
 
 /** One row of the table for this highest voltage, chosen as a whole. */
 export function LevelAt() {
-  const { values, setFigure } = useForm();
+  const { values, basis: pinned, setFigure } = useForm();
   const basis = valueAt<'iec' | 'north-american'>(values, 'basis');
   const highestVoltageKv = valueAt<number>(values, 'system.highestVoltageKv');
   const level = valueAt<InsulationLevelInput>(values, 'system.insulationLevel');
@@ -79,7 +80,7 @@ export function LevelAt() {
       {level !== null && (
         <NumberAt
           path="system.insulationLevel.levelHoldsToM"
-          note={holdsToM === null || holdsToM === undefined ? 'left empty: counted as 1000 m' : undefined}
+          note={holdsToM == null ? 'left empty: counted as 1000 m' : levelHoldsFrom(values.input, pinned)}
         />
       )}
     </>

@@ -3,7 +3,7 @@ import type { InheritedPath } from '@bellgap/common/schemas';
 import { INHERITED_PATHS } from '@bellgap/common/schemas';
 import { getIn } from 'formik';
 
-export type PinnedBasis = Pick<DesignBasis, 'number' | 'revision' | 'basis' | 'system'>;
+export type PinnedBasis = Pick<DesignBasis, 'number' | 'revision' | 'basis' | 'system' | 'worksheet'>;
 
 /** Equal as figures of a sheet: absent and null both say "not known". */
 export function sameFigure(one: unknown, other: unknown): boolean {
@@ -35,4 +35,13 @@ export function basisValue(path: string, basis: PinnedBasis): unknown {
 
 export function differsFromBasis(path: string, input: object, basis: PinnedBasis): boolean {
   return !sameFigure(getIn(input, path), basisValue(path, basis));
+}
+
+/** Where the altitude up to which the level holds comes from; null where the basis does not say it. */
+export function levelHoldsFrom(input: object, basis: PinnedBasis | null): string | null {
+  const path = 'system.insulationLevel.levelHoldsToM';
+  if (!basis || basisValue(path, basis) === null || differsFromBasis(path, input, basis)) return null;
+  const where = `from ${basis.number} revision ${basis.revision}`;
+  const workedOutFor = (basis.worksheet?.altitudeM ?? null) === basisValue(path, basis);
+  return workedOutFor ? `${where}, whose worksheet is worked out for this altitude` : where;
 }
