@@ -16,6 +16,7 @@ import { ReferenceModule } from './reference/reference.module';
 import { RevisionNotesModule } from './revision-notes/revision-notes.module';
 import { SheetsModule } from './sheets/sheets.module';
 import { SpecificationsModule } from './specifications/specifications.module';
+import { TrailModule } from './trail/trail.module';
 import { UsersModule } from './users/users.module';
 
 @Module({})
@@ -39,6 +40,7 @@ export class AppModule {
         SpecificationsModule,
         RevisionNotesModule,
         SheetsModule,
+        TrailModule,
         DeskModule,
         HealthModule,
         OpenApiModule,

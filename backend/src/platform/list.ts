@@ -95,7 +95,7 @@ function applyCursor(
   });
 }
 
-function readLimit(text: string | undefined): number {
+export function readLimit(text: string | undefined): number {
   if (text === undefined) return LIMIT_DEFAULT;
   const limit = Number(text);
   if (!(limit >= 1 && limit <= LIMIT_AT_MOST)) throw invalidAt('limit', `limit: a number from 1 to ${LIMIT_AT_MOST}`);

@@ -1,4 +1,5 @@
-import { canonicalJson, contentCodeOf, sha256Of } from './content-code';
+import { canonicalJson, sha256Of } from '../platform/canonical-json';
+import { contentCodeOf } from './content-code';
 
 describe('content code', () => {
   it('does not depend on the order of keys', () => {

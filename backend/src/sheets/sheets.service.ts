@@ -1,12 +1,13 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { AnswerOf, contract } from '@bellgap/common/api';
 import { AuditService } from '../audit/audit.service';
+import { sha256Of } from '../platform/canonical-json';
 import { Clock } from '../platform/clock';
 import { notFound } from '../platform/domain-error';
 import { KNEX, type Database } from '../platform/knex';
 import type { SignedIn } from '../platform/person';
 import { SpecificationsService, type RevisionAddress } from '../specifications/specifications.service';
-import { contentCodeOf, sha256Of } from './content-code';
+import { contentCodeOf } from './content-code';
 import { renderSheet } from './document';
 import { sheetContentOf } from './sheet-content';
 import { SheetsRepository } from './sheets.repository';

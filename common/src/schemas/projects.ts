@@ -13,7 +13,7 @@ export const projectCodeSchema = requiredText('Code', 20).matches(/^[A-Z0-9][A-Z
   excludeEmptyString: true,
 });
 
-function isTimeZone(zone: string | undefined): boolean {
+export function isTimeZone(zone: string | undefined): boolean {
   if (!zone) return true;
   // Not every run time reads a bare offset; a name means the same everywhere.
   if (/^[+-]/.test(zone)) return false;
