@@ -1,13 +1,28 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import { createServer } from 'node:net';
 import path from 'node:path';
-import { createTestDatabase, seedDemo } from '@bellgap/database';
+import { createTestDatabase, seedDemo, type TestDatabase } from '@bellgap/database';
 
+/** Enough for a machine that does much else. */
+const START_WITHIN_MS = 60_000;
 const ROOT = path.join(__dirname, '../../..');
 
-/** The product as it is shipped, from its build, in a process of its own over a database of its own with demo data. */
+export interface ProductOptions {
+  /** Without demonstration there are the reference rows only. */
+  demo?: boolean;
+  env?: NodeJS.ProcessEnv;
+}
+
+/** The product as it is shipped, from its build, in a process of its own over a database of its own. */
 export interface ProductProcess {
   url: string;
+  database: TestDatabase;
+  /** Ends the process at once, as a power cut would. */
+  kill(): Promise<void>;
+  /** Asks it to end, as whoever runs it would. */
+  end(): Promise<void>;
+  /** Starts it again over the same database. */
+  start(): Promise<void>;
   stop(): Promise<void>;
 }
 
@@ -36,7 +51,8 @@ function run(script: string, env: NodeJS.ProcessEnv): Promise<void> {
 }
 
 async function untilHealthy(url: string, child: ChildProcess, said: string[]): Promise<void> {
-  for (let attempt = 0; attempt < 200; attempt += 1) {
+  const last = Date.now() + START_WITHIN_MS;
+  while (Date.now() < last) {
     if (child.exitCode !== null) break;
     const answer = await fetch(`${url}/api/health`).catch(() => null);
     if (answer?.ok) return;
@@ -46,10 +62,28 @@ async function untilHealthy(url: string, child: ChildProcess, said: string[]): P
   throw new Error(`The product did not answer at ${url}:\n${said.join('')}`);
 }
 
+async function launch(url: string, env: NodeJS.ProcessEnv): Promise<ChildProcess> {
+  const child = spawn(process.execPath, [path.join(ROOT, 'backend/dist/main.js')], {
+    env,
+    stdio: ['ignore', 'pipe', 'pipe'],
+  });
+  const said: string[] = [];
+  for (const stream of [child.stdout, child.stderr]) stream?.on('data', (chunk: Buffer) => said.push(chunk.toString()));
+  await untilHealthy(url, child, said);
+  return child;
+}
+
+async function end(child: ChildProcess, signal: 'SIGTERM' | 'SIGKILL'): Promise<void> {
+  if (child.exitCode !== null || child.signalCode !== null) return;
+  const ended = new Promise((resolve) => child.once('exit', resolve));
+  child.kill(signal);
+  await ended;
+}
+
 /** Needs the builds of backend and frontend, and the test cluster that the global set-up of jest starts. */
-export async function startProduct(): Promise<ProductProcess> {
+export async function startProduct({ demo = true, env: more = {} }: ProductOptions = {}): Promise<ProductProcess> {
   const database = await createTestDatabase();
-  await seedDemo(database.owner);
+  if (demo) await seedDemo(database.owner);
   const port = await freePort();
   const url = `http://127.0.0.1:${port}`;
   const env: NodeJS.ProcessEnv = {
@@ -60,21 +94,20 @@ export async function startProduct(): Promise<ProductProcess> {
     DATABASE_URL: database.url,
     SESSION_SECRET: 'a secret of this test run only, long enough to pass',
     PUBLIC_URL: url,
+    ...more,
   };
-  await run('backend/dist/demo/main.js', env);
-  const child = spawn(process.execPath, [path.join(ROOT, 'backend/dist/main.js')], {
-    env,
-    stdio: ['ignore', 'pipe', 'pipe'],
-  });
-  const said: string[] = [];
-  for (const stream of [child.stdout, child.stderr]) stream?.on('data', (chunk: Buffer) => said.push(chunk.toString()));
-  await untilHealthy(url, child, said);
+  if (demo) await run('backend/dist/demo/main.js', env);
+  let child = await launch(url, env);
   return {
     url,
+    database,
+    kill: () => end(child, 'SIGKILL'),
+    end: () => end(child, 'SIGTERM'),
+    start: async () => {
+      child = await launch(url, env);
+    },
     stop: async () => {
-      const ended = new Promise((resolve) => child.once('exit', resolve));
-      child.kill('SIGTERM');
-      await ended;
+      await end(child, 'SIGTERM');
       await database.close();
     },
   };

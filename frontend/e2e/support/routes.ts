@@ -54,6 +54,8 @@ export const SIGNED_IN_STOPS: readonly Stop[] = [
 export const SIGNED_OUT_STOPS: readonly Stop[] = [
   { name: 'sign-in', route: 'signIn', path: paths.signIn.to() },
   { name: 'invitation', route: 'invitation', path: `${paths.invitation.to()}#not-a-real-token` },
+  { name: 'reset-request', route: 'reset', path: paths.reset.to() },
+  { name: 'reset', route: 'reset', path: `${paths.reset.to()}#not-a-real-token` },
 ];
 
 /** A demo person for each role. */

@@ -25,6 +25,7 @@ export const paths = {
     to: (back?: string) => (back && back !== '/' ? `/sign-in?back=${encodeURIComponent(back)}` : '/sign-in'),
   },
   invitation: { pattern: '/invitation', to: () => '/invitation' },
+  reset: { pattern: '/reset', to: () => '/reset' },
 } as const;
 
 /** An address inside this product to go back to; anything else leads to the desk. */

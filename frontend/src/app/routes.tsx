@@ -19,6 +19,10 @@ export const routes: RouteObject[] = [
         lazy: async () => ({ Component: (await import('../account/pages/invitation-page')).InvitationPage }),
       },
       {
+        path: paths.reset.pattern,
+        lazy: async () => ({ Component: (await import('../account/pages/reset-page')).ResetPage }),
+      },
+      {
         element: <Layout />,
         children: [
           {

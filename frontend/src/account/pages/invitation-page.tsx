@@ -8,12 +8,8 @@ import { PasswordField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 import { FrontPage } from '../../ui/page/front-page';
+import { readLinkToken } from '../model/link-token';
 import { PASSWORD_HINT } from '../model/password-hint';
-
-/** The token stands behind the hash, so that it reaches no server's log. */
-function readToken(): string {
-  return decodeURIComponent(window.location.hash.replace(/^#/, ''));
-}
 
 function InvitationForm({ token, accepted }: { token: string; accepted(): void }) {
   const form = useSchemaForm({
@@ -39,7 +35,7 @@ function InvitationForm({ token, accepted }: { token: string; accepted(): void }
 }
 
 export function InvitationPage() {
-  const [token] = useState(readToken);
+  const [token] = useState(readLinkToken);
   const [accepted, setAccepted] = useState(false);
   if (accepted) {
     return (

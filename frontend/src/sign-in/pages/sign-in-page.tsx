@@ -1,7 +1,7 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { Navigate, useNavigate, useSearchParams } from 'react-router-dom';
+import { Link, Navigate, useNavigate, useSearchParams } from 'react-router-dom';
 import { sessionQuery, useSession } from '../../api/session';
-import { safeBack } from '../../app/paths';
+import { paths, safeBack } from '../../app/paths';
 import { FrontPage } from '../../ui/page/front-page';
 import { SignInForm } from '../components/sign-in-form';
 
@@ -23,7 +23,7 @@ export function SignInPage() {
         }}
       />
       <p className="front-page-note">
-        No account yet, or the password is lost? Ask your administrator for an invitation link.
+        <Link to={paths.reset.to()}>Forgotten password?</Link> No account yet? Ask your administrator for an invitation.
       </p>
     </FrontPage>
   );
