@@ -14,6 +14,7 @@ import { PasswordResetsService } from './password-resets.service';
 import { Passwords } from './passwords';
 import { SessionsRepository } from './sessions.repository';
 import { SessionsService } from './sessions.service';
+import { SignaturesService } from './signatures.service';
 import { ThrottleService } from './throttle.service';
 
 @Module({
@@ -38,9 +39,10 @@ import { ThrottleService } from './throttle.service';
     Passwords,
     SessionsRepository,
     SessionsService,
+    SignaturesService,
     ThrottleService,
     { provide: APP_GUARD, useClass: AccessGuard },
   ],
-  exports: [SessionsService],
+  exports: [SessionsService, SignaturesService],
 })
 export class AuthModule {}

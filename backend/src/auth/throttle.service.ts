@@ -7,8 +7,8 @@ import { networkOf } from './client';
 
 export const THROTTLE = { windowS: 15 * 60, perAccountAndAddress: 10, perAddress: 50 } as const;
 
-/** What is counted for itself: asking for a new password uses up no tries at signing in. */
-export type ThrottledAct = 'sign-in' | 'password-reset';
+/** What is counted for itself: asking for a new password, or signing a sheet, uses up no tries at signing in. */
+export type ThrottledAct = 'sign-in' | 'password-reset' | 'signature';
 
 export interface Attempt {
   id: number;
