@@ -256,6 +256,8 @@ export const issuedSheetAnswer = registerRowAnswer
       standingReason: nullableText(),
       successor: yup.object({ id: words(), label: words() }).noUnknown().nullable().defined().default(undefined),
       concessionList: listed(concessionAnswer.required()),
+      /** What has come up since it was issued, such as a pollution class that is due to be measured again. */
+      cautions: listed(matterAnswer.required()),
       /** Every issue of the same specification, newest first. */
       issues: listed(
         yup
