@@ -1,5 +1,5 @@
 import type { ClearanceRow, Evaluation } from '@bellgap/common/api';
-import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
 import { Figure } from '../../ui/figure';
 import { SourceWords, TraceArea } from '../../ui/trace';
 import { useLit } from '../hooks/highlight';
@@ -39,6 +39,7 @@ export function ClearanceBlocks({ evaluation }: { evaluation: Evaluation }) {
           rows={rows.filter((row) => row.distance === distance)}
           headlineMm={headlineOf(evaluation, distance)}
           why={whyNot(evaluation, ...missing)}
+          besideNote={distance === 'section' ? null : theoreticalNote(evaluation)}
         />
       ))}
       <SafetyBlock evaluation={evaluation} />
@@ -52,14 +53,24 @@ function headlineOf({ clearances }: Evaluation, distance: ClearanceRow['distance
   return null;
 }
 
+/** The theoretical method stands beside the others only where its two choices are made. */
+function theoreticalNote({ clearances }: Evaluation): string | null {
+  if (!clearances || clearances.method === 'en-theoretical') return null;
+  if (clearances.rows.some(({ method }) => method === 'en-theoretical')) return null;
+  const choices = ['clearance.enGap', 'clearance.fastFrontFrom'].map((path) => `“${fieldOf(path)?.label}”`);
+  const { 'en-theoretical': name } = CHOICE_LABELS.clearanceMethod;
+  return `${name}: no row beside, because ${choices.join(' and ')} are chosen only with that method.`;
+}
+
 interface Properties {
   title: string;
   rows: ClearanceRow[];
   headlineMm: number | null;
   why: string | undefined;
+  besideNote: string | null;
 }
 
-function ClearanceBlock({ title, rows, headlineMm, why }: Properties) {
+function ClearanceBlock({ title, rows, headlineMm, why, besideNote }: Properties) {
   const aside =
     headlineMm === null ? undefined : (
       <>
@@ -86,6 +97,7 @@ function ClearanceBlock({ title, rows, headlineMm, why }: Properties) {
               <Row key={`${row.method} ${row.stress} ${row.shape} ${index}`} row={row} />
             ))}
           </table>
+          {besideNote && <p className="zone-note">{besideNote}</p>}
         </TraceArea>
       )}
     </LedgerBlock>

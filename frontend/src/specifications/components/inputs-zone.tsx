@@ -58,6 +58,8 @@ function SystemGroup() {
       <LevelAt />
       <NumberAt path="system.overvoltages.slowFrontPhaseToEarthKvPeak" />
       <NumberAt path="system.overvoltages.slowFrontPhaseToPhaseKvPeak" />
+      <NumberAt path="system.faultCurrentKa" />
+      <NumberAt path="system.faultDurationS" />
     </>
   );
 }

@@ -1,6 +1,7 @@
 import { render, screen, within } from '@testing-library/react';
 import { anEvaluation } from '../testing/fake-server';
 import { BridgeBlock } from './bridge-block';
+import { ClearanceBlocks } from './clearance-blocks';
 import { MechanicalBlock } from './mechanical-block';
 import { SafetyBlock } from './safety-block';
 import { VoltageBlock } from './voltage-block';
@@ -133,5 +134,24 @@ describe('distances for people', () => {
   it('say that they are not covered where no source is chosen', () => {
     render(<SafetyBlock evaluation={anEvaluation(17)} />);
     expect(screen.getByText(/not covered by this sheet: the local rule/)).toBeInTheDocument();
+  });
+});
+
+describe('rows of the other clearance methods', () => {
+  const rowsOf = (method: 'iec-table' | 'en-theoretical') => {
+    const { clearances } = anEvaluation(17);
+    const [row] = clearances!.rows;
+    return anEvaluation(17, { clearances: { ...clearances!, method: 'iec-table', rows: [{ ...row!, method }] } });
+  };
+
+  it('say why the theoretical method has none, and nothing where it has', () => {
+    const { rerender } = render(<ClearanceBlocks evaluation={rowsOf('iec-table')} />);
+    expect(
+      screen.getByText(
+        'EN 50341 theoretical: no row beside, because “Kind of gap” and “Fast-front voltage from” are chosen only with that method.',
+      ),
+    ).toBeInTheDocument();
+    rerender(<ClearanceBlocks evaluation={rowsOf('en-theoretical')} />);
+    expect(screen.queryByText(/no row beside/)).not.toBeInTheDocument();
   });
 });
