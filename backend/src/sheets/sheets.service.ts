@@ -12,6 +12,8 @@ import { renderSheet } from './document';
 import { sheetContentOf } from './sheet-content';
 import { SheetsRepository } from './sheets.repository';
 
+export { contentCodeOf };
+
 export type Sheet = AnswerOf<typeof contract.drawSheet>;
 
 export interface SheetFile {

@@ -18,6 +18,8 @@ import { SpecificationsListQuery } from './specifications.list-query';
 import { changesBetween, sameValue } from './values';
 
 export type { RevisionAddress, StoredRevision };
+export { changesBetween } from './values';
+export { figuresHidden, isAuthor, isChecker, maySee, moveRefusal } from './rights';
 
 const FIRST_LABEL = 'A';
 
@@ -55,8 +57,22 @@ export class SpecificationsService {
   }
 
   /** What is stored of a revision, for features that build on it; 404 to who may not see it. */
-  async stored(person: SignedIn, address: RevisionAddress): Promise<StoredRevision> {
-    return this.find(person, address);
+  async stored(
+    person: SignedIn,
+    address: RevisionAddress,
+    options?: { db: Database; forUpdate?: boolean },
+  ): Promise<StoredRevision> {
+    return this.find(person, address, options);
+  }
+
+  /** Every label that revisions of a specification have had. */
+  labelsOf(specificationId: string, db?: Database): Promise<string[]> {
+    return this.revisions.labelsOf(specificationId, db);
+  }
+
+  /** The label stays with the revision for ever; one that was given already is refused by the database. */
+  giveLabel(label: { specificationId: string; revisionId: string; label: string; at: Date }, db: Database) {
+    return this.revisions.giveLabel(label, db);
   }
 
   async get(person: SignedIn, address: RevisionAddress): Promise<Revision> {
@@ -164,7 +180,7 @@ export class SpecificationsService {
   private async find(
     person: SignedIn,
     address: RevisionAddress,
-    options?: { db: Database; forUpdate: boolean },
+    options?: { db: Database; forUpdate?: boolean },
   ): Promise<StoredRevision> {
     const stored = await this.revisions.find(address, options);
     if (stored && maySee(person, stored)) return stored;
