@@ -102,7 +102,7 @@ function compare({ code, words, value, limit, risk }: Check, unit: InsulatorUnit
     heading: `Limit of the ${limit.parameter}, ${limit.appliesTo}`,
     formula: `value ${sign} limit`,
     substitution: `${figureText(value)} ${sign} ${figure}`,
-    result: holds ? 'held' : 'passed',
+    result: holds ? 'held' : 'not held',
     unit: '',
     source,
   }));

@@ -125,6 +125,13 @@ describe(assessMechanical.name, () => {
       );
     });
 
+    it('has no legs to share among where one is lost', () => {
+      const broken = [aLoadCase({ kind: 'broken-string' })];
+      const [first] = answer({ string: V, mechanical: { cases: broken } }).mechanical.cases;
+      expect(first?.legs).toBeNull();
+      expect(first?.loadPerStringN).toBeCloseTo(Math.hypot(VERTICAL_N, HORIZONTAL_N), 9);
+    });
+
     // Equilibrium of a joint, the legs at 30 and 60 degrees from the vertical: horizontal and vertical parts add up.
     it('keeps the joint in balance where its legs differ', () => {
       const angles = { ...V, vAngleWindwardDeg: 60, vAngleLeewardDeg: 30 };
@@ -322,7 +329,9 @@ describe(assessMechanical.name, () => {
       const short = at(allowedKn - 0.1);
       expect(short.mechanical.cases[0]?.verdict).toBe('short');
       expect(short.codes).toContain('fail strength-short');
-      expect(short.cautions.find(({ code }) => code === 'strength-short')?.text).toContain('kN in bending');
+      expect(short.cautions.find(({ code }) => code === 'strength-short')?.text).toContain(
+        `kN in bending; "heavy" asks for ${(Math.ceil(allowedKn * 10 - 1e-9) / 10).toFixed(1)} kN`,
+      );
       expect([short.mechanical.classRequiredKn, short.mechanical.coupling]).toEqual([null, null]);
       expect(short.notAssessed).toContainEqual({
         part: 'mechanical.class',

@@ -7,7 +7,7 @@ import type {
   StringInput,
 } from '../model';
 import { isComposite } from '../insulator-string/unit';
-import { isKnown, reaches } from '../quantities';
+import { isKnown, reaches, roundUp } from '../quantities';
 import type { Situation } from '../situation';
 import type { Calculation } from '../trace';
 import { strengthClass } from './classes';
@@ -129,7 +129,7 @@ function cautionStrength(
     const mostKn = Math.max(...short.map((one) => one.strengthKn ?? 0));
     const cases = short.map(({ result }) => `"${result.name}"`).join(', ');
     const has = `${strengthOfUnit(unit)} kN${isPost(unit) ? ' in bending' : ''}`;
-    const text = `${unit.code} has ${has}; ${cases} ${short.length === 1 ? 'asks' : 'ask'} for ${mostKn.toFixed(1)} kN.`;
+    const text = `${unit.code} has ${has}; ${cases} ${short.length === 1 ? 'asks' : 'ask'} for ${roundUp(mostKn, 0.1).toFixed(1)} kN.`;
     calculation.caution('strength-short', 'fail', text, UNIT_FIELD);
   }
   if (strengthKn !== null && classKn === null && !isPost(unit)) {

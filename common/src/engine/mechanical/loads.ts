@@ -94,7 +94,7 @@ function share(
     return loads({ ...parts, loadPerStringN: wholeN, loadOneStringMissingN: missingN, slackLeg });
   }
   if (missingN === null) return { ...unknown('A set of one string has none to lose.'), ...parts };
-  return loads({ ...parts, loadPerStringN: missingN, loadOneStringMissingN: missingN, slackLeg });
+  return loads({ ...parts, legs: null, loadPerStringN: missingN, loadOneStringMissingN: missingN, slackLeg });
 }
 
 function tension(given: LoadCase, subconductorCount: number, calculation: Calculation): CaseLoads {

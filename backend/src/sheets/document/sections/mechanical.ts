@@ -67,10 +67,13 @@ export function mechanical({ input, evaluation }: SheetContent): Block[] {
       {
         kind: 'pairs',
         labelShare: 0.45,
-        rows: CASE_INPUTS.filter((name) => isPrinted(name, one[name])).map((name) => {
-          const path = `mechanical.cases.${name}`;
-          return { label: fieldOf(path)?.label ?? name, value: inputWords(path, one[name]) };
-        }),
+        rows: [
+          ...CASE_INPUTS.filter((name) => isPrinted(name, one[name])).map((name) => {
+            const path = `mechanical.cases.${name}`;
+            return { label: fieldOf(path)?.label ?? name, value: inputWords(path, one[name]) };
+          }),
+          ...answer.cases.slice(index, index + 1).flatMap(partRows),
+        ],
       },
     ]),
   ];
@@ -94,12 +97,14 @@ function inputRows(given: MechanicalInput): Pairs['rows'] {
 
 const kilo = (valueN: number | null): string => (valueN === null ? UNKNOWN : withUnit(up(valueN / 1000, 1), 'kN'));
 
-/** Legs of a V and the load along a post, which have no column of their own. */
-function partWords({ legs, post, slackLeg }: MechanicalCaseResult): string {
-  if (post) return `; along the post ${kilo(post.alongN)}`;
-  if (!legs) return slackLeg ? '; leeward leg slack' : '';
-  const leeward = slackLeg ? 'leeward leg slack' : `leeward leg ${kilo(legs.leewardN)}`;
-  return `; windward leg ${kilo(legs.windwardN)}, ${leeward}`;
+/** Legs of a V and the load along a post, which have no column in the table. */
+function partRows({ legs, post, slackLeg }: MechanicalCaseResult): Pairs['rows'] {
+  if (post) return [{ label: 'Along the posts, pressing or pulling', value: kilo(post.alongN) }];
+  if (!legs) return [];
+  return [
+    { label: 'Windward leg of the V', value: kilo(legs.windwardN) },
+    { label: 'Leeward leg of the V', value: slackLeg ? 'slack' : kilo(legs.leewardN) },
+  ];
 }
 
 function caseRow(one: MechanicalCaseResult, governs: boolean): Row {
@@ -107,7 +112,7 @@ function caseRow(one: MechanicalCaseResult, governs: boolean): Row {
   return {
     governs,
     cells: [
-      cell(`${one.name}, ${kind}${governs ? ', governs' : ''}${partWords(one)}`),
+      cell(`${one.name}, ${kind}${governs ? ', governs' : ''}${one.slackLeg ? '; leeward leg slack' : ''}`),
       figures(kilo(one.verticalN)),
       figures(kilo(one.horizontalN)),
       figures(kilo(one.loadPerStringN)),
