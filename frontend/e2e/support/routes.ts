@@ -48,6 +48,7 @@ export const SIGNED_IN_STOPS: readonly Stop[] = [
   { name: 'known-answers', route: 'knownAnswers', path: paths.knownAnswers.to() },
   { name: 'risk', route: 'risk', path: paths.risk.to() },
   { name: 'account', route: 'account', path: paths.account.to() },
+  { name: 'trail', route: 'trail', path: paths.trail.to(), roles: ENGINEERING },
   { name: 'administration', route: 'administration', path: paths.administration.to(), roles: ['administrator'] },
 ];
 

@@ -18,6 +18,12 @@ export const paths = {
   table: { pattern: '/tables/:key', to: (key: string) => `/tables/${encodeURIComponent(key)}` },
   knownAnswers: { pattern: '/known-answers', to: () => '/known-answers' },
   risk: { pattern: '/risk', to: () => '/risk' },
+  trail: {
+    pattern: '/trail',
+    /** Narrowed to one record, or to a specification with all its revisions. */
+    to: (only: { entity: string; entityId: string } | { project: string; specification: string } | null = null) =>
+      only ? `/trail?${new URLSearchParams(only).toString()}` : '/trail',
+  },
   administration: { pattern: '/administration', to: () => '/administration' },
   account: { pattern: '/account', to: () => '/account' },
   signIn: {

@@ -81,6 +81,10 @@ export const routes: RouteObject[] = [
                 lazy: async () => ({ Component: (await import('../risk/pages/risk-page')).RiskPage }),
               },
               {
+                path: paths.trail.pattern,
+                lazy: async () => ({ Component: (await import('../trail/pages/trail-page')).TrailPage }),
+              },
+              {
                 path: paths.administration.pattern,
                 lazy: async () => ({
                   Component: (await import('../administration/pages/administration-page')).AdministrationPage,

@@ -1,7 +1,7 @@
 import { ROLE_LABELS } from '@bellgap/common/api';
 import { Suspense, useEffect, useRef } from 'react';
 import { NavLink, Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
-import { holds, usePerson } from '../../api/session';
+import { holds, maySeeDrafts, usePerson } from '../../api/session';
 import { paths } from '../paths';
 import { SessionGate } from '../session/session-gate';
 import { useSignOut } from '../session/use-sign-out';
@@ -16,6 +16,7 @@ function Navigation() {
     { to: paths.projects.to(), label: 'Projects' },
     { to: paths.catalogue.to(), label: 'Catalogue' },
     { to: paths.tables.to(), label: 'Tables' },
+    ...(maySeeDrafts(person) ? [{ to: paths.trail.to(), label: 'Trail' }] : []),
     ...(holds(person, ['administrator']) ? [{ to: paths.administration.to(), label: 'Administration' }] : []),
   ];
   return (

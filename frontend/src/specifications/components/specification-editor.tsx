@@ -176,6 +176,9 @@ export function SpecificationEditor({ first }: Properties) {
                   revision <b>{revision.label}</b>
                 </span>
                 <span className="state-mark">{REVISION_STATE_LABELS[revision.state]}</span>
+                <Link to={paths.trail.to({ project: revision.projectCode, specification: revision.number })}>
+                  Trail
+                </Link>
                 <SavingWords saving={saving} readable={draft.readable} readOnly={readOnly} onRetry={leave} />
               </nav>
               <SheetActions

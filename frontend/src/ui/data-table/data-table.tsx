@@ -21,13 +21,15 @@ interface DataTableProps<Row> {
   searchLabel?: string;
   filters?: TableFilter[];
   loading?: boolean;
+  /** Address of the whole list as a file made by the server, where it may be too long for the browser; copies take the page. */
+  file?: string;
   /** Shown where there are no rows and nothing narrows the list. */
   empty?: ReactNode;
 }
 
 /** The one table: sorts, filters, pages by cursor, copies and exports; wide ones scroll inside themselves. */
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
-  const { label, name, columns, rows, rowKey, list, pages, searchLabel, filters = [], loading, empty } = props;
+  const { label, name, columns, rows, rowKey, list, pages, searchLabel, filters = [], loading, file, empty } = props;
   const shown = useMemo(
     () => (pages ? rows : sortRows(searchRows(rows, columns, list.search), columns, list.sort)),
     [pages, rows, columns, list.search, list.sort],
@@ -69,7 +71,12 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
         ) : (
           <span>{shown.length === 1 ? '1 row' : `${shown.length} rows`}</span>
         )}
-        <TableActs name={name} columns={columns} allRows={pages ? pages.allRows : () => shown} />
+        <TableActs
+          name={name}
+          columns={columns}
+          allRows={pages && file === undefined ? pages.allRows : () => shown}
+          file={file}
+        />
       </div>
     </div>
   );

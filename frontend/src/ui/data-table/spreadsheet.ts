@@ -1,3 +1,4 @@
+import { spreadsheetText } from '@bellgap/common/api';
 import type { Cell, Column } from './columns';
 
 /** A text that a spreadsheet would take for a formula is marked as text; figures stay figures. */
@@ -5,8 +6,7 @@ function asText(cell: Cell): string {
   if (cell === null || cell === undefined) return '';
   if (typeof cell === 'number') return String(cell);
   if (typeof cell === 'boolean') return cell ? 'yes' : 'no';
-  const isNumeric = cell.trim() !== '' && Number.isFinite(Number(cell));
-  return /^[=+\-@\t\r]/.test(cell) && !isNumeric ? `'${cell}` : cell;
+  return spreadsheetText(cell);
 }
 
 function tableOf<Row>(rows: readonly Row[], columns: readonly Column<Row>[]): string[][] {

@@ -10,10 +10,12 @@ interface TableActsProps<Row> {
   columns: readonly Column<Row>[];
   /** All rows of the list, also those on other pages. */
   allRows: () => Promise<readonly Row[]> | readonly Row[];
+  /** Address of a file with all rows, where the server makes it. */
+  file?: string | undefined;
 }
 
 /** Copy for a spreadsheet, and a file of the same. */
-export function TableActs<Row>({ name, columns, allRows }: TableActsProps<Row>) {
+export function TableActs<Row>({ name, columns, allRows, file }: TableActsProps<Row>) {
   const { message } = App.useApp();
   const [busy, setBusy] = useState<'copy' | 'csv' | null>(null);
 
@@ -44,13 +46,24 @@ export function TableActs<Row>({ name, columns, allRows }: TableActsProps<Row>) 
         size="small"
         onClick={() => void run('copy')}
         loading={busy === 'copy'}
-        title="Copy all rows for a spreadsheet"
+        title={file === undefined ? 'Copy all rows for a spreadsheet' : 'Copy the rows shown for a spreadsheet'}
       >
         Copy
       </Button>
-      <Button size="small" onClick={() => void run('csv')} loading={busy === 'csv'} title="Save all rows as a CSV file">
-        CSV
-      </Button>
+      {file === undefined ? (
+        <Button
+          size="small"
+          onClick={() => void run('csv')}
+          loading={busy === 'csv'}
+          title="Save all rows as a CSV file"
+        >
+          CSV
+        </Button>
+      ) : (
+        <Button size="small" href={file} download={`${name}.csv`} title="Save all rows as a CSV file">
+          CSV
+        </Button>
+      )}
     </div>
   );
 }
