@@ -8,6 +8,8 @@ program=$root/backend/dist/main.js
 run=$root/.run
 data=$root/.data
 log=$run/product.log
+mailbox=$root/backend/dist/mailbox/main.js
+mailbox_log=$run/mailbox.log
 cluster=$root/database/scripts/cluster.sh
 
 say() { printf '%s\n' "$*"; }
@@ -40,31 +42,36 @@ read_database() {
   set +a
 }
 
-running_pid() {
+# process_of FILE PROGRAM: the number in the file, where that process runs the program.
+process_of() {
   local pid
-  pid=$(cat "$run/pid" 2>/dev/null) || return 1
-  [ -n "$pid" ] && tr '\0' ' ' <"/proc/$pid/cmdline" 2>/dev/null | grep -qF -- "$program" && printf '%s' "$pid"
+  pid=$(cat "$1" 2>/dev/null) || return 1
+  [ -n "$pid" ] && tr '\0' ' ' <"/proc/$pid/cmdline" 2>/dev/null | grep -qF -- "$2" && printf '%s' "$pid"
 }
 
-stop_product() {
+stop_process() {
   local pid
-  pid=$(running_pid) || { rm -f "$run/pid"; return 0; }
-  kill "$pid" 2>/dev/null || fail "The product (process $pid) was started by $(stat -c %U "/proc/$pid"); stop it as that user."
+  pid=$(process_of "$1" "$2") || { rm -f "$1"; return 0; }
+  kill "$pid" 2>/dev/null || fail "Process $pid was started by $(stat -c %U "/proc/$pid"); stop it as that user."
   for _ in $(seq 100); do [ -d "/proc/$pid" ] || break; sleep 0.1; done
   [ ! -d "/proc/$pid" ] || kill -9 "$pid"
-  rm -f "$run/pid"
+  rm -f "$1"
 }
+
+running_pid() { process_of "$run/pid" "$program"; }
+stop_product() { stop_process "$run/pid" "$program"; }
+stop_mailbox() { stop_process "$run/mailbox-pid" "$mailbox"; }
 
 # What is built and how it is set: a running product of anything else is restarted.
 build_mark() {
   {
     find common/dist database/dist backend/dist -name '*.js' -not -name '*.spec.js' -print0 | sort -z | xargs -0 sha256sum
     sha256sum frontend/dist/index.html package-lock.json
-    env | grep -E '^(HOST|PUBLIC_URL|DEMO_ACCOUNTS|TRUST_PROXY|DATABASE_POOL_MAX|PASSWORD_COST|REQUEST_LOG|ROLE|SESSION_SECRET)=' | sort
+    env | grep -E '^(HOST|PUBLIC_URL|DEMO_ACCOUNTS|TRUST_PROXY|DATABASE_POOL_MAX|PASSWORD_COST|REQUEST_LOG|ROLE|SESSION_SECRET|SMTP_URL|MAIL_FROM)=' | sort
   } | sha256sum | cut -c1-16
 }
 
-# free_port FIRST LAST: the first port in the range on which HOST can be listened to; nothing where there is none.
+# free_port FIRST LAST [HOST]: the first port in the range that can be listened on; nothing where there is none.
 free_port() {
   node -e '
     const [host, first, last] = [process.argv[1], Number(process.argv[2]), Number(process.argv[3])];
@@ -78,7 +85,7 @@ free_port() {
       });
       server.listen(port, host, () => { console.log(port); server.close(); });
     };
-    attempt(first);' "$HOST" "$1" "$2"
+    attempt(first);' "${3:-$HOST}" "$1" "$2"
 }
 
 healthy() {
@@ -93,6 +100,39 @@ address_of() {
   local host=$HOST
   case "$host" in 0.0.0.0 | ::) host=127.0.0.1 ;; *:*) host="[$host]" ;; esac
   printf 'http://%s:%s' "$host" "$1"
+}
+
+# kept_port FILE FIRST LAST: the port of the last time where it is free, else the first of the range.
+kept_port() {
+  local port
+  port=$(cat "$1" 2>/dev/null) && port=$(free_port "$port" "$port" 127.0.0.1 2>/dev/null) && [ -n "$port" ] ||
+    port=$(free_port "$2" "$3" 127.0.0.1) || fail "No port from $2 to $3 is free on 127.0.0.1."
+  printf '%s\n' "$port" >"$1"
+}
+
+# Where no mail server is given and nobody else can reach the product, letters go to a post box on this computer.
+start_mailbox() {
+  local pid mark
+  if [ -n "${SMTP_URL:-}" ] || ! loopback; then stop_mailbox; return; fi
+  mark=$(cat backend/dist/mailbox/*.js | sha256sum)
+  if pid=$(process_of "$run/mailbox-pid" "$mailbox") && [ "$mark" != "$(cat "$run/mailbox-mark" 2>/dev/null)" ]; then
+    stop_mailbox
+    pid=
+  fi
+  if [ -z "$pid" ]; then
+    kept_port "$run/mailbox-smtp-port" 2525 2599
+    kept_port "$run/mailbox-port" 8025 8099
+    mkdir -p "$data/mail"
+    setsid node "$mailbox" --folder "$data/mail" --smtp-port "$(cat "$run/mailbox-smtp-port")" --port "$(cat "$run/mailbox-port")" \
+      </dev/null >"$mailbox_log" 2>&1 9>&- &
+    printf '%s\n' $! >"$run/mailbox-pid"
+    printf '%s\n' "$mark" >"$run/mailbox-mark"
+  fi
+  export SMTP_URL=smtp://127.0.0.1:$(cat "$run/mailbox-smtp-port")
+}
+
+mailbox_address() {
+  process_of "$run/mailbox-pid" "$mailbox" >/dev/null && printf 'http://127.0.0.1:%s' "$(cat "$run/mailbox-port")"
 }
 
 prepare_database() {
@@ -137,6 +177,7 @@ report() {
     say 'It listens beyond loopback, so the accounts of the demonstration are closed.'
   fi
   say ''
+  if mailbox_address >/dev/null; then say "Letters:  $(mailbox_address)"; fi
   say "Log:      $log"
   say "Database: $(cat "$data/location" 2>/dev/null || printf '%s' "$data/cluster"), port $(cat "$data/port")"
   say 'Stop:     make stop'
@@ -150,6 +191,9 @@ start() {
   if [ -n "$given" ] && ! { [[ $given =~ ^[0-9]{1,5}$ ]] && [ "$given" -ge 1 ] && [ "$given" -le 65535 ]; }; then
     fail "PORT=$given is no port: give a whole number from 1 to 65535."
   fi
+  [ "${ROLE:-both}" != worker ] || fail 'ROLE=worker serves no pages: make start needs ROLE=both or ROLE=web.'
+  [ -d "$data" ] || mkdir -p "$data"
+  start_mailbox
   mark=$(build_mark)
   if pid=$(running_pid); then old=$(cat "$run/port"); fi
   if [ -n "$given" ] && [ "$given" != "$old" ] && [ -z "$(free_port "$given" "$given")" ]; then
@@ -173,6 +217,7 @@ start() {
 
 stop() {
   stop_product
+  stop_mailbox
   "$cluster" down "$data" 9>&-
   say 'Stopped.'
 }
@@ -181,13 +226,15 @@ dev() {
   read_settings
   export HOST=127.0.0.1 NODE_ENV=development
   prepare_database
+  start_mailbox
   local port
   port=$(free_port 3100 3999)
-  trap 'kill $(jobs -p) 2>/dev/null || true' EXIT
+  trap 'kill $(jobs -p) 2>/dev/null || true; stop_mailbox' EXIT
   node_modules/.bin/tsc -b backend --watch --preserveWatchOutput 9>&- &
   PORT=$port node --watch-path=backend/dist --watch-path=common/dist --watch-path=database/dist "$program" 9>&- &
   flock -u 9
   say "The pages come from the address below, the API behind them from port $port. Accounts: password and names as after make start."
+  if mailbox_address >/dev/null; then say "Letters are read at $(mailbox_address)"; fi
   (cd frontend && BACKEND_URL=http://127.0.0.1:$port exec ../node_modules/.bin/vite) 9>&-
 }
 
