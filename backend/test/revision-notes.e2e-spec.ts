@@ -10,11 +10,13 @@ describe('notes on a revision', () => {
   let test: TestApp;
   let engineer: TestClient;
   let checker: TestClient;
+  let approver: TestClient;
 
   beforeAll(async () => {
     test = await TestApp.start();
     ({ client: engineer } = await test.signedIn({ name: 'Ode Varnholt', roles: ['engineer'] }));
     ({ client: checker } = await test.signedIn({ roles: ['checker'] }));
+    ({ client: approver } = await test.signedIn({ roles: ['approver'] }));
     await makeLine(engineer, AT.code);
     await begin(engineer, AT.code, AT.number);
   });
@@ -35,7 +37,8 @@ describe('notes on a revision', () => {
     expect(status).toBe(201);
     expect(answer).toMatchObject({ ...body, writtenBy: 'Ode Varnholt', own: true });
     expect(await notes(engineer)).toEqual([answer]);
-    expect(await notes(checker)).toEqual([{ ...answer, own: false }]);
+    expect(await notes(approver)).toEqual([{ ...answer, own: false }]);
+    expect((await checker.call(revisionNotes, { params: AT })).status).toBe(403);
     expect((await engineer.call(revision, { params: AT })).answer).toEqual(before);
     const [event] = await test.database.owner('audit_events').where({ entity: 'revision-note' });
     expect(event).toMatchObject({ action: 'revision-note.written', entity_id: answer.id });

@@ -22,7 +22,7 @@ export class RevisionNotesService {
   ) {}
 
   async list(person: SignedIn, address: RevisionAddress): Promise<RevisionNote[]> {
-    const revision = await this.specifications.stored(person, address);
+    const revision = await this.specifications.storedWithFigures(person, address);
     return (await this.notes.ofRevision(revision.id)).map((note) => noteAnswer(note, person));
   }
 

@@ -3,11 +3,11 @@ import type { AnswerOf, contract } from '@bellgap/common/api';
 import { AuditService } from '../audit/audit.service';
 import { sha256Of } from '../platform/canonical-json';
 import { Clock } from '../platform/clock';
+import { contentCodeOf } from '../platform/content-code';
 import { notFound } from '../platform/domain-error';
 import { KNEX, type Database } from '../platform/knex';
 import type { SignedIn } from '../platform/person';
 import { SpecificationsService, type RevisionAddress } from '../specifications/specifications.service';
-import { contentCodeOf } from './content-code';
 import { renderSheet } from './document';
 import { sheetContentOf } from './sheet-content';
 import { SheetsRepository } from './sheets.repository';
@@ -35,7 +35,7 @@ export class SheetsService {
   async draw(person: SignedIn, address: RevisionAddress): Promise<Sheet> {
     // Taken first: a save that comes while the sheet is being drawn is then younger than the sheet.
     const drawnAt = this.clock.now();
-    const revision = await this.specifications.stored(person, address);
+    const revision = await this.specifications.storedWithFigures(person, address);
     const { bytes, pages } = await renderSheet(sheetContentOf(revision));
     const sha256 = sha256Of(bytes);
     const { lastSheet } = revision;
@@ -80,7 +80,7 @@ export class SheetsService {
 
   /** The last sheet drawn, from store, held against its hash. */
   async file(person: SignedIn, address: RevisionAddress): Promise<SheetFile> {
-    const { number, label, state, lastSheet } = await this.specifications.stored(person, address);
+    const { number, label, state, lastSheet } = await this.specifications.storedWithFigures(person, address);
     const bytes = lastSheet && (await this.sheets.bytes(lastSheet.id));
     if (!lastSheet || !bytes) throw notFound('sheet; draw it first');
     if (sha256Of(bytes) !== lastSheet.sha256)

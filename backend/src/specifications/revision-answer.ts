@@ -1,7 +1,7 @@
 import type { Revision } from '@bellgap/common/api';
 import { mayWriteDrafts, type SignedIn } from '../platform/person';
 import { newerBasisRevision, type StoredRevision } from './revision-row';
-import { editBarsSigning, figuresHidden, movesOf } from './rights';
+import { OWN_COUNT_FIRST, editBarsSigning, figuresHidden, movesOf } from './rights';
 import { siteDay } from '../platform/site-day';
 
 /** A revision as a person sees it. */
@@ -40,7 +40,11 @@ export function revisionAnswer(stored: StoredRevision, person: Pick<SignedIn, 'i
       checkCategory: stored.submitted.checkCategory,
       note: stored.submitted.note,
     },
-    returned: stored.returned && { at: stored.returned.at.toISOString(), note: stored.returned.note },
+    returned: stored.returned && {
+      at: stored.returned.at.toISOString(),
+      // What another checker wrote may name figures.
+      note: hidden ? OWN_COUNT_FIRST : stored.returned.note,
+    },
     contentCode: stored.contentCode,
     authors: stored.authors.map(({ name }) => name),
     openRemarks: stored.openRemarks,

@@ -37,8 +37,8 @@ export interface StoredRevision {
   /** Letters and number that the revision has had, in order. */
   labels: string[];
   derivedFrom: { id: string; label: string } | null;
-  /** Who has changed the content, the first first. */
-  authors: { id: string; name: string }[];
+  /** Who has changed the content, the first first, with his last change: when, and in which field. */
+  authors: { id: string; name: string; at: Date; path: string }[];
   submitted: {
     id: string;
     by: string;
@@ -95,7 +95,7 @@ export interface RevisionRow {
   labels: string[];
   derived_from: string | null;
   derived_from_label: string;
-  authors: { id: string; name: string }[];
+  authors: { id: string; name: string; at: string; path: string }[];
   submission: {
     id: string;
     by: string;
@@ -196,8 +196,11 @@ function workflowColumns(db: Knex): Knex.Raw[] {
   return [
     `array(select l.label from revision_labels as l where l.revision_id = r.id order by l.given_at, l.label) as labels`,
     `(select parent.label from revisions as parent where parent.id = r.derived_from) as derived_from_label`,
-    `(select coalesce(json_agg(json_build_object('id', u.id, 'name', u.name) order by c.first), '[]')
-      from (select changed_by, min(id) as first from revision_changes where revision_id = r.id group by changed_by) as c
+    `(select coalesce(json_agg(json_build_object('id', u.id, 'name', u.name, 'at', c.at, 'path', c.path)
+        order by c.first), '[]')
+      from (select distinct on (changed_by) changed_by, at, paths[1] as path,
+          min(id) over (partition by changed_by) as first
+        from revision_changes where revision_id = r.id order by changed_by, id desc) as c
       join users as u on u.id = c.changed_by) as authors`,
     `(select json_build_object('id', m.id, 'by', u.name, 'by_id', m.submitted_by, 'at', m.submitted_at,
         'label', m.label, 'due_on', m.due_on, 'check_category', m.check_category, 'note', m.note, 'own_figures_by',
@@ -249,7 +252,7 @@ export function toStoredRevision(row: RevisionRow): StoredRevision {
     draftedById: row.drafted_by,
     labels: row.labels,
     derivedFrom: row.derived_from === null ? null : { id: row.derived_from, label: row.derived_from_label },
-    authors: row.authors,
+    authors: row.authors.map((author) => ({ ...author, at: new Date(author.at) })),
     submitted: row.submission && {
       id: row.submission.id,
       by: row.submission.by,

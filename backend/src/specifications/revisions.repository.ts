@@ -1,8 +1,17 @@
 import { Inject, Injectable } from '@nestjs/common';
-import { STATES_SHOWN, type Evaluation, type EvaluationContext, type SpecificationInput } from '@bellgap/common/api';
+import {
+  STATES_IN_WORK,
+  STATES_SHOWN,
+  type Evaluation,
+  type EvaluationContext,
+  type RevisionState,
+  type SpecificationInput,
+} from '@bellgap/common/api';
+import type { Knex } from 'knex';
 import { KNEX, type Database } from '../platform/knex';
 import type { Override } from './inheritance';
 import { listColumnsOf } from './list-columns';
+import { columnsOfMove, type RevisionMove } from './revision-moves';
 import { revisionColumns, toStoredRevision, type RevisionRow, type StoredRevision } from './revision-row';
 
 /** Where a revision is found: the label "latest" names the newest. */
@@ -52,12 +61,38 @@ export class RevisionsRepository {
   constructor(@Inject(KNEX) private readonly knex: Database) {}
 
   async find(
-    { projectCode, number, label }: RevisionAddress,
+    address: RevisionAddress,
     { db = this.knex, forUpdate = false, shownOnly = false }: FindOptions = {},
   ): Promise<StoredRevision | null> {
-    const query = db('revisions as r')
+    if (!forUpdate) return this.read(this.at(address, shownOnly, db), db);
+    // Locked first and read then: what another has written meanwhile beside the row is seen too.
+    const locked = await this.at(address, shownOnly, db).forUpdate('r').first<{ id: string } | undefined>('r.id');
+    return locked ? this.read(this.revisions(db).where('r.id', locked.id), db) : null;
+  }
+
+  private revisions(db: Database): Knex.QueryBuilder {
+    return db('revisions as r')
       .join('specifications as s', 's.id', 'r.specification_id')
-      .join('projects as p', 'p.id', 's.project_id')
+      .join('projects as p', 'p.id', 's.project_id');
+  }
+
+  private at({ projectCode, number, label }: RevisionAddress, shownOnly: boolean, db: Database): Knex.QueryBuilder {
+    const query = this.revisions(db)
+      .where({ 'p.code': projectCode, 's.number': number })
+      .orderBy('r.created_at', 'desc');
+    if (label !== 'latest') {
+      // A label that a revision had before still finds it.
+      void query.join(
+        'revision_labels as l',
+        (on) => void on.on('l.revision_id', 'r.id').on('l.specification_id', 's.id').onVal('l.label', label),
+      );
+    }
+    if (shownOnly) void query.whereIn('r.state', [...STATES_SHOWN]);
+    return query;
+  }
+
+  private async read(query: Knex.QueryBuilder, db: Database): Promise<StoredRevision | null> {
+    const row = await query
       .leftJoin('design_bases as b', 'b.id', 'r.basis_revision_id')
       .leftJoin('users as saver', 'saver.id', 'r.saved_by')
       .leftJoin('users as drafter', 'drafter.id', 'r.drafted_by')
@@ -70,19 +105,7 @@ export class RevisionsRepository {
       .leftJoin('users as basis_author', 'basis_author.id', 'b.created_by')
       .leftJoin('sheets as sheet', (on) => void on.on('sheet.revision_id', 'r.id').onVal('sheet.kind', 'draft'))
       .leftJoin('users as sheet_author', 'sheet_author.id', 'sheet.drawn_by')
-      .where({ 'p.code': projectCode, 's.number': number })
-      .orderBy('r.created_at', 'desc')
       .first<RevisionRow | undefined>(revisionColumns(db));
-    if (label !== 'latest') {
-      // A label that a revision had before still finds it.
-      void query.join(
-        'revision_labels as l',
-        (on) => void on.on('l.revision_id', 'r.id').on('l.specification_id', 's.id').onVal('l.label', label),
-      );
-    }
-    if (shownOnly) void query.whereIn('r.state', [...STATES_SHOWN]);
-    if (forUpdate) void query.forUpdate('r');
-    const row = await query;
     return row ? toStoredRevision(row) : null;
   }
 
@@ -157,6 +180,33 @@ export class RevisionsRepository {
         saved_at: at,
         lock_version: db.raw('lock_version + 1'),
       });
+  }
+
+  /** Writes a move, and the label that comes with it. */
+  async move(revision: { id: string; specificationId: string }, move: RevisionMove, db: Database): Promise<void> {
+    await db('revisions as r')
+      .where('r.id', revision.id)
+      .update({ ...columnsOfMove(move), lock_version: db.raw('lock_version + 1') });
+    if ('label' in move) {
+      const { label, at } = move;
+      await this.giveLabel({ specificationId: revision.specificationId, revisionId: revision.id, label, at }, db);
+    }
+  }
+
+  /** The revision in force of a specification, and the one in work. */
+  async standing(
+    projectCode: string,
+    number: string,
+    db: Database,
+  ): Promise<{ inForce: string | null; inWork: { label: string; state: RevisionState } | null }> {
+    const rows = (await this.revisions(db)
+      .where({ 'p.code': projectCode, 's.number': number })
+      .whereIn('r.state', ['issued', ...STATES_IN_WORK])
+      .select('r.label', 'r.state')) as { label: string; state: RevisionState }[];
+    return {
+      inForce: rows.find(({ state }) => state === 'issued')?.label ?? null,
+      inWork: rows.find(({ state }) => state !== 'issued') ?? null,
+    };
   }
 
   async rename(specificationId: string, title: string, db: Database): Promise<void> {

@@ -2,12 +2,14 @@ import {
   STATES_SHOWN,
   TRANSITIONS,
   coversCategory,
+  trailFieldLabel,
   transitionsFrom,
   type Revision,
   type RevisionState,
   type TransitionName,
 } from '@bellgap/common/api';
 import { holdsRole, knownProjects, mayReadDrafts, mayWriteDrafts, type SignedIn } from '../platform/person';
+import { siteDay } from '../platform/site-day';
 import type { StoredRevision } from './revision-row';
 
 type Asker = Pick<SignedIn, 'id' | 'grants'>;
@@ -29,7 +31,7 @@ export function isChecker({ grants }: Asker, projectId: string, category: number
   );
 }
 
-export const isAuthor = ({ id }: Asker, { authors }: Pick<StoredRevision, 'authors'>): boolean =>
+export const isAuthor = ({ id }: Pick<Asker, 'id'>, { authors }: { authors: readonly { id: string }[] }): boolean =>
   authors.some((author) => author.id === id);
 
 /**
@@ -38,7 +40,7 @@ export const isAuthor = ({ id }: Asker, { authors }: Pick<StoredRevision, 'autho
  */
 export function figuresHidden(
   person: Asker,
-  revision: Pick<StoredRevision, 'state' | 'projectId' | 'authors' | 'ownFiguresBy'>,
+  revision: Pick<StoredRevision, 'state' | 'projectId' | 'ownFiguresBy'> & { authors: readonly { id: string }[] },
 ): boolean {
   return (
     (revision.state === 'draft' || revision.state === 'in_check') &&
@@ -47,6 +49,8 @@ export function figuresHidden(
     !revision.ownFiguresBy.includes(person.id)
   );
 }
+
+export const OWN_COUNT_FIRST = 'Enter your own count first: until then the figures of the author stay hidden.';
 
 /** Why a person may not make a move from where the revision stands; null where he may. */
 export function moveRefusal(person: Asker, name: TransitionName, revision: StoredRevision): string | null {
@@ -65,12 +69,14 @@ export function moveRefusal(person: Asker, name: TransitionName, revision: Store
       if (!isChecker(person, projectId, submitted?.checkCategory ?? null)) {
         return `Check category ${submitted?.checkCategory} is asked for; your grant does not cover it.`;
       }
-      return isAuthor(person, revision) ? OWN_WORK : null;
+      return ownWork(person, revision);
     case 'refuse':
     case 'issue':
       if (!holdsRole(person, ['approver'], projectId)) return 'Only approvers of this project issue.';
-      if (isAuthor(person, revision)) return OWN_WORK;
-      return checked?.byId === person.id ? 'You have checked this revision; somebody else approves it.' : null;
+      return (
+        ownWork(person, revision) ??
+        (checked?.byId === person.id ? 'You have checked this revision; somebody else approves it.' : null)
+      );
     case 'withdraw':
       return holdsRole(person, ['approver'], projectId) ? null : 'Only approvers of this project withdraw.';
     case 'supersede':
@@ -92,7 +98,19 @@ export function editBarsSigning(person: Asker, revision: StoredRevision): boolea
   return revision.state === 'draft' && couldSign && mayWriteDrafts(person, projectId) && !isAuthor(person, revision);
 }
 
-const OWN_WORK = 'You have changed the content of this revision; nobody checks or approves his own work.';
+/** Names the field and the day of the asker's last change; null where he has changed nothing. */
+export function ownWork(
+  { id }: Pick<Asker, 'id'>,
+  { authors, siteTimeZone }: Pick<StoredRevision, 'authors' | 'siteTimeZone'>,
+): string | null {
+  const author = authors.find((one) => one.id === id);
+  if (!author) return null;
+  const what = WHOLE_CHANGES[author.path] ?? trailFieldLabel(author.path);
+  return `You changed ${what} on ${siteDay(author.at, siteTimeZone)}; nobody checks or approves his own work.`;
+}
+
+/** Changes that are more than a field. */
+const WHOLE_CHANGES: Record<string, string> = { input: 'the input', context: 'what the figures rest on' };
 
 const STATE_WORDS: Record<RevisionState, string> = {
   draft: 'a draft',

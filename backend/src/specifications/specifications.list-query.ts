@@ -4,18 +4,18 @@ import { STATES_SHOWN, type RevisionState, type SpecificationRow } from '@bellga
 import { KNEX, type Database } from '../platform/knex';
 import { likePattern, listPage, type Page, type SortColumn } from '../platform/list';
 import { worstCautionOf } from './list-columns';
-import type { SignedIn } from '../platform/person';
+import { holdsAnywhere, type SignedIn } from '../platform/person';
 import { newerBasisRevision, newestBasisRevision } from './revision-row';
-import { figuresHidden } from './rights';
+import { figuresHidden, isChecker } from './rights';
 
 const SORTS: Record<string, SortColumn> = {
   number: { column: 's.number', type: 'text' },
   title: { column: 'r.title', type: 'text' },
   savedAt: { column: 'r.saved_at', type: 'timestamptz' },
-  units: { column: 'r.units', type: 'integer' },
+  units: { column: 'shown.units', type: 'integer' },
   altitudeM: { column: 'r.altitude_m', type: 'double precision' },
   highestVoltageKv: { column: 'r.highest_voltage_kv', type: 'double precision' },
-  worstMarginPercent: { column: 'r.worst_margin_percent', type: 'double precision' },
+  worstMarginPercent: { column: 'shown.worst_margin_percent', type: 'double precision' },
 };
 
 /** Most rows of a part of the desk; the rest is found in the lists of the projects. */
@@ -63,7 +63,10 @@ export class SpecificationsListQuery {
     person: SignedIn,
     { drafts }: { drafts: boolean },
   ): Promise<Page<SpecificationRow>> {
-    const query = this.rows(drafts).where('s.project_id', projectId);
+    const query = this.rows(drafts, isChecker(person, projectId, null) ? person.id : null).where(
+      's.project_id',
+      projectId,
+    );
     if (asked.state) void query.where('r.state', asked.state);
     if (asked.search) {
       const pattern = likePattern(asked.search);
@@ -101,7 +104,21 @@ export class SpecificationsListQuery {
     return projects === 'all' ? query : query.whereIn('s.project_id', projects);
   }
 
-  private rows(drafts: boolean): Knex.QueryBuilder {
+  /** Those of the revisions whose figures a person may not see yet. */
+  async hiddenAmong(person: SignedIn, revisionIds: readonly string[]): Promise<Set<string>> {
+    if (!holdsAnywhere(person, ['checker']) || revisionIds.length === 0) return new Set();
+    const rows = (await this.knex('revisions as r')
+      .join('specifications as s', 's.id', 'r.specification_id')
+      .whereIn('r.id', [...revisionIds])
+      .select('r.id', 's.project_id', 'r.state', ...signersColumns(this.knex))) as Pick<
+      ListRow,
+      'id' | 'project_id' | 'state' | 'authors' | 'own_figures_by'
+    >[];
+    return new Set(rows.filter((row) => isHidden(row, person)).map(({ id }) => id));
+  }
+
+  /** The order by a figure says what it is: where a checker may not see it yet, it is empty to the order too. */
+  private rows(drafts: boolean, checkerId: string | null = null): Knex.QueryBuilder {
     return this.knex('specifications as s')
       .join('projects as p', 'p.id', 's.project_id')
       .joinRaw(
@@ -111,6 +128,13 @@ export class SpecificationsListQuery {
           order by newest.created_at desc limit 1
         ) as r on true`,
         drafts ? [] : [[...STATES_SHOWN]],
+      )
+      .joinRaw(
+        `cross join lateral (
+          select case when ${HIDDEN} then null else r.units end as units,
+            case when ${HIDDEN} then null else r.worst_margin_percent end as worst_margin_percent
+        ) as shown`,
+        { checker: checkerId },
       )
       .leftJoin('design_bases as b', 'b.id', 'r.basis_revision_id')
       .leftJoin('users as saver', 'saver.id', 'r.saved_by')
@@ -147,6 +171,24 @@ export class SpecificationsListQuery {
   }
 }
 
+/** As `figuresHidden` says it, for the order of a list. */
+const HIDDEN = `(
+  :checker::uuid is not null and r.state in ('draft', 'in_check')
+  and not exists (select from revision_changes as c where c.revision_id = r.id and c.changed_by = :checker::uuid)
+  and not (r.state = 'in_check' and exists (
+    select from check_records as k join submissions as m on m.id = k.submission_id
+    where m.revision_id = r.id and m.label = r.label and k.checker_id = :checker::uuid
+  ))
+)`;
+
+function isHidden(
+  row: Pick<ListRow, 'project_id' | 'state' | 'authors' | 'own_figures_by'>,
+  person: Pick<SignedIn, 'id' | 'grants'>,
+): boolean {
+  const { state, project_id: projectId, authors, own_figures_by: ownFiguresBy } = row;
+  return figuresHidden(person, { state, projectId, authors: authors.map((id) => ({ id })), ownFiguresBy });
+}
+
 /** Who wrote in a revision, and who has entered his own figures for what is submitted: they see what others do not yet. */
 function signersColumns(knex: Knex): Knex.Raw[] {
   return [
@@ -163,12 +205,7 @@ function signersColumns(knex: Knex): Knex.Raw[] {
 }
 
 function toItem(row: ListRow, person: SignedIn): SpecificationRow {
-  const hidden = figuresHidden(person, {
-    state: row.state,
-    projectId: row.project_id,
-    authors: row.authors.map((id) => ({ id, name: '' })),
-    ownFiguresBy: row.own_figures_by,
-  });
+  const hidden = isHidden(row, person);
   const shown = <T>(value: T): T | null => (hidden ? null : value);
   return {
     id: row.id,
@@ -199,6 +236,6 @@ function toItem(row: ListRow, person: SignedIn): SpecificationRow {
     savedAt: row.saved_at.toISOString(),
     figuresHidden: hidden,
     dueOn: row.due_on,
-    returnedAt: row.returned_at?.toISOString() ?? null,
+    returnedAt: row.state === 'draft' ? (row.returned_at?.toISOString() ?? null) : null,
   };
 }

@@ -11,13 +11,14 @@ import { mayReadDrafts, mayWriteDrafts, type SignedIn } from '../platform/person
 import { ProjectsService } from '../projects/projects.service';
 import { inheritanceFaults, inputFromBasis, overrideCautions, takeBasisOver, type Override } from './inheritance';
 import { revisionAnswer } from './revision-answer';
-import { maySee } from './rights';
+import { OWN_COUNT_FIRST, figuresHidden, maySee } from './rights';
+import type { RevisionMove } from './revision-moves';
 import type { StoredRevision } from './revision-row';
 import { RevisionsRepository, type RevisionAddress, type RevisionContent } from './revisions.repository';
 import { SpecificationsListQuery } from './specifications.list-query';
 import { changesBetween, sameValue } from './values';
 
-export type { RevisionAddress, StoredRevision };
+export type { RevisionAddress, RevisionMove, StoredRevision };
 export { changesBetween } from './values';
 export { figuresHidden, isAuthor, isChecker, maySee, moveRefusal } from './rights';
 
@@ -56,7 +57,10 @@ export class SpecificationsService {
     return this.lists.outdatedDrafts(person, draftProjects(person));
   }
 
-  /** What is stored of a revision, for features that build on it; 404 to who may not see it. */
+  /**
+   * What is stored of a revision, for features that build on it; 404 to who may not see it. For a move it is locked
+   * until the transaction ends.
+   */
   async stored(
     person: SignedIn,
     address: RevisionAddress,
@@ -73,6 +77,50 @@ export class SpecificationsService {
   /** The label stays with the revision for ever; one that was given already is refused by the database. */
   giveLabel(label: { specificationId: string; revisionId: string; label: string; at: Date }, db: Database) {
     return this.revisions.giveLabel(label, db);
+  }
+
+  /** The same for what shows figures of the author: a checker enters his own first. */
+  async storedWithFigures(person: SignedIn, address: RevisionAddress): Promise<StoredRevision> {
+    const stored = await this.find(person, address);
+    if (figuresHidden(person, stored)) throw forbidden(OWN_COUNT_FIRST);
+    return stored;
+  }
+
+  /** The revision in force, and the one in work, of a specification that the person knows. */
+  async standing(person: SignedIn, projectCode: string, number: string, db: Database) {
+    await this.find(person, { projectCode, number, label: 'latest' }, { db, forUpdate: true });
+    return this.revisions.standing(projectCode, number, db);
+  }
+
+  /** Writes a move that the caller has found to be allowed. */
+  moveTo(db: Database, revision: StoredRevision, move: RevisionMove): Promise<void> {
+    return this.revisions.move(revision, move, db);
+  }
+
+  /** A draft with the content of another revision, evaluated anew; who begins it counts as its author. */
+  async deriveFrom(person: SignedIn, from: StoredRevision, label: string, db: Database): Promise<string> {
+    const { title, specificationId, input, overrides, basis } = from;
+    const at = this.clock.now();
+    const content = await this.evaluated(input, overrides, basis?.id ?? null, db);
+    const made = { specificationId, title, label, derivedFrom: from.id, by: person.id, at, ...content };
+    const revisionId = await this.revisions.insertRevision(made, db);
+    await this.revisions.recordChange({ revisionId, by: person.id, at, paths: ['input'] }, db);
+    return revisionId;
+  }
+
+  /** What the stored input would be answered now. */
+  async evaluatedNow({ input, overrides, basis }: StoredRevision, db: Database): Promise<RevisionContent> {
+    return this.evaluated(input, overrides, basis?.id ?? null, db);
+  }
+
+  /** Refuses what was made from an older version. */
+  requireVersion(standing: StoredRevision, version: number, person: SignedIn): void {
+    if (standing.lockVersion !== version) throw this.saved(standing, person);
+  }
+
+  /** Those of the revisions whose figures a person may not see yet. */
+  hiddenAmong(person: SignedIn, revisionIds: readonly string[]): Promise<Set<string>> {
+    return this.lists.hiddenAmong(person, revisionIds);
   }
 
   async get(person: SignedIn, address: RevisionAddress): Promise<Revision> {
@@ -147,7 +195,7 @@ export class SpecificationsService {
       const before = await this.find(person, address, { db, forUpdate: true });
       if (!mayWriteDrafts(person, before.projectId)) throw forbidden();
       if (before.state !== 'draft') throw wrongState('Only a draft can be changed.');
-      if (before.lockVersion !== version) throw this.saved(before, person);
+      this.requireVersion(before, version, person);
       const { title, ...after } = await make(before, db);
       const content = contentOf(before);
       const isSame = title === before.title && sameValue(content, { ...after, overrides: sorted(after.overrides) });

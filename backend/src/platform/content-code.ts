@@ -1,4 +1,4 @@
-import { canonicalJson, sha256Of } from '../platform/canonical-json';
+import { canonicalJson, sha256Of } from './canonical-json';
 
 /** First 12 digits of the SHA-256 over inputs, context, answer and edition of the method. */
 export function contentCodeOf(content: {

@@ -1,4 +1,4 @@
-import { canonicalJson, sha256Of } from '../platform/canonical-json';
+import { canonicalJson, sha256Of } from './canonical-json';
 import { contentCodeOf } from './content-code';
 
 describe('content code', () => {
