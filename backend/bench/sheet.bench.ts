@@ -29,7 +29,7 @@ export function contentOf(step: number): SheetContent {
     basis: { number: 'DB-KL221', revision: 1, system: input.system },
     overrides: [],
     drawnOn: '2026-03-12',
-    verification: null,
+    issued: null,
   };
 }
 

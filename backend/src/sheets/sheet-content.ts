@@ -1,10 +1,15 @@
 import { siteDay } from '../platform/site-day';
 import type { StoredRevision } from '../specifications/specifications.service';
-import type { SheetContent } from './document/content';
+import type { Issue, SheetContent, Signature } from './document/content';
 
-/** What the sheet of a stored revision says. Its date is that of the content, so that the same content has the same bytes. */
-export function sheetContentOf(revision: StoredRevision): SheetContent {
+/**
+ * What the sheet of a stored revision says. A draft is dated by its content, so that the same content has the same
+ * bytes; with an issue, the revision is the one that is issued: with its number, its signatures and the day of issue.
+ */
+export function sheetContentOf(revision: StoredRevision, issued: Issue | null = null): SheetContent {
   const { basis, siteTimeZone } = revision;
+  const signature = (by: string | null | undefined, at: Date | undefined): Signature | null =>
+    by && at ? { name: by, on: siteDay(at, siteTimeZone) } : null;
   return {
     project: {
       code: revision.projectCode,
@@ -15,16 +20,16 @@ export function sheetContentOf(revision: StoredRevision): SheetContent {
     number: revision.number,
     title: revision.title,
     revision: revision.label,
-    state: revision.state,
-    drafted: revision.draftedBy ? { name: revision.draftedBy, on: siteDay(revision.createdAt, siteTimeZone) } : null,
-    checked: null,
-    approved: null,
+    state: issued ? 'issued' : revision.state,
+    drafted: signature(revision.draftedBy, revision.createdAt),
+    checked: signature(revision.checked?.by, revision.checked?.at),
+    approved: signature(revision.approved?.by, revision.approved?.at),
     input: revision.input,
     context: revision.context,
     evaluation: revision.evaluation,
     basis: basis && { number: basis.number, revision: basis.revision, system: basis.system, basis: basis.basis },
     overrides: revision.overrides,
-    drawnOn: siteDay(revision.savedAt, siteTimeZone),
-    verification: null,
+    drawnOn: issued?.issuedOn ?? siteDay(revision.savedAt, siteTimeZone),
+    issued,
   };
 }

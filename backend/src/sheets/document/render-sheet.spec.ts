@@ -4,45 +4,12 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { SpecificationInput } from '@bellgap/common/api';
 import { allWords, drawString } from '@bellgap/common/drawing';
-import { answer, discUnit, drawingCases, suspensionCase, type DrawingCase } from '@bellgap/common/drawing/fixtures';
-import type { SheetContent } from './content';
+import { answer, discUnit, drawingCases, suspensionCase } from '@bellgap/common/drawing/fixtures';
+import { draftContent } from './fixtures';
 import { MissingGlyphError } from './fonts/faces';
 import { renderSheet } from './render-sheet';
 import { layOutSheet } from './layout';
 import type { Element, Mark } from './layout/marks';
-
-const settings: SheetContent['context']['settings'] = {
-  version: 1,
-  tensionExtraUnits: 1,
-  creepageAltitudeOriginM: 1000,
-  altitudeStepM: 100,
-  companyMinimumUnits: [],
-  spareSharePercent: 3,
-  maximumStringKinds: 6,
-  ruleCards: [],
-  insulationLevels: [],
-};
-
-function contentOf({ input, context, evaluation }: DrawingCase, over: Partial<SheetContent> = {}): SheetContent {
-  return {
-    project: { code: 'KL221', title: 'Saltgrave to Ondara 220 kV', siteTimeZone: '+04:00', paper: 'A4' },
-    number: 'INS-221-003',
-    title: 'Insulator strings, zone Z3, structures 097 to 124',
-    revision: 'B',
-    state: 'draft',
-    drafted: { name: 'Tamsin Orvelle', on: '2026-03-12' },
-    checked: null,
-    approved: null,
-    input,
-    context: { insulator: context.insulator, settings, confirmations: [] },
-    evaluation,
-    basis: { number: 'DB-KL221', revision: 2, system: input.system },
-    overrides: [{ path: 'site.pollution.class', reason: 'Washed twice a year until the re-check.' }],
-    drawnOn: '2026-03-12',
-    verification: null,
-    ...over,
-  };
-}
 
 const PDFTOTEXT = ['/usr/bin/pdftotext', '/usr/local/bin/pdftotext'].find((path) => existsSync(path));
 
@@ -62,16 +29,16 @@ const wordsOf = (marks: Mark[]): string => marks.map((mark) => (mark.kind === 't
 
 describe('the sheet as PDF', () => {
   it('gives the same bytes for the same content, and other bytes for another', async () => {
-    const one = await renderSheet(contentOf(suspensionCase));
-    const same = await renderSheet(structuredClone(contentOf(suspensionCase)));
-    const other = await renderSheet(contentOf(suspensionCase, { revision: 'C' }));
+    const one = await renderSheet(draftContent(suspensionCase));
+    const same = await renderSheet(structuredClone(draftContent(suspensionCase)));
+    const other = await renderSheet(draftContent(suspensionCase, { revision: 'C' }));
     expect(one.bytes.equals(same.bytes)).toBe(true);
     expect(one.bytes.equals(other.bytes)).toBe(false);
     expect(one.bytes.subarray(0, 8).toString()).toBe('%PDF-1.7');
   });
 
   it('is tagged, named, dated by its content, and embeds three faces', async () => {
-    const { bytes, pages } = await renderSheet(contentOf(suspensionCase));
+    const { bytes, pages } = await renderSheet(draftContent(suspensionCase));
     const text = bytes.toString('latin1');
     expect(text.match(/\/Type \/Page\b/g)).toHaveLength(pages);
     for (const part of ['/MarkInfo', '/StructTreeRoot', '/Lang (en-GB)', '/Outlines', 'D:20260312000000Z'])
@@ -81,7 +48,7 @@ describe('the sheet as PDF', () => {
 
   it.each(drawingCases)('keeps every word on its page, with words apart: $name', (drawingCase) => {
     for (const paper of ['A4', 'Letter'] as const) {
-      const content = contentOf(drawingCase);
+      const content = draftContent(drawingCase);
       const sheet = layOutSheet({ ...content, project: { ...content.project, paper } });
       for (const { marks } of flat(sheet.elements)) {
         for (const mark of marks) {
@@ -101,7 +68,7 @@ describe('the sheet as PDF', () => {
 
   it('shows the same drawing as the screen: the words and the numbers of the primitives', () => {
     const { input, context, evaluation } = suspensionCase;
-    const figure = layOutSheet(contentOf(suspensionCase)).elements.find(({ tag }) => tag === 'Figure');
+    const figure = layOutSheet(draftContent(suspensionCase)).elements.find(({ tag }) => tag === 'Figure');
     const drawing = figure?.marks[0];
     if (drawing?.kind !== 'drawing') throw new Error('no drawing');
     const onScreen = drawString(input, context, evaluation)!;
@@ -115,7 +82,7 @@ describe('the sheet as PDF', () => {
       ...long.trace[i % long.trace.length]!,
       heading: `Line ${i}`,
     }));
-    const sheet = layOutSheet(contentOf({ ...suspensionCase, evaluation: long }));
+    const sheet = layOutSheet(draftContent({ ...suspensionCase, evaluation: long }));
     const pages = sheet.artifacts.length;
     const repeated = sheet.artifacts.filter(({ before }) =>
       before.some((mark) => mark.kind === 'text' && mark.text === 'formula and substitution'),
@@ -127,19 +94,19 @@ describe('the sheet as PDF', () => {
   });
 
   it('names the sign that no face can draw', async () => {
-    const content = contentOf(suspensionCase, { title: 'Strings 線' });
+    const content = draftContent(suspensionCase, { title: 'Strings 線' });
     await expect(renderSheet(content)).rejects.toThrow(MissingGlyphError);
     await expect(renderSheet(content)).rejects.toThrow('no sign for "線" (U+7DDA) in "Strings 線"');
   });
 
   it('refuses a date that is none', async () => {
-    await expect(renderSheet(contentOf(suspensionCase, { drawnOn: 'today' }))).rejects.toThrow('YYYY-MM-DD');
+    await expect(renderSheet(draftContent(suspensionCase, { drawnOn: 'today' }))).rejects.toThrow('YYYY-MM-DD');
   });
 
   it('says what is missing when nothing is filled in', () => {
     const input: SpecificationInput = { kind: 'line', basis: null, system: null, site: null };
     const evaluation = { ...answer(discUnit(), 1), string: null, clearances: null, trace: [], cautions: [] };
-    const bare = contentOf(suspensionCase, { input, evaluation, basis: null, overrides: [], drafted: null });
+    const bare = draftContent(suspensionCase, { input, evaluation, basis: null, overrides: [], drafted: null });
     const sheet = layOutSheet({ ...bare, context: { ...bare.context, insulator: null } });
     const words = flat(sheet.elements).map(({ marks }) => wordsOf(marks));
     expect(words).toContain('No insulator unit chosen');
@@ -155,7 +122,7 @@ describe('the sheet as PDF', () => {
       { cause: 'altitude', units: 0 },
     ] as const;
     const ruleOfThumb = { ...evaluation.ruleOfThumb, bridge: [...bridge] };
-    const sheet = layOutSheet(contentOf({ ...suspensionCase, evaluation: { ...evaluation, ruleOfThumb } }));
+    const sheet = layOutSheet(draftContent({ ...suspensionCase, evaluation: { ...evaluation, ruleOfThumb } }));
     const words = flat(sheet.elements)
       .map(({ marks }) => wordsOf(marks))
       .join('|');
@@ -209,7 +176,7 @@ describe('the sheet as PDF', () => {
       coupling: '16',
     };
     const evaluation = { ...suspensionCase.evaluation, mechanical };
-    const sheet = layOutSheet(contentOf({ ...suspensionCase, input, evaluation }));
+    const sheet = layOutSheet(draftContent({ ...suspensionCase, input, evaluation }));
     const words = flat(sheet.elements)
       .map(({ marks }) => wordsOf(marks))
       .join('|');
@@ -230,7 +197,7 @@ describe('the sheet as PDF', () => {
   // Reading a PDF needs a program that not every machine has; what it reads is laid out and checked above in any case.
   if (PDFTOTEXT)
     it('says on paper what the content says', async () => {
-      const { bytes, pages } = await renderSheet(contentOf(suspensionCase));
+      const { bytes, pages } = await renderSheet(draftContent(suspensionCase));
       const text = textOf(bytes);
       for (const words of [
         '17 units G160-S',
