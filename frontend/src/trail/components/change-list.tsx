@@ -13,7 +13,11 @@ function Change({ change: { path, from, to, hidden } }: { change: TrailChange })
         <span>not shown to you yet</span>
       ) : (
         <>
-          <del title={wholeValue(from)}>{trailValueWords(path, from)}</del>
+          {from === null ? (
+            <span className="soft">nothing</span>
+          ) : (
+            <del title={wholeValue(from)}>{trailValueWords(path, from)}</del>
+          )}
           <span aria-hidden="true"> → </span>
           <ins title={wholeValue(to)}>{trailValueWords(path, to)}</ins>
         </>
