@@ -29,7 +29,7 @@ export interface GrantNews {
 
 export interface SealNews {
   number: number;
-  /** SHA-256 that the chain of seals had reached, hexadecimal. */
+  /** Hash that the chain of seals had reached, or its first digits, hexadecimal. */
   hash: string;
   /** Instant in RFC 3339. */
   sealedAt: string;

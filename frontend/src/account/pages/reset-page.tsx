@@ -8,6 +8,7 @@ import { PasswordField, TextField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
 import { FrontPage } from '../../ui/page/front-page';
+import { FrontPageLink } from '../../ui/page/front-page-link';
 import { readLinkToken } from '../model/link-token';
 import { PASSWORD_HINT } from '../model/password-hint';
 
@@ -69,7 +70,7 @@ function AskForLink() {
     <FrontPage title="Forgotten password" lead="A link for a new one is mailed to you.">
       <RequestForm requested={setEmail} />
       <p className="front-page-note">
-        It came back to you? <Link to={paths.signIn.to()}>Sign in</Link>
+        It came back to you? <FrontPageLink to={paths.signIn.to()}>Sign in</FrontPageLink>
       </p>
     </FrontPage>
   );

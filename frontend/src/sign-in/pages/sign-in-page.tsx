@@ -1,8 +1,9 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { Link, Navigate, useNavigate, useSearchParams } from 'react-router-dom';
+import { Navigate, useNavigate, useSearchParams } from 'react-router-dom';
 import { sessionQuery, useSession } from '../../api/session';
 import { paths, safeBack } from '../../app/paths';
 import { FrontPage } from '../../ui/page/front-page';
+import { FrontPageLink } from '../../ui/page/front-page-link';
 import { SignInForm } from '../components/sign-in-form';
 
 export function SignInPage() {
@@ -23,7 +24,8 @@ export function SignInPage() {
         }}
       />
       <p className="front-page-note">
-        <Link to={paths.reset.to()}>Forgotten password?</Link> No account yet? Ask your administrator for an invitation.
+        <FrontPageLink to={paths.reset.to()}>Forgotten password?</FrontPageLink> No account yet? Ask your administrator
+        for an invitation.
       </p>
     </FrontPage>
   );
