@@ -13,6 +13,7 @@ import { PlatformModule, type PlatformOptions } from './platform/platform.module
 import { ProjectsModule } from './projects/projects.module';
 import { QueueModule } from './queue/queue.module';
 import { ReferenceModule } from './reference/reference.module';
+import { RegisterModule } from './register/register.module';
 import { RevisionNotesModule } from './revision-notes/revision-notes.module';
 import { SheetsModule } from './sheets/sheets.module';
 import { SpecificationsModule } from './specifications/specifications.module';
@@ -40,6 +41,7 @@ export class AppModule {
         SpecificationsModule,
         RevisionNotesModule,
         SheetsModule,
+        RegisterModule,
         TrailModule,
         DeskModule,
         HealthModule,

@@ -5,6 +5,8 @@ import { tooManyRequests } from '../platform/domain-error';
 import { KNEX } from '../platform/knex';
 import { networkOf } from './client';
 
+export { networkOf };
+
 export const THROTTLE = { windowS: 15 * 60, perAccountAndAddress: 10, perAddress: 50 } as const;
 
 /** What is counted for itself: asking for a new password, or signing a sheet, uses up no tries at signing in. */

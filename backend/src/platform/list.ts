@@ -11,7 +11,19 @@ export interface SortColumn {
   column: string;
   /** Type that the text of a cursor is cast back to. */
   type: 'text' | 'timestamptz' | 'double precision' | 'integer';
+  /**
+   * Expressions without empty values, one for each direction, that an index over them and the id gives in order: for
+   * lists that are long. A column that is never empty is its own.
+   */
+  ordered?: { up: string; down: string };
 }
+
+/** A column that is never empty and stands in an index with the id. */
+export const orderedBy = (column: string, type: SortColumn['type']): SortColumn => ({
+  column,
+  type,
+  ordered: { up: column, down: column },
+});
 
 export interface ListOptions<Row, Item> {
   /** Filtered and joined, with its columns selected, without order and limit. */
@@ -49,16 +61,27 @@ export async function listPage<Row extends object, Item>(options: ListOptions<Ro
   const descending = sort.startsWith('-');
   const found = sorts[descending ? sort.slice(1) : sort];
   if (!found) throw invalidAt('sort', `sort: one of ${Object.keys(sorts).join(', ')}`);
-  const { column, type } = found;
+  const { column, type } = found.ordered
+    ? { column: descending ? found.ordered.down : found.ordered.up, type: found.type }
+    : found;
+  const isOrdered = found.ordered !== undefined;
   const cursor = asked.cursor ? readCursor(asked.cursor, sort, type) : null;
   const back = cursor?.back ?? false;
 
-  if (cursor) applyCursor(query, cursor, { column, type, idColumn, ascending: descending === back, back });
-  const direction = descending === back ? 'asc' : 'desc';
+  const ascending = descending === back;
+  const direction = ascending ? 'asc' : 'desc';
+  if (cursor && isOrdered) {
+    query.whereRaw(`(${column}, ${idColumn}) ${ascending ? '>' : '<'} (?::${type}, ?::uuid)`, [
+      cursor.value,
+      cursor.id,
+    ]);
+  } else if (cursor) applyCursor(query, cursor, { column, type, idColumn, ascending, back });
   const rows = (await query
     .select(knex.raw(`(${column})::text as "sort_value"`))
     .orderByRaw(
-      `(${column}) is null ${back ? 'desc' : 'asc'}, ${column} ${direction}, ${idColumn} ${back ? 'desc' : 'asc'}`,
+      isOrdered
+        ? `${column} ${direction}, ${idColumn} ${direction}`
+        : `(${column}) is null ${back ? 'desc' : 'asc'}, ${column} ${direction}, ${idColumn} ${back ? 'desc' : 'asc'}`,
     )
     .limit(limit + 1)) as (Row & { id: string; sort_value: string | null })[];
 

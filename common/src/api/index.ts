@@ -3,6 +3,7 @@ export * from './contract';
 export * from './endpoint';
 export * from './errors';
 export * from './method-answers';
+export * from './recheck';
 export * from './roles';
 export * from './source-difference-answers';
 export * from './spreadsheet-text';
