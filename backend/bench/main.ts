@@ -6,6 +6,7 @@ import { pageFigures } from './page.bench';
 import { stopProduct } from './product';
 import { sheetFigures } from './sheet.bench';
 import { startFigures } from './start.bench';
+import { trailFigures } from './trail.bench';
 import { typingFigures } from './typing.bench';
 
 const FIGURES = [
@@ -15,6 +16,7 @@ const FIGURES = [
   ...sheetFigures,
   ...pageFigures,
   ...startFigures,
+  ...trailFigures,
 ] as const;
 
 function sayWhatElseRuns(): void {
