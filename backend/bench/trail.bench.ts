@@ -108,7 +108,10 @@ async function savesBy(writers: number, audited: boolean): Promise<{ side: Side;
   const app = await NestFactory.createApplicationContext(AppModule.with({ config }), { logger: ['error'] });
   const knex = app.get<Database>(KNEX);
   const audit = app.get(AuditService);
-  const [person, project] = await Promise.all([knex('users').first('id'), knex('projects').first('id')]);
+  const [person, project] = await Promise.all([
+    knex('users').first<{ id: string }>('id'),
+    knex('projects').first<{ id: string }>('id'),
+  ]);
   const save = async (writer: number, step: number): Promise<void> => {
     await knex.transaction(async (db) => {
       await db('insulators').where({ code: 'U160BL', version: 1 }).first('code');
@@ -117,16 +120,16 @@ async function savesBy(writers: number, audited: boolean): Promise<{ side: Side;
         title: 'Written by the benchmark',
         kind: 'line',
         site_time_zone: 'Etc/GMT-4',
-        created_by: (person as { id: string }).id,
-        updated_by: (person as { id: string }).id,
+        created_by: person.id,
+        updated_by: person.id,
       });
       if (!audited) return;
       await audit.record(db, {
-        actorId: (person as { id: string }).id,
+        actorId: person.id,
         action: 'revision.saved',
         entity: 'revision',
-        entityId: (project as { id: string }).id,
-        projectId: (project as { id: string }).id,
+        entityId: project.id,
+        projectId: project.id,
         changes: { 'input.site.altitudeM': { from: step, to: step + 1 }, units: { from: 14, to: 15 } },
       });
     });
