@@ -19,6 +19,7 @@ import { SheetsModule } from './sheets/sheets.module';
 import { SpecificationsModule } from './specifications/specifications.module';
 import { TrailModule } from './trail/trail.module';
 import { UsersModule } from './users/users.module';
+import { WorkflowModule } from './workflow/workflow.module';
 
 @Module({})
 export class AppModule {
@@ -43,6 +44,7 @@ export class AppModule {
         SheetsModule,
         RegisterModule,
         TrailModule,
+        WorkflowModule,
         DeskModule,
         HealthModule,
         OpenApiModule,

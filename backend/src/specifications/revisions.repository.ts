@@ -166,6 +166,13 @@ export class RevisionsRepository {
     return (await db('revision_labels').where({ specification_id: specificationId }).pluck('label')) as string[];
   }
 
+  async labelInForce(specificationId: string, db: Database = this.knex): Promise<string | null> {
+    const row = await db('revisions as r')
+      .where({ 'r.specification_id': specificationId, 'r.state': 'issued' })
+      .first<{ label: string } | undefined>('r.label');
+    return row?.label ?? null;
+  }
+
   async update(
     id: string,
     { title, by, at, ...content }: RevisionContent & { title: string; by: string; at: Date },

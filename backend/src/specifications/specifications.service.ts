@@ -19,8 +19,9 @@ import { SpecificationsListQuery } from './specifications.list-query';
 import { changesBetween, sameValue } from './values';
 
 export type { RevisionAddress, RevisionMove, StoredRevision };
+export { listColumnsOf } from './list-columns';
+export { OWN_COUNT_FIRST, figuresHidden, isAuthor, isChecker, maySee, moveRefusal, ownWork } from './rights';
 export { changesBetween } from './values';
-export { figuresHidden, isAuthor, isChecker, maySee, moveRefusal } from './rights';
 
 const FIRST_LABEL = 'A';
 
@@ -72,6 +73,11 @@ export class SpecificationsService {
   /** Every label that revisions of a specification have had. */
   labelsOf(specificationId: string, db?: Database): Promise<string[]> {
     return this.revisions.labelsOf(specificationId, db);
+  }
+
+  /** Label of the revision in force; null where none is. */
+  labelInForce(specificationId: string, db?: Database): Promise<string | null> {
+    return this.revisions.labelInForce(specificationId, db);
   }
 
   /** The label stays with the revision for ever; one that was given already is refused by the database. */

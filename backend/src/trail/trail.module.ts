@@ -13,6 +13,8 @@ import { TrailController } from './trail.controller';
 import { TrailRepository } from './trail.repository';
 import { TrailService } from './trail.service';
 
+export { TrailVeils };
+
 @Module({
   imports: [MailModule, ProjectsModule, UsersModule],
   controllers: [TrailController],

@@ -142,7 +142,7 @@ function answerOf(row: TrailRow, askedPath: string | undefined, veil: Veil): Tra
     specification: number === null || label === null ? null : { number, label },
     personName: row.person_name,
     changes,
-    reason: row.reason,
+    reason: veil(record, 'reason') ? null : row.reason,
     seal: row.seal,
   };
 }

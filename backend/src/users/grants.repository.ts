@@ -44,7 +44,7 @@ export class GrantsRepository {
 
   /** Active people who hold one of the roles on a day, for everything or for the project; null asks for all projects. */
   async holders(
-    asked: { roles: readonly Grant['role'][]; projectId: string | null; day: string },
+    asked: { roles: readonly Grant['role'][]; projectId: string | null; checkCategory?: number; day: string },
     db: Knex = this.knex,
   ): Promise<string[]> {
     const query = db('role_grants as g')
@@ -55,6 +55,10 @@ export class GrantsRepository {
       .where('g.valid_from', '<=', asked.day)
       .where((open) => open.whereNull('g.valid_to').orWhere('g.valid_to', '>=', asked.day))
       .distinct('g.user_id');
+    const { checkCategory } = asked;
+    if (checkCategory !== undefined) {
+      query.where((open) => open.whereNull('g.check_category').orWhere('g.check_category', '>=', checkCategory));
+    }
     if (asked.projectId !== null) {
       const { projectId } = asked;
       query.where((either) => either.whereNull('g.project_id').orWhere('g.project_id', projectId));

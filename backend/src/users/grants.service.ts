@@ -90,6 +90,11 @@ export class GrantsService {
     return this.grants.holders({ roles, projectId, day: this.clock.today() }, db);
   }
 
+  /** Checkers of the project today whose grant covers the category. */
+  async checkers(projectId: string, checkCategory: number, db: Knex): Promise<string[]> {
+    return this.grants.holders({ roles: ['checker'], projectId, checkCategory, day: this.clock.today() }, db);
+  }
+
   private async tellApprovers(
     actor: SignedIn,
     granted: { userId: string; name: string; projectId: string | null },

@@ -14,7 +14,9 @@ export const words = () => yup.string().defined();
 export const engineValue = <T>() => yup.mixed<T & object>().required();
 
 /** A list that is whole. */
-export const listed = <S extends yup.AnySchema>(item: S) => yup.array().of(item).required();
+export const listed = <S extends yup.AnySchema>(item: S) =>
+  // Inferred by itself, the type of the items would be any.
+  yup.array().of(item).required() as unknown as yup.ArraySchema<yup.InferType<S>[], yup.AnyObject>;
 
 /** One page of a list. */
 export function listOf<S extends yup.AnySchema>(item: S) {

@@ -7,6 +7,7 @@ export * from './people';
 export * from './projects';
 export * from './specifications';
 export * from './standing-cautions';
+export * from './submission';
 export * from './trail';
 export * from './workflow';
 export * from './worksheet';
