@@ -109,6 +109,10 @@ function commandsOf(mark: Mark): Command[] {
       const colour = fill ?? stroke ?? COLOURS.ink;
       return [{ kind: 'rect', x, y, width, height, weight, colour, fill: fill !== undefined }];
     }
+    case 'outline': {
+      const { data, colour } = mark;
+      return [{ kind: 'path', x: 0, y: 0, scale: 1, weight: 0, data, colour, fill: colour, dashed: false }];
+    }
     case 'drawing':
       return drawingCommands(mark.drawing, mark.x, mark.y, mark.pointsPerMm);
   }

@@ -175,10 +175,22 @@ export const approvalAnswer = yup
   .required();
 export type Approval = yup.InferType<typeof approvalAnswer>;
 
+/** What an approver takes upon himself when he issues. */
+export const CONCESSION_KINDS = ['acceptance', 'concession', 'later-change'] as const;
+export type ConcessionKind = (typeof CONCESSION_KINDS)[number];
+export const CONCESSION_KIND_LABELS: Record<ConcessionKind, string> = {
+  acceptance: 'Acceptance',
+  concession: 'Concession',
+  'later-change': 'Not waited for',
+};
+
 export const concessionAnswer = yup
   .object({
     id: words(),
-    kind: yup.string().oneOf(['acceptance', 'concession', 'later-change']).required(),
+    kind: yup
+      .string()
+      .oneOf([...CONCESSION_KINDS])
+      .required(),
     projectCode: words(),
     number: words(),
     label: words(),

@@ -53,7 +53,7 @@ export interface Table {
 /** Labels and values in two columns, without a head row. */
 export interface Pairs {
   kind: 'pairs';
-  rows: { label: string; value: string; note?: string; strong?: boolean }[];
+  rows: { label: string; value: string; note?: string; strong?: boolean; mono?: boolean }[];
   labelShare?: number;
 }
 
@@ -62,10 +62,19 @@ export interface List {
   items: Words[];
 }
 
-/** Words in a box at the head of the sheet. */
+/** A sign beside words, told apart without colour. */
+export type Shape = 'triangle' | 'diamond' | 'square';
+
+export interface NoticeItem {
+  mark: string;
+  text: string;
+  shape?: Shape;
+}
+
+/** Words in a box. */
 export interface Notice {
   kind: 'notice';
-  items: { mark: string; text: string }[];
+  items: NoticeItem[];
 }
 
 export type Block = Heading | Paragraph | Table | Pairs | List | Notice;

@@ -1,6 +1,7 @@
 import type { ClearanceRow, Evaluation, SourceReference, SpecificationInput } from '@bellgap/common/api';
 import { figure } from '@bellgap/common/drawing';
 import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
+import type { SheetContent } from './content';
 
 export const NOT_STATED = 'not stated';
 export const UNKNOWN = '–';
@@ -61,7 +62,8 @@ export function choice(list: Record<string, string>, value: string | number | nu
 
 export function valueAt(root: unknown, path: string): unknown {
   return path
-    .split('.')
+    .split(/[.[\]]+/)
+    .filter(Boolean)
     .reduce<unknown>(
       (value, key) =>
         typeof value === 'object' && value !== null ? (value as Record<string, unknown>)[key] : undefined,
@@ -118,6 +120,30 @@ export const SHAPE_WORDS: Record<string, string> = {
   'rod-conductor': 'rod to conductor',
   'conductor-conductor': 'conductor to conductor',
 };
+
+const PARTS_OF_TIME = {
+  year: 'numeric',
+  month: '2-digit',
+  day: '2-digit',
+  hour: '2-digit',
+  minute: '2-digit',
+  hourCycle: 'h23',
+} as const;
+
+/** An instant where the line or yard stands: "2026-03-17 02:05". */
+export function siteTime(instant: string, timeZone: string): string {
+  const parts = new Intl.DateTimeFormat('en-GB', { timeZone, ...PARTS_OF_TIME }).formatToParts(new Date(instant));
+  const part = (type: string): string => parts.find((one) => one.type === type)?.value ?? '';
+  return `${part('year')}-${part('month')}-${part('day')} ${part('hour')}:${part('minute')}`;
+}
+
+/** The time zone of the site by name, with how far it is from UTC on the day of the sheet. */
+export function zoneWords({ project: { siteTimeZone: timeZone }, drawnOn }: SheetContent): string {
+  const format = new Intl.DateTimeFormat('en-GB', { timeZone, timeZoneName: 'longOffset' });
+  const parts = format.formatToParts(new Date(`${drawnOn}T12:00:00Z`));
+  const offset = parts.find(({ type }) => type === 'timeZoneName')?.value.replace('GMT', 'UTC') ?? '';
+  return offset === timeZone ? timeZone : `${timeZone} (${offset === 'UTC' ? 'UTC+00:00' : offset})`;
+}
 
 /** "17 units G160-S"; words where no count is known. */
 export function answerWords(input: SpecificationInput, evaluation: Evaluation, code: string | null): string {

@@ -108,7 +108,7 @@ function drawMark(doc: PDFKit.PDFDocument, mark: Mark): void {
     case 'text':
       if (mark.text.trim() === '') return;
       doc.font(mark.face).fontSize(mark.size).fillColor(mark.colour);
-      doc.text(mark.text, mark.x, mark.baseline, {
+      doc.text(mark.endsLine ? `${mark.text} ` : mark.text, mark.x, mark.baseline, {
         lineBreak: false,
         baseline: 'alphabetic',
         textWidth: mark.width,
@@ -122,6 +122,9 @@ function drawMark(doc: PDFKit.PDFDocument, mark: Mark): void {
       doc.rect(mark.x, mark.y, mark.width, mark.height);
       if (mark.fill) doc.fill(mark.fill);
       else doc.lineWidth(mark.weight).stroke(mark.stroke ?? COLOURS.ink);
+      return;
+    case 'outline':
+      doc.path(mark.data).fill(mark.colour);
       return;
     case 'drawing':
       drawPrimitives(doc, mark.drawing, mark.x, mark.y, mark.pointsPerMm);

@@ -1,6 +1,6 @@
 import { allWords, drawString, type Drawing } from '@bellgap/common/drawing';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
-import { paragraph, type Block } from '../blocks';
+import { heading, paragraph, type Block } from '../blocks';
 import type { SheetContent } from '../content';
 import { conditions } from '../sections/conditions';
 import { notices } from '../sections/cautions';
@@ -60,7 +60,8 @@ export function layOutFirstPage(paper: Paper, geometry: PageGeometry, content: S
   const rest: Block[] = [];
   let scale = '–';
   const column = (x: number, width: number, top: number, blocks: Block[]): void => {
-    rest.push(...new Flow(paper, { x, width, top, bottom: region.bottom }, 0, null).place(blocks));
+    const left = new Flow(paper, { x, width, top, bottom: region.bottom }, 0, null).place(blocks);
+    rest.push(...continued(blocks, left));
   };
   if (drawing && drawing.widthMm > WIDE * drawing.heightMm) {
     const half = (region.width - GUTTER) / 2;
@@ -87,6 +88,14 @@ export function layOutFirstPage(paper: Paper, geometry: PageGeometry, content: S
   }
   layOutTitleBlock(paper, geometry, content, scale);
   return rest;
+}
+
+/** What is cut off from its heading gets one of its own on the next page. */
+function continued(blocks: Block[], left: Block[]): Block[] {
+  const cut = blocks.length - left.length;
+  if (left.length === 0 || left[0]?.kind === 'heading') return left;
+  const above = blocks.slice(0, cut).findLast((block) => block.kind === 'heading');
+  return above ? [heading(2, `${above.text}, continued`), ...left] : left;
 }
 
 const pairsIn = (blocks: Block[]): number =>

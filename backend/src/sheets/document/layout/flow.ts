@@ -3,6 +3,7 @@ import { widthOf } from '../fonts/faces';
 import { wrap } from '../fonts/wrap';
 import { COLOURS, element, type Element, type Mark } from './marks';
 import { layOutPairs, pairsHeight } from './pairs';
+import { shapeMark } from './shapes';
 import { layOutTable } from './table';
 import { LEADING, textMarks } from './text';
 
@@ -23,6 +24,7 @@ const BODY_SIZE = 8.5;
 const HEADING = { 1: { size: 12.5, before: 16, after: 5 }, 2: { size: 9, before: 9, after: 3 } } as const;
 /** A heading stands with at least this much of what it heads; a short list of pairs is not cut at all. */
 const KEEP_PT = 46;
+const SHAPE_PT = 12;
 const MOST_KEPT_PAIRS = 12;
 
 const keepOf = (next: Block): number =>
@@ -168,8 +170,13 @@ export class Flow {
     const size = BODY_SIZE;
     const inset = 6;
     const width = this.here.width - 2 * inset;
-    const markWidth = Math.max(0, ...block.items.map(({ mark }) => widthOf(mark, 'semibold') * size)) + 8;
-    const rows = block.items.map(({ mark, text }) => ({ mark, lines: wrap(text, 'sans', size, width - markWidth) }));
+    const indent = block.items.some(({ shape }) => shape) ? SHAPE_PT : 0;
+    const markWidth = Math.max(0, ...block.items.map(({ mark }) => widthOf(mark, 'semibold') * size)) + indent + 8;
+    const rows = block.items.map(({ mark, text, shape }) => ({
+      mark,
+      shape,
+      lines: wrap(text, 'sans', size, width - markWidth),
+    }));
     const height = rows.reduce((sum, { lines }) => sum + lines.length * size * LEADING, 0) + 2 * inset - 2;
     if (!this.reserve(height)) return block;
     const box: Mark = {
@@ -183,8 +190,9 @@ export class Flow {
     };
     this.artifact(box);
     let top = this.y + inset - 1;
-    for (const { mark, lines } of rows) {
-      const marks = textMarks(mark, this.here.x + inset, top, markWidth, { face: 'semibold', size });
+    for (const { mark, shape, lines } of rows) {
+      if (shape) this.artifact(shapeMark(shape, this.here.x + inset, top + 0.2 * size, 0.85 * size));
+      const marks = textMarks(mark, this.here.x + inset + indent, top, markWidth, { face: 'semibold', size });
       for (const text of lines) {
         marks.push(...textMarks(text, this.here.x + inset + markWidth, top, width, { face: 'sans', size }));
         top += size * LEADING;

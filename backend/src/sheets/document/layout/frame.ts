@@ -6,22 +6,28 @@ import { textMarks } from './text';
 
 const SIZE = 7.5;
 
-/** Frame and foot of each page: number, revision, state, page n of m. */
-export function frameMarks(geometry: PageGeometry, content: SheetContent, page: number, pages: number): Mark[] {
+/** Frame of each page and the line above its foot. */
+export function frameMarks({ frame }: PageGeometry, footHeight: number): Mark[] {
+  const foot = frame.y + frame.height - footHeight;
+  return [
+    { kind: 'box', ...frame, weight: 1.1, stroke: COLOURS.ink },
+    { kind: 'rule', x: frame.x, y: foot, toX: frame.x + frame.width, toY: foot, weight: 0.6, colour: COLOURS.ink },
+  ];
+}
+
+/** Foot of each page of a draft: number, revision, state, page n of m. */
+export function draftFoot(geometry: PageGeometry, content: SheetContent, page: number, pages: number): Mark[] {
   const { frame, footHeight } = geometry;
   const foot = frame.y + frame.height - footHeight;
   const top = foot + (footHeight - SIZE) / 2 - 0.8;
   const third = frame.width / 3;
   const state = REVISION_STATE_LABELS[content.state];
-  const middle = content.state === 'draft' ? `${state}: not for ordering` : state;
   return [
-    { kind: 'box', ...frame, weight: 1.1, stroke: COLOURS.ink },
-    { kind: 'rule', x: frame.x, y: foot, toX: frame.x + frame.width, toY: foot, weight: 0.6, colour: COLOURS.ink },
     ...textMarks(`${content.number}  revision ${content.revision}`, frame.x + 6, top, third, {
       face: 'mono',
       size: SIZE,
     }),
-    ...centred(middle, frame.x + third, top, third),
+    ...centred(`${state}: not for ordering`, frame.x + third, top, third),
     ...textMarks(`page ${page} of ${pages}`, frame.x + 2 * third, top, third - 6, {
       face: 'mono',
       size: SIZE,

@@ -3,9 +3,22 @@ import type { Face } from '../fonts/faces';
 
 /** What is drawn, in points from the top left of a page. */
 export type Mark =
-  | { kind: 'text'; x: number; baseline: number; size: number; face: Face; text: string; width: number; colour: string }
+  | {
+      kind: 'text';
+      x: number;
+      baseline: number;
+      size: number;
+      face: Face;
+      text: string;
+      width: number;
+      colour: string;
+      /** The last of its line: read aloud, a space parts it from the next. */
+      endsLine: boolean;
+    }
   | { kind: 'rule'; x: number; y: number; toX: number; toY: number; weight: number; colour: string }
   | { kind: 'box'; x: number; y: number; width: number; height: number; weight: number; stroke?: string; fill?: string }
+  /** A filled outline: path data as in SVG, in points of the page. */
+  | { kind: 'outline'; data: string; colour: string }
   | { kind: 'drawing'; x: number; y: number; pointsPerMm: number; drawing: Drawing };
 
 export type Tag = 'H1' | 'H2' | 'P' | 'L' | 'LI' | 'LBody' | 'Table' | 'TR' | 'TH' | 'TD' | 'Figure' | 'Sect';
@@ -40,6 +53,7 @@ export const COLOURS = {
   glaze: '#7A3E1D',
   wash: '#F4E9E1',
   ghost: '#F3F1EC',
+  black: '#000000',
 } as const;
 
 export const element = (tag: Tag, page: number, marks: Mark[] = [], children: Element[] = []): Element => ({

@@ -8,6 +8,8 @@ import { LEADING, textMarks } from './text';
 const BODY_SIZE = 8.5;
 const NOTE_SIZE = 7;
 const PADDING = 2.6;
+/** Signs of a figure with its unit; what is longer is a sentence. */
+const LONGEST_FIGURE = 28;
 
 /** Height of so many rows of one line each. */
 export const pairsHeight = (rows: number): number => rows * (BODY_SIZE * LEADING + PADDING);
@@ -23,7 +25,7 @@ export function layOutPairs(flow: Flow, block: Pairs): Block | null {
     const labelWidth = flow.here.width * (block.labelShare ?? 0.4) - 6;
     const valueWidth = flow.here.width - labelWidth - 6;
     const labels = wrap(row.label, row.strong ? 'semibold' : 'sans', size, labelWidth);
-    const mono = /^[−\d]/.test(row.value);
+    const mono = row.mono ?? (/^[−\d]/.test(row.value) && row.value.length <= LONGEST_FIGURE);
     const face = mono ? 'mono' : row.strong ? 'semibold' : 'sans';
     const values = wrap(row.value, face, size, valueWidth);
     const lastWidth = widthOf(values[values.length - 1] ?? '', face) * size;

@@ -18,7 +18,7 @@ export function textMarks(text: string, x: number, top: number, width: number, s
   const total = runs.reduce((sum, run) => sum + run.width, 0) * style.size;
   let at = style.align === 'right' ? x + width - total : x;
   const baseline = top + ASCENT * style.size;
-  return runs.map((run) => {
+  return runs.map((run, i) => {
     const mark: Mark = {
       kind: 'text',
       x: at,
@@ -28,6 +28,7 @@ export function textMarks(text: string, x: number, top: number, width: number, s
       text: run.text,
       width: run.width * style.size,
       colour: COLOURS[style.tone ?? 'ink'],
+      endsLine: i === runs.length - 1,
     };
     at += run.width * style.size;
     return mark;

@@ -43,7 +43,7 @@ function rowsOf(content: SheetContent, scale: string): Field[][] {
         face: 'mono',
       },
       { label: 'method', text: evaluation.methodEdition, share: 1.1, face: 'mono' },
-      { label: 'date', text: content.drawnOn, share: 1.2, face: 'mono' },
+      { label: content.issued ? 'issued' : 'date', text: content.drawnOn, share: 1.2, face: 'mono' },
       { label: 'scale', text: scale, share: 0.9, face: 'mono' },
     ],
   ];

@@ -1,7 +1,8 @@
-import type { Severity } from '@bellgap/common/api';
+import { REVISION_STATE_LABELS, type ConcessionKind, type Severity } from '@bellgap/common/api';
 import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
-import { cell, heading, paragraph, type Block } from '../blocks';
+import { cell, heading, paragraph, type Block, type NoticeItem } from '../blocks';
 import type { SheetContent } from '../content';
+import { concessionNotices } from './concessions';
 
 const ORDER: Severity[] = ['stop', 'fail', 'acceptance', 'caution', 'info'];
 
@@ -10,6 +11,9 @@ const MEANING: Partial<Record<Severity, string>> = {
   fail: 'a requirement is not met',
   acceptance: 'to be accepted by the approver, with a reason',
 };
+
+/** What an approver has put in their place once the sheet is issued. */
+const ANSWERED_BY: Partial<Record<Severity, ConcessionKind>> = { fail: 'concession', acceptance: 'acceptance' };
 
 /** Cautions of this sheet, the heaviest first. */
 export function cautions({ evaluation }: SheetContent): Block[] {
@@ -40,13 +44,14 @@ export function cautions({ evaluation }: SheetContent): Block[] {
 }
 
 /** What stands at the head of the sheet, in words. */
-export function notices({ evaluation, state }: SheetContent): { mark: string; text: string }[] {
-  const items: { mark: string; text: string }[] = [];
+export function notices({ evaluation, state, issued }: SheetContent): NoticeItem[] {
+  const items: NoticeItem[] = issued ? concessionNotices(issued) : [];
   for (const severity of ['stop', 'fail', 'acceptance'] as const) {
     const found = evaluation.cautions.filter((caution) => caution.severity === severity);
-    if (found.length > 0)
+    const shown = issued?.concessions.some(({ kind }) => kind === ANSWERED_BY[severity]) ? [] : found;
+    if (shown.length > 0)
       items.push({
-        mark: `${found.length} ${CHOICE_LABELS.severity[severity].toLowerCase()}`,
+        mark: `${shown.length} ${CHOICE_LABELS.severity[severity].toLowerCase()}`,
         text: MEANING[severity] ?? '',
       });
   }
@@ -56,6 +61,9 @@ export function notices({ evaluation, state }: SheetContent): { mark: string; te
       mark: 'memory',
       text: `${memory} of ${evaluation.trace.length} lines of the calculation rest on figures from memory, not verified`,
     });
-  if (state === 'draft') items.push({ mark: 'draft', text: 'not for ordering, not for construction' });
+  if (!issued) {
+    const stage = state === 'draft' ? '' : `${REVISION_STATE_LABELS[state].toLowerCase()}, not issued: `;
+    items.push({ mark: 'draft', text: `${stage}not for ordering, not for construction` });
+  }
   return items;
 }

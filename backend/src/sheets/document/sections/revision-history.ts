@@ -1,35 +1,47 @@
 import { REVISION_STATE_LABELS } from '@bellgap/common/api';
-import { cell, heading, type Block } from '../blocks';
-import type { SheetContent, Signature } from '../content';
+import { cell, heading, paragraph, type Block, type Column, type Row } from '../blocks';
+import type { SheetContent, SheetRevision, Signature } from '../content';
+import { zoneWords } from '../words';
 
 const signature = (person: Signature | null): string => (person ? `${person.name}, ${person.on}` : '–');
 
-export function revisionHistory({ revision, state, drafted, checked, approved, title }: SheetContent): Block[] {
+const NAMES: Column[] = [
+  { head: 'drafted', share: 1.6 },
+  { head: 'checked', share: 1.6 },
+  { head: 'approved', share: 1.6 },
+];
+
+export function revisionHistory(content: SheetContent): Block[] {
+  const { revision, state, title, issued, drawnOn } = content;
+  const history = issued?.revisionHistory ?? [
+    { ...content, label: revision, on: drawnOn, what: `${REVISION_STATE_LABELS[state]}: ${title}` },
+  ];
   return [
     heading(1, 'Revisions'),
+    paragraph(`Dates are those of the site's time zone, ${zoneWords(content)}.`, { tone: 'soft' }),
     {
       kind: 'table',
       summary: 'Revisions of this sheet',
       columns: [
         { head: 'revision', share: 0.8 },
-        { head: 'state', share: 0.9 },
-        { head: 'title', share: 2.4 },
-        { head: 'drafted', share: 1.6 },
-        { head: 'checked', share: 1.6 },
-        { head: 'approved', share: 1.6 },
+        { head: 'date', share: 1.05 },
+        { head: 'what', share: 2.4 },
+        ...NAMES,
       ],
-      rows: [
-        {
-          cells: [
-            { lines: [{ text: revision, face: 'mono' }] },
-            cell(REVISION_STATE_LABELS[state]),
-            cell(title),
-            cell(signature(drafted)),
-            cell(signature(checked)),
-            cell(signature(approved)),
-          ],
-        },
-      ],
+      rows: history.map((one) => row(one, one.label === revision)),
     },
   ];
+}
+
+function row({ label, on, what, drafted, checked, approved }: SheetRevision, current: boolean): Row {
+  return {
+    cells: [
+      cell(label, { face: 'mono' }),
+      cell(on),
+      cell(what, current ? { face: 'semibold' } : {}),
+      cell(signature(drafted)),
+      cell(signature(checked)),
+      cell(signature(approved)),
+    ],
+  };
 }

@@ -1,11 +1,11 @@
-import type { SpecificationInput } from '@bellgap/common/api';
+import { inFours, type SpecificationInput } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { heading, type Block } from '../blocks';
 import type { SheetContent } from '../content';
 import { inputWords } from '../words';
 
 /** Words that stand on every sheet, completed with what this one rests on. */
-export function standingCautions({ input, context }: SheetContent): Block[] {
+export function standingCautions({ input, context, issued }: SheetContent): Block[] {
   const unit = context.insulator;
   const items = [
     'This sheet dimensions insulation; it is no permit to work. Distances for approach and live work come from the safety rules in force.',
@@ -24,7 +24,9 @@ export function standingCautions({ input, context }: SheetContent): Block[] {
     'Where the count relies on a coating or on washing, that is a duty of maintenance with an owner and a date.',
     'Do not mix profiles, materials, couplings or spacings in a string without a new check; coupling sizes and locking devices must match.',
     'Rules of thumb are for checking, not for ordering.',
-    'Uncontrolled when printed: look up the current revision before use.',
+    issued
+      ? `Uncontrolled when printed: look up the verification code ${inFours(issued.verificationCode)} at ${issued.verificationUrl} before use.`
+      : 'Uncontrolled when printed: look up the current revision before use.',
   ];
   return [heading(1, 'Standing cautions'), { kind: 'list', items: items.map((text) => ({ text })) }];
 }
