@@ -19,6 +19,7 @@ import { SheetsModule } from './sheets/sheets.module';
 import { SpecificationsModule } from './specifications/specifications.module';
 import { TrailModule } from './trail/trail.module';
 import { UsersModule } from './users/users.module';
+import { IssueModule } from './workflow/issue.module';
 import { WorkflowModule } from './workflow/workflow.module';
 
 @Module({})
@@ -45,6 +46,7 @@ export class AppModule {
         RegisterModule,
         TrailModule,
         WorkflowModule,
+        IssueModule,
         DeskModule,
         HealthModule,
         OpenApiModule,

@@ -7,7 +7,14 @@ import { assertProblem, type TestClient } from './support/test-client';
 const ENDPOINTS = Object.entries<EndpointDefinition>(contract);
 const OPEN_OUTSIDE_THE_CONTRACT = ['GET /api/health', 'GET /api/openapi.json'];
 /** What strangers may call: nothing may join this list unnoticed. */
-const OPEN = ['acceptInvitation', 'acceptPasswordReset', 'currentSession', 'requestPasswordReset', 'signIn'];
+const OPEN = [
+  'acceptInvitation',
+  'acceptPasswordReset',
+  'currentSession',
+  'requestPasswordReset',
+  'signIn',
+  'verification',
+];
 
 const NOWHERE = '7b0c9f1e-1111-4111-8111-111111111111';
 

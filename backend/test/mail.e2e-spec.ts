@@ -24,6 +24,7 @@ const SAMPLES: Omit<LetterData, 'invitation' | 'password-reset'> = {
   returned: NEWS,
   issued: { ...NEWS, label: '1' },
   'superseded-you-hold-a-copy': { ...NEWS, label: '1' },
+  'withdrawn-you-hold-a-copy': { ...NEWS, label: '1', note: 'Wrong class' },
   'grant-of-checker-or-approver': {
     personName: 'Rurik Castellary',
     role: 'checker',

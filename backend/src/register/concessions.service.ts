@@ -27,6 +27,11 @@ export class ConcessionsService {
     );
   }
 
+  /** For the desk: those that end soon, or have ended. */
+  ending(person: SignedIn, withinDays: number): Promise<Concession[]> {
+    return this.concessions.ending({ projects: projectsOfDrafts(person), withinDays }, this.clock.now());
+  }
+
   ofRevision(revisionId: string): Promise<Concession[]> {
     return this.concessions.ofRevision(revisionId, this.clock.now());
   }

@@ -1,19 +1,25 @@
 import { Inject, Injectable } from '@nestjs/common';
-import type { AnswerOf, contract } from '@bellgap/common/api';
+import { STATES_SHOWN, type AnswerOf, type contract } from '@bellgap/common/api';
 import { AuditService } from '../audit/audit.service';
 import { sha256Of } from '../platform/canonical-json';
 import { Clock } from '../platform/clock';
 import { contentCodeOf } from '../platform/content-code';
-import { notFound } from '../platform/domain-error';
+import { notFound, wrongState } from '../platform/domain-error';
 import { KNEX, type Database } from '../platform/knex';
 import type { SignedIn } from '../platform/person';
-import { SpecificationsService, type RevisionAddress } from '../specifications/specifications.service';
-import { renderSheet } from './document';
+import { RegisterService } from '../register/register.service';
+import {
+  SpecificationsService,
+  type RevisionAddress,
+  type StoredRevision,
+} from '../specifications/specifications.service';
+import { renderSheet, type Issue, type SheetDocument } from './document';
 import { sheetContentOf } from './sheet-content';
 import { SheetsRepository } from './sheets.repository';
 
 export { contentCodeOf };
 
+export type { Issue };
 export type Sheet = AnswerOf<typeof contract.drawSheet>;
 
 export interface SheetFile {
@@ -29,13 +35,22 @@ export class SheetsService {
     private readonly audit: AuditService,
     private readonly specifications: SpecificationsService,
     private readonly sheets: SheetsRepository,
+    private readonly register: RegisterService,
   ) {}
+
+  /** The sheet of a revision that is being issued. */
+  render(revision: StoredRevision, issued: Issue): Promise<SheetDocument> {
+    return renderSheet(sheetContentOf(revision, issued));
+  }
 
   /** Draws the draft as it is stored. The same content gives the same bytes, and then the sheet that is kept stays. */
   async draw(person: SignedIn, address: RevisionAddress): Promise<Sheet> {
     // Taken first: a save that comes while the sheet is being drawn is then younger than the sheet.
     const drawnAt = this.clock.now();
     const revision = await this.specifications.storedWithFigures(person, address);
+    if (STATES_SHOWN.includes(revision.state)) {
+      throw wrongState('What is issued is never drawn again; its sheet is served as it was issued.');
+    }
     const { bytes, pages } = await renderSheet(sheetContentOf(revision));
     const sha256 = sha256Of(bytes);
     const { lastSheet } = revision;
@@ -78,9 +93,11 @@ export class SheetsService {
     };
   }
 
-  /** The last sheet drawn, from store, held against its hash. */
+  /** The sheet that was issued, or the last one drawn of a draft; from store, held against its hash. */
   async file(person: SignedIn, address: RevisionAddress): Promise<SheetFile> {
-    const { number, label, state, lastSheet } = await this.specifications.storedWithFigures(person, address);
+    const stored = await this.specifications.storedWithFigures(person, address);
+    if (stored.issuedSheetId !== null) return this.register.file(person, stored.issuedSheetId);
+    const { number, label, state, lastSheet } = stored;
     const bytes = lastSheet && (await this.sheets.bytes(lastSheet.id));
     if (!lastSheet || !bytes) throw notFound('sheet; draw it first');
     if (sha256Of(bytes) !== lastSheet.sha256)

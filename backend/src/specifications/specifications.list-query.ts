@@ -99,6 +99,12 @@ export class SpecificationsListQuery {
     return ((await query) as ListRow[]).map((row) => toItem(row, person));
   }
 
+  async ofIds(person: SignedIn, ids: readonly string[]): Promise<Map<string, SpecificationRow>> {
+    if (ids.length === 0) return new Map();
+    const rows = (await this.rows(true).whereIn('s.id', [...ids])) as ListRow[];
+    return new Map(rows.map((row) => [row.id, toItem(row, person)]));
+  }
+
   private drafts(projects: 'all' | string[]): Knex.QueryBuilder {
     const query = this.rows(true).where('r.state', 'draft').orderBy('r.saved_at', 'desc').limit(DESK_LIMIT);
     return projects === 'all' ? query : query.whereIn('s.project_id', projects);

@@ -1,6 +1,6 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { BodyOf, Evaluation, QueryOf, Revision, SpecificationInput, SpecificationRow } from '@bellgap/common/api';
-import { DRAFT_READERS, type contract } from '@bellgap/common/api';
+import { DRAFT_READERS, DRAFT_WRITERS, type Role, type contract } from '@bellgap/common/api';
 import { AuditService } from '../audit/audit.service';
 import { EvaluationsService } from '../evaluations/evaluations.service';
 import { Clock } from '../platform/clock';
@@ -51,11 +51,16 @@ export class SpecificationsService {
   }
 
   ownDrafts(person: SignedIn): Promise<SpecificationRow[]> {
-    return this.lists.draftsOf(person, draftProjects(person));
+    return this.lists.draftsOf(person, projectsOf(person, DRAFT_READERS));
   }
 
   outdatedDrafts(person: SignedIn): Promise<SpecificationRow[]> {
-    return this.lists.outdatedDrafts(person, draftProjects(person));
+    return this.lists.outdatedDrafts(person, projectsOf(person, DRAFT_WRITERS));
+  }
+
+  /** Rows of these specifications as a person sees them, each in its newest revision, by their ids. */
+  rowsOf(person: SignedIn, ids: readonly string[]): Promise<Map<string, SpecificationRow>> {
+    return this.lists.ofIds(person, ids);
   }
 
   /**
@@ -257,9 +262,9 @@ export class SpecificationsService {
   }
 }
 
-/** Projects of whose drafts a person may know. */
-function draftProjects({ grants }: SignedIn): 'all' | string[] {
-  const ids = grants.filter(({ role }) => DRAFT_READERS.includes(role)).map(({ projectId }) => projectId);
+/** Projects for which a person holds one of the roles. */
+function projectsOf({ grants }: SignedIn, roles: readonly Role[]): 'all' | string[] {
+  const ids = grants.filter(({ role }) => roles.includes(role)).map(({ projectId }) => projectId);
   return ids.includes(null) ? 'all' : ids.filter((id) => id !== null);
 }
 

@@ -17,7 +17,7 @@ import {
 } from '../specifications/specifications.service';
 import { ownFiguresFaults, passFaults, soFarFaults } from './check-faults';
 import { checkRecordOf } from './check-record-answer';
-import { CheckRecordsRepository, type StoredCheck } from './check-records.repository';
+import { CheckRecordsRepository, type CheckSoFar, type StoredCheck } from './check-records.repository';
 import { requireMove } from './moves';
 import { ReturnsService } from './returns.service';
 import { WorkflowLetters } from './workflow-letters';
@@ -76,11 +76,8 @@ export class ChecksService {
       const { revision, record } = await this.begun(person, address, version, db);
       const faults = soFarFaults(given, revision);
       if (faults.length > 0) throw invalid(faults);
-      const soFar = { ...given, differenceReason: given.differenceReason ?? '' } as Parameters<
-        CheckRecordsRepository['save']
-      >[1];
-      const { ticks, checklist, differenceReason, independent } = record;
-      const changes = changesBetween({ ticks, checklist, differenceReason, independent }, soFar);
+      const soFar = { ...given, differenceReason: given.differenceReason ?? '' } as CheckSoFar;
+      const changes = changesBetween(trailOf(record), trailOf(soFar));
       if (Object.keys(changes).length === 0) return;
       await this.records.save(record.id, soFar, db);
       await this.record(db, revision, person, 'check.saved', changes);
@@ -179,4 +176,17 @@ export class ChecksService {
     const { id: entityId, projectId } = revision;
     return this.audit.record(db, { actorId: person.id, action, entity: 'revision', entityId, projectId, changes });
   }
+}
+
+/** What the trail tells of a check as far as it has come: by input and by point. */
+function trailOf({ ticks, checklist, differenceReason, independent }: CheckSoFar) {
+  const entry = (word: string, note: string) => (note ? `${word}: ${note}` : word);
+  return {
+    ticks: Object.fromEntries(
+      ticks.map(({ path, agreed, seenIn = '' }) => [path, entry(agreed ? 'agreed' : 'not agreed', seenIn)]),
+    ),
+    checklist: Object.fromEntries(checklist.map(({ item, answer, note }) => [item, entry(answer, note)])),
+    differenceReason,
+    independent,
+  };
 }

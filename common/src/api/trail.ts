@@ -31,6 +31,9 @@ export const ACTION_LABELS: Record<string, string> = {
   'remark.raised': 'Raised a remark',
   'remark.answered': 'Answered a remark',
   'remark.closed': 'Closed a remark',
+  'revision.issued': 'Approved and issued',
+  'revision.superseded': 'Superseded by its successor',
+  'revision.withdrawn': 'Withdrew an issued sheet',
   'revision-note.written': 'Wrote a note',
   'revision-note.removed': 'Took a note away',
   'sheet.drawn': 'Drew the sheet',
@@ -101,15 +104,23 @@ export const TRAIL_FIELD_LABELS: Record<string, string> = {
   validFrom: 'Valid from',
   validTo: 'Valid to',
   grantId: 'Grant',
+  successor: 'Successor',
+  concessions: 'Acceptances and concessions',
 };
 
 const INPUT = 'input.';
 const OVERRIDES = 'overrides.';
+const TICKS = 'ticks.';
+const CHECKLIST_POINTS = 'checklist.';
 
 /** The words of a path such as "input.site.altitudeM", "overrides.system.highestVoltageKv" or "title". */
 export function trailFieldLabel(path: string): string {
   if (path.startsWith(OVERRIDES))
     return `Reason of the override, ${lowered(trailFieldLabel(path.slice(OVERRIDES.length)))}`;
+  if (path.startsWith(TICKS)) return `Input seen, ${lowered(trailFieldLabel(path.slice(TICKS.length)))}`;
+  if (path.startsWith(CHECKLIST_POINTS)) {
+    return `Checklist, ${lowered(inWords(path.slice(CHECKLIST_POINTS.length)))}`;
+  }
   const own = TRAIL_FIELD_LABELS[path];
   if (own !== undefined) return own;
   const field = path.startsWith(INPUT) ? path.slice(INPUT.length) : path;

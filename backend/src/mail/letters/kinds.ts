@@ -44,6 +44,7 @@ export interface LetterData {
   returned: RevisionNews;
   issued: RevisionNews;
   'superseded-you-hold-a-copy': RevisionNews;
+  'withdrawn-you-hold-a-copy': RevisionNews;
   'grant-of-checker-or-approver': GrantNews;
   'last-seal': SealNews;
 }

@@ -71,6 +71,14 @@ export const LETTER_TEXTS: { [K in LetterKind]: Text<K> } = {
       closing: 'Take the earlier print or file out of use, and tell whoever had it from you.',
     }),
 
+  'withdrawn-you-hold-a-copy': (news, around) =>
+    aboutRevision(news, around, {
+      subject: 'is withdrawn: you hold a copy',
+      says: `${news.byName} has withdrawn a sheet of which you hold a copy. No other is in force in its place.`,
+      action: 'Open the sheet',
+      closing: 'Take the print or file out of use, and tell whoever had it from you.',
+    }),
+
   'grant-of-checker-or-approver': (news, { pageOf }) => ({
     subject: `${news.personName} may now act as ${roleOf(news)}`,
     paragraphs: [
