@@ -15,7 +15,7 @@ export function contentOf(step: number): SheetContent {
   const input = sampleInput(step * 37);
   const context = sampleContext();
   return {
-    project: { code: 'KL221', title: 'Saltgrave - Ondara', siteTimeZone: '+04:00', paper: 'A4' },
+    project: { code: 'KL221', title: 'Saltgrave - Ondara', siteTimeZone: 'Etc/GMT-4', paper: 'A4' },
     number: `INS-221-${String(900 + step)}`,
     title: 'Suspension strings, zone Z3',
     revision: 'A',

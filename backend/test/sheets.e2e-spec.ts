@@ -85,6 +85,21 @@ describe('sheets of drafts', () => {
     expect(await test.database.owner('sheets').where({ revision_id: id }).pluck<string[]>('id')).toHaveLength(1);
   });
 
+  it('are refused in words where a sign of the title cannot be printed', async () => {
+    await begin(engineer, 'L1', 'S-9');
+    await engineer.call(saveRevision, {
+      params: at('S-9'),
+      version: 1,
+      body: { title: 'Strings 線', input: lineInput(), overrides: [] },
+    });
+    const { status, answer } = await engineer.call(drawSheet, { params: at('S-9') });
+    expect(status).toBe(422);
+    expect(answer).toMatchObject({
+      code: 'validation',
+      detail: 'The sheet\'s fonts have no sign for "線" (U+7DDA) in "Strings 線"',
+    });
+  });
+
   it('do not exist before they are drawn, nor for who may not see drafts', async () => {
     await begin(engineer, 'L1', 'S-5');
     expect((await engineer.call(sheetFile, { params: at('S-5') })).status).toBe(404);

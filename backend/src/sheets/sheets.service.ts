@@ -4,7 +4,7 @@ import { AuditService } from '../audit/audit.service';
 import { sha256Of } from '../platform/canonical-json';
 import { Clock } from '../platform/clock';
 import { contentCodeOf } from '../platform/content-code';
-import { notFound, wrongState } from '../platform/domain-error';
+import { DomainError, notFound, wrongState } from '../platform/domain-error';
 import { KNEX, type Database } from '../platform/knex';
 import type { SignedIn } from '../platform/person';
 import { RegisterService } from '../register/register.service';
@@ -13,7 +13,7 @@ import {
   type RevisionAddress,
   type StoredRevision,
 } from '../specifications/specifications.service';
-import { renderSheet, type Issue, type SheetDocument } from './document';
+import { MissingGlyphError, renderSheet, type Issue, type SheetContent, type SheetDocument } from './document';
 import { sheetContentOf } from './sheet-content';
 import { SheetsRepository } from './sheets.repository';
 
@@ -25,6 +25,15 @@ export type Sheet = AnswerOf<typeof contract.drawSheet>;
 export interface SheetFile {
   name: string;
   bytes: Buffer;
+}
+
+/** A sign that cannot be printed is said to who asks, so that he can write it otherwise. */
+async function print(content: SheetContent): Promise<SheetDocument> {
+  try {
+    return await renderSheet(content);
+  } catch (error) {
+    throw error instanceof MissingGlyphError ? new DomainError('validation', error.message) : error;
+  }
 }
 
 @Injectable()
@@ -40,7 +49,7 @@ export class SheetsService {
 
   /** The sheet of a revision that is being issued. */
   render(revision: StoredRevision, issued: Issue): Promise<SheetDocument> {
-    return renderSheet(sheetContentOf(revision, issued));
+    return print(sheetContentOf(revision, issued));
   }
 
   /** Draws the draft as it is stored. The same content gives the same bytes, and then the sheet that is kept stays. */
@@ -51,7 +60,7 @@ export class SheetsService {
     if (STATES_SHOWN.includes(revision.state)) {
       throw wrongState('What is issued is never drawn again; its sheet is served as it was issued.');
     }
-    const { bytes, pages } = await renderSheet(sheetContentOf(revision));
+    const { bytes, pages } = await print(sheetContentOf(revision));
     const sha256 = sha256Of(bytes);
     const { lastSheet } = revision;
     if (lastSheet?.sha256 === sha256 && lastSheet.drawnAt >= revision.savedAt) {
@@ -97,11 +106,11 @@ export class SheetsService {
   async file(person: SignedIn, address: RevisionAddress): Promise<SheetFile> {
     const stored = await this.specifications.storedWithFigures(person, address);
     if (stored.issuedSheetId !== null) return this.register.file(person, stored.issuedSheetId);
-    const { number, label, state, lastSheet } = stored;
+    const { number, label, lastSheet } = stored;
     const bytes = lastSheet && (await this.sheets.bytes(lastSheet.id));
     if (!lastSheet || !bytes) throw notFound('sheet; draw it first');
     if (sha256Of(bytes) !== lastSheet.sha256)
       throw new Error(`The stored bytes of sheet ${lastSheet.id} do not match their hash`);
-    return { name: `${number}_${label}${state === 'draft' ? '_draft' : ''}.pdf`, bytes };
+    return { name: `${number}_${label}_draft.pdf`, bytes };
   }
 }

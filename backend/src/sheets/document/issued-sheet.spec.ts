@@ -68,10 +68,22 @@ describe('an issued sheet', () => {
     for (const words of ['Tamsin Orvelle', 'Ruben Castellary', 'Amara Holvenstein', 'Issued'])
       expect(first).toContain(words);
     expect(first).toContain('2026-03-12 2026-03-17 2026-03-19');
-    expect(first).toContain("Dates are those of the site's time zone, Etc/GMT-4 (UTC+04:00).");
+    expect(first).toContain("Dates and times are those of the site's time zone, Etc/GMT-4 (UTC+04:00).");
     expect(first).toContain('1 concession a requirement is not met and was conceded for a time, until 2026-12-31');
     expect(first).toContain('1 acceptance');
     expect(first).toContain('1 not waited for');
+  });
+
+  it('names the issue that it supersedes, and the category of the check', async () => {
+    const [first, second] = issuedContent(suspensionCase).issued!.revisionHistory;
+    const revisionHistory = [
+      { ...first!, label: '0', on: '2025-11-04' },
+      { ...second!, label: '1', on: '2026-03-19' },
+    ];
+    const { bytes } = await renderSheet(issuedContent(suspensionCase, { revision: '1' }, { revisionHistory }));
+    const page = joined(pagesOf(bytes)[0] ?? '');
+    expect(page).toContain('Supersedes revision 0 of 2025-11-04.');
+    expect(page).toContain('checked, category 2');
   });
 
   it('carries check record, remarks with answers, concessions with their ends, and its revisions', async () => {
@@ -111,6 +123,13 @@ describe('an issued sheet', () => {
     const figure = flat(sheet.elements).find(({ alt }) => alt?.startsWith('QR code'));
     expect(squareSideMm(figure?.marks ?? [])).toBeGreaterThanOrEqual(18);
     for (const { before } of sheet.artifacts.slice(1)) expect(squareSideMm(before)).toBeGreaterThanOrEqual(14);
+  });
+
+  it('can be scanned with a long address too', async () => {
+    const verificationUrl = `https://${'sheets-of-the-northern-lines.'.repeat(2)}kigc.example/verify/7K2M94QXHV3NC8TA`;
+    const content = issuedContent(suspensionCase, {}, { verificationUrl });
+    const { bytes } = await renderSheet(content);
+    expect(scanned(bytes, 2, layOutSheet(content))).toBe(verificationUrl);
   });
 
   it('gives the same bytes for the same content, and others where a seal differs', async () => {

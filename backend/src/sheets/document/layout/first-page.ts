@@ -124,10 +124,16 @@ function headBlocks(content: SheetContent): Block[] {
       ),
     );
   }
-  blocks.push(...governing(content));
+  blocks.push(...governing(content), ...supersedes(content));
   const items = notices(content);
   if (items.length > 0) blocks.push({ kind: 'notice', items });
   return blocks;
+}
+
+/** The issue before this one, which this one takes the place of. */
+function supersedes({ issued, revision }: SheetContent): Block[] {
+  const before = issued?.revisionHistory.filter(({ label }) => /^\d+$/.test(label) && label !== revision).at(-1);
+  return before ? [paragraph(`Supersedes revision ${before.label} of ${before.on}.`, { tone: 'soft' })] : [];
 }
 
 function placeDrawing(

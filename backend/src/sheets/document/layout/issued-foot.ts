@@ -63,7 +63,7 @@ export function issuedFoot(
   };
   if (page > 1) return { artifacts: [...named, ...pageMarks, ...code, ...uncontrolled, squareMark], elements: [] };
 
-  const zone = line(`Dates are those of the site's time zone, ${zoneWords(content)}.`, {
+  const zone = line(`Dates and times are those of the site's time zone, ${zoneWords(content)}.`, {
     face: 'sans',
     size: SMALL,
     tone: 'soft',

@@ -24,6 +24,7 @@ const signed = (person: Signature | null): string => (person ? `${person.name}\n
 
 function rowsOf(content: SheetContent, scale: string): Field[][] {
   const { project, basis, evaluation } = content;
+  const category = content.issued?.checkRecords[0]?.checkCategory;
   return [
     [
       { label: `project ${project.code}`, text: project.title, share: 2.5 },
@@ -34,7 +35,7 @@ function rowsOf(content: SheetContent, scale: string): Field[][] {
     ],
     [
       { label: 'drafted', text: signed(content.drafted), share: 1.6 },
-      { label: 'checked', text: signed(content.checked), share: 1.6 },
+      { label: category ? `checked, category ${category}` : 'checked', text: signed(content.checked), share: 1.6 },
       { label: 'approved', text: signed(content.approved), share: 1.6 },
       {
         label: 'design basis',

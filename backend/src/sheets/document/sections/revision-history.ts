@@ -18,7 +18,7 @@ export function revisionHistory(content: SheetContent): Block[] {
   ];
   return [
     heading(1, 'Revisions'),
-    paragraph(`Dates are those of the site's time zone, ${zoneWords(content)}.`, { tone: 'soft' }),
+    paragraph(`Dates and times are those of the site's time zone, ${zoneWords(content)}.`, { tone: 'soft' }),
     {
       kind: 'table',
       summary: 'Revisions of this sheet',

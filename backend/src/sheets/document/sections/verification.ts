@@ -1,11 +1,9 @@
 import { inFours } from '@bellgap/common/api';
 import { heading, paragraph, type Block } from '../blocks';
 import type { SheetContent } from '../content';
-import { zoneWords } from '../words';
 
 /** How to find out whether a print is still good. */
-export function verification(content: SheetContent): Block[] {
-  const { issued, number, revision } = content;
+export function verification({ issued }: SheetContent): Block[] {
   if (!issued) return [];
   return [
     heading(1, 'Verification'),
@@ -19,10 +17,7 @@ export function verification(content: SheetContent): Block[] {
       rows: [
         { label: 'Verification code', value: inFours(issued.verificationCode), mono: true },
         { label: 'Look up at', value: issued.verificationUrl },
-        { label: 'Number and revision', value: `${number} revision ${revision}`, mono: true },
         { label: 'Content code', value: issued.contentCode, mono: true },
-        { label: 'Issued on', value: issued.issuedOn },
-        { label: 'Time zone of all dates', value: zoneWords(content) },
         { label: 'Last seal of the trail', value: issued.lastSeal ?? 'none yet', mono: issued.lastSeal !== null },
       ],
     },
