@@ -386,3 +386,52 @@ describe('properties', () => {
     }
   });
 });
+
+describe('a method beside the chosen one', () => {
+  const whyOf = (given: Case, method: string): string[] =>
+    (assess(given).besideWhyNot ?? []).flatMap((one) => (one.method === method ? [`${one.distance}: ${one.why}`] : []));
+
+  it('says why it has no figure, distance by distance, and is never silent', () => {
+    const nothing = 'Neither the kind of gap nor the source of the fast-front voltage is chosen.';
+    expect(whyOf({}, 'en-theoretical')).toEqual([`phase-to-earth: ${nothing}`, `phase-to-phase: ${nothing}`]);
+    expect(whyOf({}, 'north-american')).toEqual([
+      'phase-to-earth: These distances are for the North American basis only.',
+      'phase-to-phase: These distances are for the North American basis only.',
+    ]);
+    expect(whyOf({}, 'iec-table')).toEqual([]);
+    expect(whyOf({ clearance: { method: 'en-empirical' }, lightningKv: null }, 'iec-table')).toEqual([
+      'phase-to-earth: The lightning level is not known.',
+      'phase-to-phase: The lightning level is not known.',
+    ]);
+  });
+
+  it('has a figure or a reason for each distance, whatever is chosen', () => {
+    const aCase = fc.record({
+      highestVoltageKv: fc.constantFrom(null, 72.5, 245, 362, 420, 1100),
+      altitudeM: fc.constantFrom(null, 0, 1500, 3200, 4800),
+      lightningKv: fc.constantFrom(null, 325, 1050, 1425),
+      switchingKv: fc.constantFrom(null, 950, 1050),
+      clearance: fc.constantFrom(
+        null,
+        ...(['iec-table', 'en-empirical', 'en-theoretical', 'north-american', null] as const).map((method) => ({
+          method,
+          fastFrontFrom: 'level' as const,
+        })),
+      ),
+    });
+    fc.assert(
+      fc.property(aCase, (given) => {
+        const { method, rows, besideWhyNot = [] } = assess(given);
+        for (const { why } of besideWhyNot) expect(why).not.toBe('');
+        for (const other of ['iec-table', 'en-empirical', 'en-theoretical', 'north-american'] as const) {
+          for (const distance of ['phase-to-earth', 'phase-to-phase'] as const) {
+            const said = besideWhyNot.some((one) => one.method === other && one.distance === distance);
+            const has = rows.some((row) => row.method === other && row.distance === distance && row.valueMm !== null);
+            if (other === method) expect(said).toBe(false);
+            else expect([other, distance, said || has]).toEqual([other, distance, true]);
+          }
+        }
+      }),
+    );
+  });
+});

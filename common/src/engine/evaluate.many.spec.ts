@@ -1,195 +1,11 @@
 import fc from 'fast-check';
 import { evaluate } from './evaluate';
-import {
-  ARCING_DEVICES,
-  ARRANGEMENTS,
-  CLEARANCE_METHODS,
-  CONTAMINATION_LEVELS,
-  EN_GAPS,
-  FAST_FRONT_SOURCES,
-  LOAD_CASE_KINDS,
-  MECHANICAL_BASES,
-  NEUTRAL_EARTHINGS,
-  POLLUTION_CLASSES,
-  SAFETY_SOURCES,
-  SHAPES_PHASE_TO_EARTH,
-  SHAPES_PHASE_TO_PHASE,
-  SURROUNDINGS,
-  type Basis,
-  type Evaluation,
-  type InsulationLevelInput,
-  type InsulatorUnit,
-  type ShedDimensions,
-  type SpecificationInput,
-} from './model';
-import { insulationLevelsFor } from './overvoltage';
-import {
-  aCeramicRod,
-  aCompositeRod,
-  aContext,
-  aDisc,
-  aSuspensionUnit,
-  companySettings,
-} from './testing/specifications';
+import type { Evaluation, SpecificationInput } from './model';
+import { anyCase, type AnyCase } from './testing/any-specification';
+import { aContext } from './testing/specifications';
 
 /** Ten thousand inputs of every kind, whole and in part; what has to hold of every answer holds of each of them. */
 const RUNS = 10_000;
-
-/** Often there, sometimes not filled in, sometimes left out altogether. */
-const maybe = <T>(value: fc.Arbitrary<T>): fc.Arbitrary<T | null> => fc.option(value, { freq: 25, nil: null });
-const oneOf = <const T>(values: readonly T[]): fc.Arbitrary<T | null> => maybe(fc.constantFrom(...values));
-const real = (min: number, max: number): fc.Arbitrary<number | null> =>
-  maybe(fc.double({ min, max, noNaN: true, noDefaultInfinity: true }));
-const whole = (min: number, max: number): fc.Arbitrary<number | null> => maybe(fc.integer({ min, max }));
-
-const LEVELS: { basis: Basis; highestVoltageKv: number; level: InsulationLevelInput }[] = (
-  ['iec', 'north-american'] as const
-).flatMap((basis) =>
-  insulationLevelsFor(null, basis).map(
-    ({ highestVoltageKv, lightningKv, switchingKv, powerFrequencyKv, switchingPhaseRatio }) => ({
-      basis,
-      highestVoltageKv,
-      level: { lightningKv, switchingKv, powerFrequencyKv, switchingPhaseRatio },
-    }),
-  ),
-);
-
-const aPollution = (basis: Basis): fc.Arbitrary<NonNullable<SpecificationInput['site']>['pollution']> =>
-  basis === 'iec'
-    ? fc.record({
-        class: oneOf(POLLUTION_CLASSES),
-        type: fc.constant('A' as const),
-        basis: fc.constant('measured' as const),
-        recheckBy: fc.constant(null),
-      })
-    : fc.record({
-        contamination: oneOf(CONTAMINATION_LEVELS),
-        basis: fc.constant('estimated' as const),
-        recheckBy: fc.constant(null),
-      });
-
-const aString: fc.Arbitrary<NonNullable<SpecificationInput['string']>> = fc.record({
-  insulatorCode: fc.constant('any'),
-  arrangement: oneOf(ARRANGEMENTS),
-  parallelStrings: whole(1, 4),
-  rodsInSeries: whole(1, 3),
-  surroundings: oneOf(SURROUNDINGS),
-  spareUnits: whole(0, 3),
-  arcingDevices: oneOf(ARCING_DEVICES),
-  arcGapMm: real(200, 6000),
-  hardwareLengthMm: real(0, 900),
-  vAngleWindwardDeg: real(20, 70),
-  vAngleLeewardDeg: real(20, 70),
-  postAngleDeg: real(0, 90),
-});
-
-const aClearance: fc.Arbitrary<NonNullable<SpecificationInput['clearance']>> = fc.record({
-  method: oneOf(CLEARANCE_METHODS),
-  shapePhaseToEarth: oneOf(SHAPES_PHASE_TO_EARTH),
-  shapePhaseToPhase: oneOf(SHAPES_PHASE_TO_PHASE),
-  fastFrontFrom: oneOf(FAST_FRONT_SOURCES),
-  enGap: oneOf(EN_GAPS),
-  externalClearanceMm: real(300, 9000),
-  safetySource: oneOf(SAFETY_SOURCES),
-});
-
-const aLoadCase = fc.record({
-  name: maybe(fc.constantFrom('everyday', 'storm')),
-  kind: oneOf(LOAD_CASE_KINDS),
-  conductorWeightNPerM: real(3, 60),
-  windPressurePa: real(0, 3000),
-  conductorDiameterMm: real(8, 60),
-  iceRadialMm: fc.oneof(fc.constant(null), real(0, 40)),
-  iceDensityKgPerM3: real(300, 920),
-  conductorTensionN: real(0, 90_000),
-  stringWindN: real(0, 2000),
-  stringWeightN: real(0, 5000),
-  hardwareWeightN: real(0, 2000),
-});
-
-const mechanicalLoads: fc.Arbitrary<NonNullable<SpecificationInput['mechanical']>> = fc.record({
-  basis: oneOf(MECHANICAL_BASES),
-  subconductors: whole(1, 4),
-  crossing: maybe(fc.boolean()),
-  acceptedStatistically: maybe(fc.boolean()),
-  windSpanM: real(0, 900),
-  weightSpanM: real(-200, 1200),
-  lineAngleDeg: real(-60, 60),
-  fittingsStrengthKn: fc.oneof(fc.constant(null), real(40, 400)),
-  cases: maybe(fc.array(aLoadCase, { maxLength: 2 })),
-});
-
-const aMeasure = fc.constantFrom(null, 12, 30, 45, 62, 95, 170);
-const someSheds: fc.Arbitrary<ShedDimensions> = fc.record({
-  spacingMm: aMeasure,
-  overhangMm: aMeasure,
-  secondOverhangMm: aMeasure,
-  clearanceMm: aMeasure,
-  pathMm: aMeasure,
-  pathClearanceMm: aMeasure,
-  underRibs: fc.constantFrom(null, true, false),
-});
-
-const UNITS = [
-  aDisc(),
-  aDisc({
-    spacingMm: 170,
-    diameterMm: 330,
-    creepageMm: 525,
-    profile: 'fog',
-    failingLoadKn: 160,
-    creepageIsNominal: true,
-  }),
-  aSuspensionUnit(),
-  aCompositeRod(),
-  aCompositeRod({ dryArcMm: null, routineTestLoadKn: 60 }),
-  aCeramicRod(),
-  aCeramicRod({ averageDiameterMm: null }),
-  aCompositeRod({ kind: 'line-post' }),
-  aCeramicRod({ kind: 'line-post', cantileverStrengthKn: 12 }),
-  null,
-];
-const withSheds = (unit: InsulatorUnit | null): fc.Arbitrary<InsulatorUnit | null> =>
-  unit === null ? fc.constant(null) : fc.option(someSheds, { nil: null }).map((sheds) => ({ ...unit, sheds }));
-const SETTINGS = [
-  companySettings(),
-  companySettings({
-    tensionExtraUnits: 2,
-    creepageAltitudeOriginM: 0,
-    companyMinimumUnits: [132, 220].map((nominalVoltageKv) => ({ nominalVoltageKv, units: 15 })),
-  }),
-];
-
-const aCase = fc.constantFrom(...LEVELS).chain(({ basis, highestVoltageKv, level }) =>
-  fc.record({
-    insulator: fc.constantFrom(...UNITS).chain(withSheds),
-    settings: fc.constantFrom(...SETTINGS),
-    input: fc.record(
-      {
-        kind: oneOf(['line', 'line', 'bay'] as const),
-        basis: maybe(fc.constant(basis)),
-        system: maybe(
-          fc.record({
-            nominalVoltageKv: oneOf([highestVoltageKv / 1.1, 33, 66, 132, 220].filter((kv) => kv <= highestVoltageKv)),
-            highestVoltageKv: maybe(fc.constant(highestVoltageKv)),
-            frequencyHz: oneOf([50, 60]),
-            neutralEarthing: oneOf(NEUTRAL_EARTHINGS),
-            earthFault: oneOf(['cleared', 'sustained'] as const),
-            insulationLevel: maybe(fc.constantFrom(level, { ...level, levelHoldsToM: 2000 })),
-          }),
-        ),
-        site: maybe(
-          fc.record({ altitudeM: maybe(fc.integer({ min: -400, max: 5200 })), pollution: aPollution(basis) }),
-        ),
-        string: maybe(aString),
-        clearance: maybe(aClearance),
-        mechanical: maybe(mechanicalLoads),
-      },
-      { requiredKeys: ['kind', 'basis', 'system', 'site'] },
-    ) satisfies fc.Arbitrary<SpecificationInput>,
-  }),
-);
-type Case = typeof aCase extends fc.Arbitrary<infer T> ? T : never;
 
 /** Plain checks instead of matchers: matchers would take longer than ten thousand evaluations. */
 function faultOf(holds: boolean, what: string): string[] {
@@ -216,7 +32,7 @@ function bridgeFaults({ ruleOfThumb, string }: Evaluation): string[] {
 /** What was left out, or could not be assessed, is named and never passed. */
 function passedFaults(
   { string, clearances, mechanical, notAssessed, cautions }: Evaluation,
-  { input }: Case,
+  { input }: AnyCase,
 ): string[] {
   const parts = new Set(notAssessed.map(({ part }) => part.split('.')[0]));
   const line = input.kind !== 'bay';
@@ -253,7 +69,7 @@ function passedFaults(
 }
 
 /** Checks of the profile say something and change nothing. */
-function profileFaults({ string, cautions, notAssessed }: Evaluation, { insulator }: Case): string[] {
+function profileFaults({ string, cautions, notAssessed }: Evaluation, { insulator }: AnyCase): string[] {
   const own = cautions.filter(({ code }) => code.startsWith('profile-'));
   const named = notAssessed.some(({ part }) => part === 'string.profile');
   return [
@@ -294,7 +110,7 @@ describe(`${RUNS} inputs of every kind`, () => {
     let posts = 0;
     let profiles = 0;
     fc.assert(
-      fc.property(aCase, (one) => {
+      fc.property(anyCase, (one) => {
         const context = aContext({ insulator: one.insulator, settings: one.settings });
         const evaluation = evaluate(one.input, context, { trace: false });
         const again = evaluate(JSON.parse(JSON.stringify(one.input)) as SpecificationInput, context, { trace: false });

@@ -67,6 +67,8 @@ export const FIELDS = {
   'string.vAngleWindwardDeg': { label: 'V leg angle, windward', unit: '°', above: 0, atMost: 89 },
   'string.vAngleLeewardDeg': { label: 'V leg angle, leeward', unit: '°', above: 0, atMost: 89 },
   'string.postAngleDeg': { label: 'Post above the horizontal', unit: '°', atLeast: 0, atMost: 90 },
+  'string.sharing.pinToEarthRatio': { label: 'Pin to earth over self capacitance, c', atLeast: 0, atMost: 1 },
+  'string.sharing.pinToLineRatio': { label: 'Pin to line over self capacitance, k', atLeast: 0, atMost: 1 },
   'clearance.method': { label: 'Clearance method' },
   'clearance.shapePhaseToEarth': { label: 'Shape, phase to earth' },
   'clearance.shapePhaseToPhase': { label: 'Shape, between phases' },
@@ -179,6 +181,7 @@ export const CHOICE_LABELS = {
     'height-outside-boundary': 'Height outside the boundary',
   },
   yesNo: { yes: 'Yes', no: 'No' },
+  ratioOrigin: { entered: 'entered', usual: 'usual, practice' },
   bridgeCause: {
     'rule-to-method': 'Rule to method',
     pollution: 'Pollution',

@@ -82,10 +82,16 @@ export function part<S extends yup.ObjectShape>(shape: S) {
   return yup.object(shape).noUnknown().nullable().optional().default(undefined);
 }
 
+/** A list, which may be left out; none of its entries may be, since nothing could be said of one that is not there. */
 export function list<S extends yup.AnySchema>(label: string, item: S, atMost: number) {
+  const whole = item.test(
+    'no-empty-entry',
+    `${label}: an entry is empty`,
+    (v: unknown) => v !== null && v !== undefined,
+  );
   return yup
     .array()
-    .of(item)
+    .of(whole as S)
     .typeError(`${label}: a list is needed`)
     .max(atMost, `${label}: at most ${atMost}`)
     .nullable();

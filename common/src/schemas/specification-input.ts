@@ -109,6 +109,10 @@ const string = part({
   vAngleWindwardDeg: legAngle('string.vAngleWindwardDeg'),
   vAngleLeewardDeg: legAngle('string.vAngleLeewardDeg'),
   postAngleDeg: measureOf('string.postAngleDeg'),
+  sharing: part({
+    pinToEarthRatio: measureOf('string.sharing.pinToEarthRatio'),
+    pinToLineRatio: measureOf('string.sharing.pinToLineRatio'),
+  }),
 });
 
 const clearance = part({

@@ -137,7 +137,7 @@ export const worksheetInputSchema = yup
         slowFrontPhaseToPhasePu: figure('places.slowFrontPhaseToPhasePu'),
         phaseToEarthCoordinationFactor: figure('places.phaseToEarthCoordinationFactor'),
         phaseToPhaseCoordinationFactor: figure('places.phaseToPhaseCoordinationFactor'),
-      }).test('described', 'Places: each place needs its figures', (place) => place !== null),
+      }),
       WORKSHEET_PLACES.length,
     ).test('each-place-once', 'Places: each place once', (places) => {
       const named = (places ?? []) as ({ place?: string | null } | null)[];

@@ -5,7 +5,7 @@ import type { Calculation } from '../trace';
 import { empiricalMethod } from './en-empirical';
 import { theoreticalMethod, type StringBeside } from './en-theoretical';
 import { tableMethod } from './iec-table';
-import { DISTANCE_WORDS, type MethodAnswer, type MethodDistance } from './method-rows';
+import { DISTANCE_WORDS, noAnswer, type MethodAnswer, type MethodDistance } from './method-rows';
 import { northAmericanMethod } from './north-american';
 import { safetyDistances } from './safety';
 
@@ -27,6 +27,8 @@ export interface ClearancesCase {
 }
 
 const PART = { 'phase-to-earth': 'clearances.phaseToEarthMm', 'phase-to-phase': 'clearances.phaseToPhaseMm' } as const;
+
+const ONLY_NORTH_AMERICAN = 'These distances are for the North American basis only.';
 
 const POWER_FREQUENCY_TO_EARTH = 'clearances.powerFrequencyPhaseToEarth';
 
@@ -96,6 +98,20 @@ function withoutAnswered(chosen: MethodAnswer, all: readonly MethodAnswer[]): Me
   return { ...chosen, missing: chosen.missing.filter(({ part }) => part !== POWER_FREQUENCY_TO_EARTH) };
 }
 
+/** Why the methods beside the chosen one have no figure; a method that was not even tried says what it is for. */
+function besideWhyNot(
+  all: readonly MethodAnswer[],
+  chosen: MethodAnswer | undefined,
+): NonNullable<ClearancesResult['besideWhyNot']> {
+  const tried = new Set(all.map(({ method }) => method));
+  const untried = tried.has('north-american') ? [] : [noAnswer('north-american', ONLY_NORTH_AMERICAN)];
+  return [...all, ...untried]
+    .filter((answer) => answer !== chosen)
+    .flatMap(({ method, distances }) =>
+      distances.flatMap(({ distance, whyNot }) => (whyNot === null ? [] : [{ method, distance, why: whyNot }])),
+    );
+}
+
 /**
  * Clearances by the method chosen, with the rows of the other methods beside them where their inputs are there.
  * Distances between phases, to earth, to a section and for safety are four different things; one is never computed from
@@ -120,5 +136,6 @@ export function assessClearances(given: ClearancesCase, calculation: Calculation
       ...ordered.flatMap(({ distances, beside }) => [...distances.flatMap(({ rows }) => rows), ...beside]),
       ...safety,
     ],
+    besideWhyNot: besideWhyNot(all, chosen),
   };
 }

@@ -141,7 +141,7 @@ export function putTogether(given: StringCase, parts: Parts, calculation: Calcul
     unitsOut: disc && units !== null ? unitsOut(demands, units) : [],
     coordination: coordination(given, dryArcMm, calculation),
     testLevels,
-    ...voltageSharing(unit, units, calculation),
+    ...voltageSharing({ unit, units, given: given.string.sharing }, calculation),
   };
   cautionString(given, parts, result, calculation);
   return result;

@@ -45,6 +45,32 @@ const emptyCase = (name: string, kind: LoadCaseInput['kind']): MechanicalCaseRes
   verdict: 'unknown',
 });
 
+/** Every input of the loads and of a case, so that one left out reads as one not known. */
+const NOT_KNOWN: MechanicalInput = {
+  basis: null,
+  subconductors: null,
+  crossing: null,
+  acceptedStatistically: null,
+  windSpanM: null,
+  weightSpanM: null,
+  lineAngleDeg: null,
+  fittingsStrengthKn: null,
+  cases: null,
+};
+const CASE_NOT_KNOWN: LoadCaseInput = {
+  name: null,
+  kind: null,
+  conductorWeightNPerM: null,
+  windPressurePa: null,
+  conductorDiameterMm: null,
+  iceRadialMm: null,
+  iceDensityKgPerM3: null,
+  conductorTensionN: null,
+  stringWindN: null,
+  stringWeightN: null,
+  hardwareWeightN: null,
+};
+
 const isPost = (unit: InsulatorUnit | null): boolean => unit?.kind === 'line-post';
 
 /** What the loads are held against: failing load, of line posts the strength in bending; null is not known. */
@@ -180,9 +206,11 @@ const NOTHING: MechanicalResult = {
  * Loads on the string by case, the strength they ask for and whether the chosen unit has it. Factors of one basis only,
  * with loads of that basis; the same factor with one string of a set missing.
  */
-export function assessMechanical(given: Mechanical, calculation: Calculation): MechanicalResult {
-  const { mechanical, string, unit, situation } = given;
-  const cases = mechanical.cases ?? [];
+export function assessMechanical(asGiven: Mechanical, calculation: Calculation): MechanicalResult {
+  const mechanical = { ...NOT_KNOWN, ...asGiven.mechanical };
+  const given = { ...asGiven, mechanical };
+  const { string, unit, situation } = given;
+  const cases = (mechanical.cases ?? []).map((one) => ({ ...CASE_NOT_KNOWN, ...one }));
   const unassessed = cases.map((one, index) => emptyCase(one.name ?? `case ${index + 1}`, one.kind));
   if (!isKnown(string)) {
     calculation.missing(PART, 'The string that carries the loads is not filled in.');

@@ -48,6 +48,14 @@ export interface UnitsOutResult {
   verdict: Verdict;
 }
 
+export const RATIO_ORIGINS = ['entered', 'usual'] as const;
+
+/** A capacitance of the voltage-sharing network over the self capacitance of a unit, and where it comes from. */
+export interface SharingRatio {
+  valueRatio: number;
+  from: (typeof RATIO_ORIGINS)[number];
+}
+
 export interface StringResult {
   units: number | null;
   unitsBeforeExtra: number | null;
@@ -91,6 +99,8 @@ export interface StringResult {
   /** Percent of the string's voltage per unit, line end first; empty where not assessed. */
   voltageSharing: number[];
   efficiencyPercent: number | null;
+  /** What the shares rest on; null where there are none. */
+  sharing?: { pinToEarth: SharingRatio; pinToLine: SharingRatio } | null;
 }
 
 export interface ClearanceRow {
@@ -115,6 +125,8 @@ export interface ClearancesResult {
   phaseToEarthMm: number | null;
   phaseToPhaseMm: number | null;
   rows: ClearanceRow[];
+  /** Why a method that is not the chosen one has no figure of its own for a distance. */
+  besideWhyNot?: { method: ClearanceMethod; distance: 'phase-to-earth' | 'phase-to-phase'; why: string }[];
 }
 
 /** One load case: loads of the whole set, and what one string of it carries. */

@@ -78,6 +78,14 @@ export interface SiteInput {
   pollution: PollutionInput | ContaminationInput | null;
 }
 
+/** Capacitances of the links between the units over the self capacitance of one; null is the usual figure. */
+export interface VoltageSharingInput {
+  /** Pin to earth. */
+  pinToEarthRatio: number | null;
+  /** Pin to line. */
+  pinToLineRatio: number | null;
+}
+
 export interface StringInput {
   insulatorCode: string | null;
   arrangement: Arrangement | null;
@@ -94,6 +102,7 @@ export interface StringInput {
   vAngleLeewardDeg?: number | null;
   /** Axis of a line post above the horizontal: 0 stands out from the pole, 90 stands upright. */
   postAngleDeg?: number | null;
+  sharing?: VoltageSharingInput | null;
 }
 
 export interface ClearanceInput {

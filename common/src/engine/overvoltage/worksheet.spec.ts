@@ -203,7 +203,7 @@ describe('the schema of a worksheet', () => {
     [{ ...aWorksheet(), powerFrequencySurface: 'wet' }, 'Surface at power frequency: choose one of'],
     [{ ...aWorksheet(), more: 1 }, 'more'],
     [aWorksheet({ places: [aWorksheet().places![0]!, aWorksheet().places![0]!] }), 'Places: each place once'],
-    [{ ...aWorksheet(), places: [null] }, 'Places: each place needs its figures'],
+    [{ ...aWorksheet(), places: [null] }, 'Places: an entry is empty'],
     [
       aWorksheet({ fastFront: { ...aWorksheet().fastFront!, subconductorsCount: 3 } }),
       'Sub-conductors of the line: choose one of 1, 2, 4, 6, 8',

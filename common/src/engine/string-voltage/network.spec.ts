@@ -98,8 +98,43 @@ describe('the voltage sharing of an evaluation', () => {
     expect(string?.efficiencyPercent).toBeCloseTo(10000 / (9 * string!.voltageSharing[0]!), 9);
     expect(notAssessed.map(({ part }) => part)).not.toContain('string.voltageSharing');
     const line = trace.find(({ id }) => id === 'string-voltage.network');
-    expect(line?.substitution).toContain('c = 0.1, k = 0');
+    expect(line?.substitution).toContain('c = 0.1 (usual, practice), k = 0 (usual, practice): ');
     expect(line?.source.status).toBe('practice');
+    expect(string?.sharing).toEqual({
+      pinToEarth: { valueRatio: 0.1, from: 'usual' },
+      pinToLine: { valueRatio: 0, from: 'usual' },
+    });
+  });
+
+  it('is that of the general network with the capacitances entered, as a general linear solver has it', () => {
+    const entered = { pinToEarthRatio: 0.18, pinToLineRatio: 0.04 };
+    const { string, trace } = evaluate(aLine({ string: { sharing: entered } }), aContext());
+    const u = byGeneralSolver(9, new Array<number>(8).fill(0.18), new Array<number>(8).fill(0.04));
+    expect(string?.voltageSharing[0]).toBeCloseTo(100 * (1 - u[7]!), 9);
+    expect(string?.voltageSharing.at(-1)).toBeCloseTo(100 * u[0]!, 9);
+    const line = trace.find(({ id }) => id === 'string-voltage.network');
+    expect(line?.substitution).toContain('c = 0.18 (entered), k = 0.04 (entered): ');
+    expect(line?.source.status).toBe('seen');
+  });
+
+  it('takes the usual figure for the one that is not entered, and changes no count', () => {
+    const withRatio = evaluate(
+      aLine({ string: { sharing: { pinToEarthRatio: null, pinToLineRatio: 0.03 } } }),
+      aContext(),
+    );
+    expect(withRatio.string?.sharing).toEqual({
+      pinToEarth: { valueRatio: 0.1, from: 'usual' },
+      pinToLine: { valueRatio: 0.03, from: 'entered' },
+    });
+    expect(withRatio.string?.units).toBe(evaluate(aLine(), aContext()).string?.units);
+  });
+
+  it('has no efficiency where the unit at the line end does not carry the most', () => {
+    const sharing = { pinToEarthRatio: 0.05, pinToLineRatio: 0.5 };
+    const { string, notAssessed } = evaluate(aLine({ string: { sharing } }), aContext());
+    expect(string?.voltageSharing).toHaveLength(9);
+    expect(string?.efficiencyPercent).toBeNull();
+    expect(notAssessed.map(({ part }) => part)).toContain('string.efficiencyPercent');
   });
 
   it('is not there for rods, and says so', () => {

@@ -32,7 +32,7 @@ export const InputsZone = memo(function InputsZone() {
 function OtherFaults() {
   const { faults } = useForm();
   const unclaimed = faults.filter(({ path }) =>
-    /^$|^(input\.)?(mechanical(\.cases)?$|towerHead|midSpan|bay|kind)/.test(fieldPath(path)),
+    /^$|^(input\.)?(mechanical(\.cases(\[\d+\])?)?$|towerHead|midSpan|bay|kind)/.test(fieldPath(path)),
   );
   if (unclaimed.length === 0) return null;
   return (

@@ -97,6 +97,8 @@ function cautionsOf(
   return cautions;
 }
 
+const NOTHING_CHOSEN = 'Neither the kind of gap nor the source of the fast-front voltage is chosen.';
+
 /**
  * Theoretical clearances of EN 50341-1 Annex E. To earth by the kind of gap and between phases: the larger of the
  * fast-front and, in range II, the slow-front distance; beside them the power-frequency distances for extreme wind, which
@@ -112,7 +114,7 @@ export function theoreticalMethod(given: TheoreticalMethodInput, calculation: Ca
   }
   if (situation.altitudeM === null) return noAnswer(METHOD, situation.altitudeWhyNot ?? 'The altitude is not known.');
   if (situation.stopped) return noAnswer(METHOD, 'A figure of the system lies outside the method.');
-  if (!chosen && enGap === null && (clearance.fastFrontFrom ?? null) === null) return noAnswer(METHOD, '');
+  if (!chosen && enGap === null && (clearance.fastFrontFrom ?? null) === null) return noAnswer(METHOD, NOTHING_CHOSEN);
   const altitudeM = Math.max(situation.altitudeM, ALTITUDE_LIMITS_M.origin);
   const fast = fastFrontVoltage(given, calculation);
   const ue2Kv = overvoltages?.slowFrontPhaseToEarthKvPeak ?? null;
