@@ -23,7 +23,7 @@ export class WorkflowLetters {
     const checkers = await this.grants.checkers(revision.projectId, checkCategory, db);
     await this.mail.send(db, withoutAuthors(checkers, revision), {
       kind: 'waits-for-check',
-      data: { ...newsOf(revision, by), dueOn, note: note || null },
+      data: { ...newsOf(revision, by, 'check'), dueOn, note: note || null },
     });
   }
 
@@ -32,7 +32,7 @@ export class WorkflowLetters {
     const others = withoutAuthors(approvers, revision).filter((id) => id !== by.id);
     await this.mail.send(db, others, {
       kind: 'waits-for-approval',
-      data: { ...newsOf(revision, by), dueOn: revision.submitted?.dueOn ?? null, note: note || null },
+      data: { ...newsOf(revision, by, 'approval'), dueOn: revision.submitted?.dueOn ?? null, note: note || null },
     });
   }
 
@@ -47,7 +47,10 @@ function withoutAuthors(people: readonly string[], { authors }: StoredRevision):
   return people.filter((id) => !authors.some((author) => author.id === id));
 }
 
-function newsOf({ number, title, label, projectCode }: StoredRevision, by: By): RevisionNews {
-  const path = `/projects/${encodeURIComponent(projectCode)}/specifications/${encodeURIComponent(number)}`;
+/** With the page that the letter leads to: that of the work, or the specification itself. */
+function newsOf(revision: StoredRevision, by: By, page: 'check' | 'approval' | null = null): RevisionNews {
+  const { number, title, label, projectCode } = revision;
+  const specification = `/projects/${encodeURIComponent(projectCode)}/specifications/${encodeURIComponent(number)}`;
+  const path = page === null ? specification : `${specification}/revisions/${label}/${page}`;
   return { number, title, label, projectCode, byName: by.name, dueOn: null, note: null, path };
 }
