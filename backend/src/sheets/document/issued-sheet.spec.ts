@@ -1,6 +1,6 @@
 import jsQR from 'jsqr';
 import { drawingCases, suspensionCase } from '@bellgap/common/drawing/fixtures';
-import { filledPaths } from '@bellgap/common/schemas';
+import { CHOICE_LABELS, filledPaths } from '@bellgap/common/schemas';
 import type { SheetContent } from './content';
 import { draftContent, issuedContent, pagesOf, printedGrey, structureOf } from './fixtures';
 import { MissingGlyphError } from './fonts/faces';
@@ -169,6 +169,23 @@ describe('an issued sheet', () => {
         }
       }
     }
+  });
+
+  it('tells the rows of a list apart, and prints their choices as words', () => {
+    const content = issuedContent(suspensionCase);
+    const [check] = content.issued!.checkRecords;
+    const wind = { name: 'Wind', kind: 'wind' as const, conductorWeightNPerM: 14.2, windPressurePa: 600 };
+    const cases = [wind, { ...wind, name: 'Ice', kind: 'ice' as const, iceRadialMm: 20 }];
+    const input = { ...content.input, mechanical: { basis: 'rd-223' as const, cases } } as SheetContent['input'];
+    const ticks = filledPaths(input).map((path) => ({ path, seenIn: '', agreed: true }));
+    const issued = { ...content.issued!, checkRecords: [{ ...check!, ticks }] };
+    const words = flat(layOutSheet({ ...content, input, issued }).elements)
+      .map(({ marks }) => marks.map((mark) => (mark.kind === 'text' ? mark.text : '')).join(' '))
+      .join('|');
+    expect(words).toContain(`Kind of case, row 1|${CHOICE_LABELS.loadCaseKind.wind}|`);
+    expect(words).toContain(`Kind of case, row 2|${CHOICE_LABELS.loadCaseKind.ice}|`);
+    expect(words).toContain('Ice all round, row 2|20 mm|');
+    expect(words).toContain(`|${CHOICE_LABELS.mechanicalBasis['rd-223']}|`);
   });
 
   it('holds the longest texts that may be entered, and repeats the heads of its tables', () => {

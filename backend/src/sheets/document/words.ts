@@ -1,4 +1,10 @@
-import type { ClearanceRow, Evaluation, SourceReference, SpecificationInput } from '@bellgap/common/api';
+import {
+  trailFieldLabel,
+  type ClearanceRow,
+  type Evaluation,
+  type SourceReference,
+  type SpecificationInput,
+} from '@bellgap/common/api';
 import { figure } from '@bellgap/common/drawing';
 import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
 import type { SheetContent } from './content';
@@ -77,7 +83,14 @@ const LIST_OF: Record<string, string> = {
   'site.pollution.type': 'pollutionType',
   'site.pollution.basis': 'pollutionBasis',
   'clearance.method': 'clearanceMethod',
+  'mechanical.basis': 'mechanicalBasis',
+  'mechanical.cases.kind': 'loadCaseKind',
 };
+
+const withoutRows = (path: string): string => path.replace(/\[\d+\]/g, '');
+
+/** An input by its label; of a list, with its row: "Wind span, row 2". */
+export const fieldWords = (path: string): string => trailFieldLabel(path.replace(/\[(\d+)\]/g, '.$1'));
 
 /** Any input as words with its unit: numbers, choices, and an insulation level as one row. */
 export function inputWords(path: string, value: unknown): string {
@@ -93,7 +106,7 @@ export function inputWords(path: string, value: unknown): string {
       })
       .join('; ');
   }
-  const name = LIST_OF[path] ?? path.split('.').pop() ?? path;
+  const name = LIST_OF[withoutRows(path)] ?? path.split('.').pop() ?? path;
   if (typeof value !== 'string') return NOT_STATED;
   return CHOICES[name]?.[value] ?? value;
 }

@@ -1,8 +1,8 @@
 import { CHECK_CATEGORY_LABELS } from '@bellgap/common/api';
-import { CHECKLIST, CHECKLIST_ANSWERS, CHECK_VERDICTS, fieldOf } from '@bellgap/common/schemas';
+import { CHECKLIST, CHECKLIST_ANSWERS, CHECK_VERDICTS } from '@bellgap/common/schemas';
 import { cell, figures, heading, paragraph, type Block, type Cell, type Pairs } from '../blocks';
 import type { SheetCheck, SheetContent } from '../content';
-import { citation, inputWords, near, plain, signed, siteTime, UNKNOWN, valueAt, withUnit } from '../words';
+import { citation, fieldWords, inputWords, near, plain, signed, siteTime, UNKNOWN, valueAt, withUnit } from '../words';
 
 type Difference = SheetCheck['differences'][number];
 
@@ -132,7 +132,7 @@ function ticks({ ticks: rows, contentCode }: SheetCheck, { input, issued }: Shee
       ],
       rows: rows.map(({ path, seenIn, agreed }) => ({
         cells: [
-          cell(fieldOf(path)?.label ?? path),
+          cell(fieldWords(path)),
           ...(same ? [cell(inputWords(path, valueAt(input, path)))] : []),
           cell(seenIn.trim() === '' ? UNKNOWN : seenIn),
           cell(agreed ? 'agreed' : 'NOT agreed', agreed ? {} : { face: 'semibold' }),

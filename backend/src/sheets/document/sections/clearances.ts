@@ -1,4 +1,4 @@
-import type { ClearanceRow } from '@bellgap/common/api';
+import type { ClearanceRow, ClearancesResult } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { cell, figures, heading, paragraph, type Block, type Row } from '../blocks';
 import type { SheetContent } from '../content';
@@ -25,6 +25,7 @@ export function clearances({ evaluation }: SheetContent): Block[] {
         blocks.push(heading(2, DISTANCE_WORDS.safety), paragraph('Not covered by this sheet: the local rule decides.'));
       continue;
     }
+    const absent = (answer.besideWhyNot ?? []).filter(({ distance }) => distance === kind);
     blocks.push(heading(2, DISTANCE_WORDS[kind]), {
       kind: 'table',
       summary: DISTANCE_WORDS[kind],
@@ -39,8 +40,14 @@ export function clearances({ evaluation }: SheetContent): Block[] {
       ],
       rows: rows.map(clearanceRow),
     });
+    if (absent.length > 0) blocks.push(paragraph(absent.map(absenceWords).join(' '), { tone: 'soft' }));
   }
   return [...blocks, ...coordination(evaluation.string?.coordination)];
+}
+
+/** Why a method that is not the chosen one has no figure. */
+function absenceWords({ method, why }: NonNullable<ClearancesResult['besideWhyNot']>[number]): string {
+  return `${CHOICE_LABELS.clearanceMethod[method]}, no figure beside: ${why.slice(0, 1).toLowerCase()}${why.slice(1)}`;
 }
 
 function clearanceRow(row: ClearanceRow): Row {

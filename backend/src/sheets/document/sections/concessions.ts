@@ -1,8 +1,7 @@
 import { CONCESSION_KIND_LABELS, CONCESSION_KINDS, type ConcessionKind } from '@bellgap/common/api';
-import { fieldOf } from '@bellgap/common/schemas';
 import { heading, type Block, type NoticeItem, type Shape } from '../blocks';
 import type { Issue, SheetConcession, SheetContent } from '../content';
-import { siteTime } from '../words';
+import { fieldWords, siteTime } from '../words';
 
 const HEAD = 'Accepted, conceded, not waited for';
 
@@ -50,7 +49,7 @@ export function concessions({ issued, project }: SheetContent): Block[] {
 }
 
 function box({ kind, field, text, reason, validUntil, givenBy, givenAt }: SheetConcession, timeZone: string): Block {
-  const concerns = field === null ? undefined : fieldOf(field)?.label;
+  const concerns = field === null ? undefined : fieldWords(field);
   return {
     kind: 'notice',
     items: [

@@ -1,4 +1,5 @@
 import type { StringResult } from '@bellgap/common/api';
+import { sharingWords } from '@bellgap/common/schemas';
 import { heading, type Block } from '../blocks';
 import type { SheetContent } from '../content';
 import { down, inputWords, near, NOT_STATED, up } from '../words';
@@ -23,7 +24,10 @@ export function particulars({ input, evaluation }: SheetContent): Block[] {
           label: 'Fault current and its time',
           value: fault.every((words) => words === NOT_STATED) ? NOT_STATED : fault.join(' for '),
         },
-        { label: 'Voltage along the string', value: sharingWords(evaluation.string) },
+        { label: 'Voltage along the string', value: alongWords(evaluation.string) },
+        ...(evaluation.string?.sharing
+          ? [{ label: 'Capacitances of that sharing', value: sharingWords(evaluation.string.sharing) }]
+          : []),
         { label: 'Puncture or steep-front test', value: NOT_STATED },
         { label: 'Locking device', value: NOT_STATED },
         { label: 'Corrosion class, for pollution type B', value: NOT_STATED },
@@ -38,7 +42,7 @@ export function particulars({ input, evaluation }: SheetContent): Block[] {
   ];
 }
 
-function sharingWords(string: StringResult | null): string {
+function alongWords(string: StringResult | null): string {
   const lineEnd = string?.voltageSharing[0];
   if (!string || lineEnd === undefined) return NOT_STATED;
   const share = `${up(lineEnd, 1)} % across the unit at the line end`;

@@ -1,7 +1,6 @@
-import { fieldOf } from '@bellgap/common/schemas';
 import { heading, paragraph, type Block } from '../blocks';
 import type { SheetContent, SheetRemark } from '../content';
-import { siteTime } from '../words';
+import { fieldWords, siteTime } from '../words';
 
 const TRACE = 'trace:';
 
@@ -29,7 +28,7 @@ function one(
 
 function placeWords(path: string | null, { evaluation }: SheetContent): string {
   if (path === null) return 'the whole sheet';
-  if (!path.startsWith(TRACE)) return fieldOf(path)?.label ?? path;
+  if (!path.startsWith(TRACE)) return fieldWords(path);
   const id = path.slice(TRACE.length).trim();
   const line = evaluation.trace.findIndex((one) => one.id === id);
   return line < 0 ? `calculation, ${id}` : `calculation, line ${line + 1}, ${evaluation.trace[line]?.heading ?? id}`;
