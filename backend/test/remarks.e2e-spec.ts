@@ -1,4 +1,5 @@
 import { contract } from '@bellgap/common/api';
+import { PresencesService } from '../src/workflow/presences.service';
 import { TestApp } from './support/test-app';
 import { WorkflowStory, type Actor, type At } from './support/workflow-story';
 
@@ -138,5 +139,8 @@ describe('who has a revision open', () => {
     });
     expect(status).toBe(404);
     expect((await story.get(draft)).lockVersion).toBe(draft.lockVersion);
+    test.clock.advance({ minutes: 3 });
+    await test.app.get(PresencesService).tidy();
+    expect(await test.database.owner('presences')).toEqual([]);
   });
 });

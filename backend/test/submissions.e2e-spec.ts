@@ -1,5 +1,5 @@
-import { contract } from '@bellgap/common/api';
-import { WorkflowStory, submittableInput } from './support/workflow-story';
+import { contract, type Revision } from '@bellgap/common/api';
+import { WorkflowStory, submittableInput, type Actor } from './support/workflow-story';
 import { TestApp } from './support/test-app';
 
 const { revision, submitRevision, recallRevision, refuseRevision } = contract;
@@ -194,6 +194,26 @@ describe('the way into the check and back', () => {
     });
   });
 
+  it('is made once where two make it at once, and never of what was saved meanwhile', async () => {
+    const other = await test.signedIn({ roles: ['engineer'] });
+    const send = (draft: Revision, by: Actor) =>
+      by.client.call(submitRevision, { params: story.at(draft), version: draft.lockVersion, body: submission });
+    const draft = await story.draft();
+    const both = await Promise.all([send(draft, story.engineer), send(draft, other)]);
+    expect(both.map(({ status }) => status).sort()).toEqual([201, 409]);
+    const next = await story.draft();
+    const { site } = submittableInput();
+    const [sent, saved] = await Promise.all([
+      send(next, story.engineer),
+      other.client.call(contract.saveRevision, {
+        params: story.at(next),
+        version: next.lockVersion,
+        body: { title: next.title, input: submittableInput({ site: { ...site!, altitudeM: 990 } }), overrides: [] },
+      }),
+    ]);
+    expect([sent.status, saved.status].sort()).toEqual(sent.status === 201 ? [201, 409] : [200, 409]);
+  });
+
   it('sends letters to who may check and has not written in it, and back to the author', async () => {
     await test.database.owner('graphile_worker._private_jobs').delete();
     const elsewhere = await test.signedIn({ roles: ['checker'], projects: ['SUB1'] });
@@ -208,8 +228,12 @@ describe('the way into the check and back', () => {
     expect(asked).toContainEqual(['waits-for-check', story.checker.person.id]);
     expect(asked).toContainEqual(['waits-for-check', elsewhere.person.id]);
     expect(asked.every(([, to]) => to !== story.engineer.person.id)).toBe(true);
-    await story.returned(submitted);
+    const returned = await story.returned(submitted);
     expect((await letters()).at(-1)).toEqual(['returned', story.engineer.person.id]);
+    await story.pass(await story.submit(returned));
+    const told = (await letters()).filter(([kind]) => kind === 'waits-for-approval').map(([, to]) => to);
+    expect(told).toContain(story.approver.person.id);
+    expect(told).not.toContain(story.checker.person.id);
   });
 
   it('hides a draft and what is in check from who sees issued sheets only', async () => {

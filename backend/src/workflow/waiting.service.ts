@@ -36,7 +36,9 @@ export class WaitingService {
     return found
       .flatMap(({ specificationId, why, since }) => {
         const row = rows.get(specificationId);
-        return row ? [{ why, since: since.toISOString(), row }] : [];
+        // A checker closes his remark when he has counted again: until then its answers, too, are hidden from him.
+        const isForLater = why === 'close' && row?.figuresHidden;
+        return row && !isForLater ? [{ why, since: since.toISOString(), row }] : [];
       })
       .sort((one, other) => {
         const [due, otherDue] = [one.row.dueOn ?? '9999', other.row.dueOn ?? '9999'];
