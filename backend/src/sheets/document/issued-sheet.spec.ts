@@ -86,6 +86,19 @@ describe('an issued sheet', () => {
     expect(page).toContain('checked, category 2');
   });
 
+  it('counts what was conceded, with the first end', () => {
+    const content = issuedContent(suspensionCase);
+    const [acceptance, concession] = content.issued!.concessions;
+    const concessions = [acceptance!, { ...concession!, validUntil: '2027-06-30' }, concession!];
+    const words = flat(layOutSheet({ ...content, issued: { ...content.issued!, concessions } }).elements)
+      .map(({ marks }) => marks.map((mark) => (mark.kind === 'text' ? mark.text : '')).join(' '))
+      .join('|');
+    expect(words).toContain(
+      '2 concessions a requirement is not met and was conceded for a time, the first until 2026-12-31',
+    );
+    expect(words).toContain('1 acceptance outside a source');
+  });
+
   it('carries check record, remarks with answers, concessions with their ends, and its revisions', async () => {
     const { bytes } = await renderSheet(issuedContent(suspensionCase));
     const text = joined(pagesOf(bytes).join(' '));

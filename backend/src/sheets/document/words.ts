@@ -158,6 +158,9 @@ export function zoneWords({ project: { siteTimeZone: timeZone }, drawnOn }: Shee
   return offset === timeZone ? timeZone : `${timeZone} (${offset === 'UTC' ? 'UTC+00:00' : offset})`;
 }
 
+/** "1 stop", "2 stops". */
+export const counted = (count: number, what: string): string => `${count} ${what}${count === 1 ? '' : 's'}`;
+
 /** "17 units G160-S"; words where no count is known. */
 export function answerWords(input: SpecificationInput, evaluation: Evaluation, code: string | null): string {
   const units = evaluation.string?.units;

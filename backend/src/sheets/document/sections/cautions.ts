@@ -2,6 +2,7 @@ import { REVISION_STATE_LABELS, type ConcessionKind, type Severity } from '@bell
 import { CHOICE_LABELS, fieldOf } from '@bellgap/common/schemas';
 import { cell, heading, paragraph, type Block, type NoticeItem } from '../blocks';
 import type { SheetContent } from '../content';
+import { counted } from '../words';
 import { concessionNotices } from './concessions';
 
 const ORDER: Severity[] = ['stop', 'fail', 'acceptance', 'caution', 'info'];
@@ -51,7 +52,7 @@ export function notices({ evaluation, state, issued }: SheetContent): NoticeItem
     const shown = issued?.concessions.some(({ kind }) => kind === ANSWERED_BY[severity]) ? [] : found;
     if (shown.length > 0)
       items.push({
-        mark: `${shown.length} ${CHOICE_LABELS.severity[severity].toLowerCase()}`,
+        mark: counted(shown.length, CHOICE_LABELS.severity[severity].toLowerCase()),
         text: MEANING[severity] ?? '',
       });
   }

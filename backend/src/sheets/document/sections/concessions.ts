@@ -1,7 +1,7 @@
 import { CONCESSION_KIND_LABELS, CONCESSION_KINDS, type ConcessionKind } from '@bellgap/common/api';
 import { heading, type Block, type NoticeItem, type Shape } from '../blocks';
 import type { Issue, SheetConcession, SheetContent } from '../content';
-import { fieldWords, siteTime } from '../words';
+import { counted, fieldWords, siteTime } from '../words';
 
 const HEAD = 'Accepted, conceded, not waited for';
 
@@ -33,7 +33,7 @@ export function concessionNotices({ concessions }: Issue): NoticeItem[] {
     return [
       {
         shape: SHAPES[kind],
-        mark: `${found.length} ${name}`,
+        mark: kind === 'later-change' ? `${found.length} ${name}` : counted(found.length, name),
         text: `${MEANING[kind]}${found.length === 1 ? until.replace('the first ', '') : until}`,
       },
     ];

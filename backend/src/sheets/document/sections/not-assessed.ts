@@ -13,6 +13,7 @@ const PARTS: Record<string, string> = {
   phaseSpacing: 'Spacing at mid span',
   bay: 'Substation bay',
   voltageSharing: 'Voltage along the string',
+  efficiencyPercent: 'String efficiency',
   profile: 'Profile of the unit',
   class: 'Strength class',
   extraUnits: 'Extra units',
