@@ -1,3 +1,5 @@
+import type { SharingRatio, StringResult } from '../engine/model';
+
 /**
  * Every input by its path: the words, unit and limits that the form, the sheet and the error messages share.
  * `quantity` says what the reader's choice of units may convert on screen; `unit` is the unit of the stored figure.
@@ -227,3 +229,10 @@ export const CHOICE_LABELS = {
     disputed: 'disputed',
   },
 } as const;
+
+/** What the voltage sharing rests on, in words that screen and sheet share. */
+export function sharingWords({ pinToEarth, pinToLine }: NonNullable<StringResult['sharing']>): string {
+  const words = ({ valueRatio, from }: SharingRatio, where: string): string =>
+    `${valueRatio} ${where} (${CHOICE_LABELS.ratioOrigin[from]})`;
+  return `Over the self capacitance of a unit: c = ${words(pinToEarth, 'to earth')}, k = ${words(pinToLine, 'to the line')}.`;
+}

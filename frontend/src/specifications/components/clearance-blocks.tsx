@@ -39,7 +39,7 @@ export function ClearanceBlocks({ evaluation }: { evaluation: Evaluation }) {
           rows={rows.filter((row) => row.distance === distance)}
           headlineMm={headlineOf(evaluation, distance)}
           why={whyNot(evaluation, ...missing)}
-          besideNote={distance === 'section' ? null : theoreticalNote(evaluation)}
+          besideNotes={distance === 'section' ? [] : besideNotes(evaluation, distance)}
         />
       ))}
       <SafetyBlock evaluation={evaluation} />
@@ -53,24 +53,28 @@ function headlineOf({ clearances }: Evaluation, distance: ClearanceRow['distance
   return null;
 }
 
-/** The theoretical method stands beside the others only where its two choices are made. */
-function theoreticalNote({ clearances }: Evaluation): string | null {
-  if (!clearances || clearances.method === 'en-theoretical') return null;
-  if (clearances.rows.some(({ method }) => method === 'en-theoretical')) return null;
-  const choices = ['clearance.enGap', 'clearance.fastFrontFrom'].map((path) => `“${fieldOf(path)?.label}”`);
-  const { 'en-theoretical': name } = CHOICE_LABELS.clearanceMethod;
-  return `${name}: no row beside, because ${choices.join(' and ')} are chosen only with that method.`;
+/** Why the other methods have no figure for a distance. */
+function besideNotes({ clearances }: Evaluation, distance: 'phase-to-earth' | 'phase-to-phase'): string[] {
+  const reasons = (clearances?.besideWhyNot ?? []).filter((one) => one.distance === distance);
+  return reasons.map(({ method, why }) => {
+    const asked = method === 'en-theoretical' ? ONLY_WITH_THEORETICAL : '';
+    return `${CHOICE_LABELS.clearanceMethod[method]}, no figure beside: ${lowerFirst(why)}${asked}`;
+  });
 }
+
+const ONLY_WITH_THEORETICAL = ` ${['clearance.enGap', 'clearance.fastFrontFrom']
+  .map((path) => `“${fieldOf(path)?.label}”`)
+  .join(' and ')} are asked only with that method.`;
 
 interface Properties {
   title: string;
   rows: ClearanceRow[];
   headlineMm: number | null;
   why: string | undefined;
-  besideNote: string | null;
+  besideNotes: string[];
 }
 
-function ClearanceBlock({ title, rows, headlineMm, why, besideNote }: Properties) {
+function ClearanceBlock({ title, rows, headlineMm, why, besideNotes }: Properties) {
   const aside =
     headlineMm === null ? undefined : (
       <>
@@ -97,7 +101,11 @@ function ClearanceBlock({ title, rows, headlineMm, why, besideNote }: Properties
               <Row key={`${row.method} ${row.stress} ${row.shape} ${index}`} row={row} />
             ))}
           </table>
-          {besideNote && <p className="zone-note">{besideNote}</p>}
+          {besideNotes.map((note) => (
+            <p key={note} className="zone-note">
+              {note}
+            </p>
+          ))}
         </TraceArea>
       )}
     </LedgerBlock>

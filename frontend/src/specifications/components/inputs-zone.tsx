@@ -7,6 +7,7 @@ import { useCatalogue } from '../queries/use-catalogue';
 import { ChoiceAt, DateAt, NumberAt } from './fields-at';
 import { MechanicalGroup } from './mechanical-group';
 import { InsulatorAt, LevelAt, ParallelStringsAt, FrequencyAt } from './looked-up-fields';
+import { SharingFields } from './sharing-fields';
 
 const CLOSE = { token: { controlHeight: 28 } };
 
@@ -101,6 +102,7 @@ function StringGroup() {
       <ChoiceAt path="string.arcingDevices" />
       <NumberAt path="string.arcGapMm" />
       <NumberAt path="string.hardwareLengthMm" />
+      <SharingFields />
     </>
   );
 }

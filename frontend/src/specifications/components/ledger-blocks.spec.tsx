@@ -50,6 +50,20 @@ describe('voltage along the string', () => {
     expect(screen.getByText('Concerns corona, radio noise and ageing, never the count.')).toBeInTheDocument();
   });
 
+  it('says what it rests on, figure by figure', () => {
+    const { string } = anEvaluation(17);
+    const sharing = {
+      pinToEarth: { valueRatio: 0.1, from: 'usual' as const },
+      pinToLine: { valueRatio: 0.025, from: 'entered' as const },
+    };
+    render(<VoltageBlock evaluation={anEvaluation(17, { string: { ...string!, sharing } })} />);
+    expect(
+      screen.getByText(
+        'Over the self capacitance of a unit: c = 0.1 to earth (usual, practice), k = 0.025 to the line (entered).',
+      ),
+    ).toBeInTheDocument();
+  });
+
   it('says why it was not assessed', () => {
     const { string } = anEvaluation(17);
     const evaluation = anEvaluation(17, {
@@ -138,20 +152,20 @@ describe('distances for people', () => {
 });
 
 describe('rows of the other clearance methods', () => {
-  const rowsOf = (method: 'iec-table' | 'en-theoretical') => {
+  it('say why a method has no figure, each in the block of its distance', () => {
     const { clearances } = anEvaluation(17);
-    const [row] = clearances!.rows;
-    return anEvaluation(17, { clearances: { ...clearances!, method: 'iec-table', rows: [{ ...row!, method }] } });
-  };
-
-  it('say why the theoretical method has none, and nothing where it has', () => {
-    const { rerender } = render(<ClearanceBlocks evaluation={rowsOf('iec-table')} />);
-    expect(
-      screen.getByText(
-        'EN 50341 theoretical: no row beside, because “Kind of gap” and “Fast-front voltage from” are chosen only with that method.',
-      ),
-    ).toBeInTheDocument();
-    rerender(<ClearanceBlocks evaluation={rowsOf('en-theoretical')} />);
-    expect(screen.queryByText(/no row beside/)).not.toBeInTheDocument();
+    const besideWhyNot = [
+      { method: 'en-theoretical', distance: 'phase-to-earth', why: 'The kind of gap is not chosen.' },
+      { method: 'north-american', distance: 'phase-to-phase', why: 'The lightning level is not known.' },
+    ] as const;
+    const evaluation = anEvaluation(17, { clearances: { ...clearances!, besideWhyNot: [...besideWhyNot] } });
+    const { rerender } = render(<ClearanceBlocks evaluation={evaluation} />);
+    const notes = screen.getAllByText(/no figure beside/).map(({ textContent }) => textContent);
+    expect(notes).toEqual([
+      'EN 50341 theoretical, no figure beside: the kind of gap is not chosen. “Kind of gap” and “Fast-front voltage from” are asked only with that method.',
+      'North American, no figure beside: the lightning level is not known.',
+    ]);
+    rerender(<ClearanceBlocks evaluation={anEvaluation(17, { clearances: { ...clearances!, besideWhyNot: [] } })} />);
+    expect(screen.queryByText(/no figure beside/)).not.toBeInTheDocument();
   });
 });

@@ -1,4 +1,5 @@
 import type { Evaluation } from '@bellgap/common/api';
+import { sharingWords } from '@bellgap/common/schemas';
 import { Figure } from '../../ui/figure';
 import { TraceArea } from '../../ui/trace';
 import { whyNot } from '../model/words';
@@ -34,9 +35,11 @@ export function VoltageBlock({ evaluation }: { evaluation: Evaluation }) {
                 round="down"
                 name="string.efficiencyPercent"
                 label="String efficiency"
+                why={lowerFirst(whyNot(evaluation, 'string.efficiencyPercent') ?? 'not assessed')}
               />
             </LedgerRow>
           </dl>
+          {string.sharing && <p className="zone-note">{sharingWords(string.sharing)}</p>}
           <p className="zone-note">Concerns corona, radio noise and ageing, never the count.</p>
         </TraceArea>
       )}

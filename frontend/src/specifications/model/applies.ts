@@ -22,6 +22,8 @@ const RULES: Record<string, Rule> = {
   'string.vAngleWindwardDeg': (ask) => ask('string.arrangement') === 'v-suspension',
   'string.vAngleLeewardDeg': (ask) => ask('string.arrangement') === 'v-suspension',
   'string.postAngleDeg': (_, unit) => unit?.kind === 'line-post',
+  'string.sharing.pinToEarthRatio': (_, unit) => !isRod(unit),
+  'string.sharing.pinToLineRatio': (_, unit) => !isRod(unit),
   'mechanical.fittingsStrengthKn': (_, unit) => unit?.kind !== 'line-post',
   'mechanical.crossing': (ask) => ask('mechanical.basis') === 'rd-223',
   'mechanical.acceptedStatistically': (ask) => ask('mechanical.basis') === 'rd-223',

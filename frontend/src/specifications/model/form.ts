@@ -37,6 +37,7 @@ const BLANK = {
     hardwareLengthMm: null,
     vAngleWindwardDeg: null,
     vAngleLeewardDeg: null,
+    sharing: { pinToEarthRatio: null, pinToLineRatio: null },
   },
   clearance: {
     method: null,
@@ -116,9 +117,12 @@ export function inputOf(values: FormValues, unit: InsulatorUnit | null): Specifi
   const system = { ...(input.system as Tree) };
   if (allNull(system.overvoltages)) delete system.overvoltages;
   const site = input.site as Tree;
+  const string = { ...(input.string as Tree) };
+  if (allNull(string.sharing)) delete string.sharing;
   const next: Tree = {
     ...input,
     system,
+    string,
     site: { ...site, pollution: pollutionOf(input, site.pollution as Tree) },
   };
   if (input.kind === 'bay' && allNull(input.string)) delete next.string;
