@@ -1,13 +1,10 @@
 import { contract } from '@bellgap/common/api';
 import { DEMO_PASSWORD, seedDemo } from '@bellgap/database';
-import { readAuthor } from '../src/demo/people';
+import { storytellersOf } from '../src/demo/acts';
 import { StoryClock } from '../src/demo/story-clock';
 import { tellStory } from '../src/demo/tell-story';
 import { AppModule } from '../src/app.module';
 import { loadConfig } from '../src/platform/config';
-import { DesignBasesService } from '../src/projects/design-bases.service';
-import { SheetsService } from '../src/sheets/sheets.service';
-import { SpecificationsService } from '../src/specifications/specifications.service';
 import { NestFactory } from '@nestjs/core';
 import { TestApp } from './support/test-app';
 import type { TestClient } from './support/test-client';
@@ -25,13 +22,7 @@ describe('the documents of the demonstration', () => {
     const config = loadConfig({ NODE_ENV: 'test', DATABASE_URL: test.database.url, ROLE: 'web' });
     const app = await NestFactory.createApplicationContext(AppModule.with({ config, clock }), { logger: ['error'] });
     try {
-      return await tellStory({
-        clock,
-        bases: app.get(DesignBasesService),
-        specifications: app.get(SpecificationsService),
-        sheets: app.get(SheetsService),
-        author: (author) => readAuthor(author, test.database.owner),
-      });
+      return await tellStory(storytellersOf(app, clock));
     } finally {
       await app.close();
     }
@@ -51,7 +42,7 @@ describe('the documents of the demonstration', () => {
     expect(await tell()).toEqual([]);
   });
 
-  it('stand as drafts of both lines with their figures, none of them in the future', async () => {
+  it('stand in the lists of both lines with their figures, none of them in the future', async () => {
     const list = async (code: string) =>
       (await orvelle.call(contract.specifications, { params: { code } })).answer.items;
     const items = [...(await list('KL221')), ...(await list('KL132'))];
@@ -78,10 +69,66 @@ describe('the documents of the demonstration', () => {
     expect(items.filter(({ worstCaution }) => worstCaution === 'stop')).toEqual([]);
   });
 
+  const who = (email: string) => test.signIn({ email, password: DEMO_PASSWORD });
+  const at = (number: string, label = 'latest') => ({
+    code: number.startsWith('INS-221') ? 'KL221' : 'KL132',
+    number,
+    label,
+  });
+
   it('show an override with its reason, and a sheet that was drawn', async () => {
-    const get = async (number: string) =>
-      (await orvelle.call(contract.revision, { params: { code: 'KL221', number, label: 'latest' } })).answer;
+    const get = async (number: string) => (await orvelle.call(contract.revision, { params: at(number) })).answer;
     expect((await get('INS-221-004')).overrides).toHaveLength(1);
-    expect((await get('INS-221-001')).lastSheet).toMatchObject({ current: true, drawnBy: 'Tamsin Orvelle' });
+    expect((await get('INS-221-003')).lastSheet).toMatchObject({ current: true, drawnBy: 'Tamsin Orvelle' });
+  });
+
+  it.each([
+    ['INS-221-001', 'issued', ['B', '1']],
+    ['INS-221-002', 'issued', ['A', '0']],
+    ['INS-221-003', 'in_check', ['A']],
+    ['INS-221-004', 'draft', ['A', 'B']],
+    ['INS-221-005', 'draft', ['A']],
+    ['INS-132-001', 'draft', ['A']],
+    ['INS-132-002', 'in_check', ['A']],
+    ['INS-132-003', 'checked', ['A']],
+  ])('have come by their own way: %s is %s', async (number, state, labels) => {
+    const { answer } = await orvelle.call(contract.revision, { params: at(number) });
+    expect(answer).toMatchObject({ state, labels });
+  });
+
+  it('stand in the register, and the print of the former issue is told from the one in force', async () => {
+    const brant = await who('l.brant@kigc.example');
+    const { items } = (await brant.call(contract.sheets, { query: { sort: 'number' } })).answer;
+    expect(items.map(({ number, label, standing }) => `${number} ${label} ${standing}`).sort()).toEqual([
+      'INS-221-001 0 superseded',
+      'INS-221-001 1 current',
+      'INS-221-002 0 current',
+    ]);
+    const former = items.find(({ standing }) => standing === 'superseded')!;
+    const sheet = (await brant.call(contract.issuedSheet, { params: { id: former.id } })).answer;
+    const params = { verificationCode: sheet.verificationCode };
+    const { answer } = await test.stranger().call(contract.verification, { params });
+    expect(answer).toMatchObject({ standing: 'superseded', number: 'INS-221-001', revision: '0', supersededBy: '1' });
+    expect((await brant.call(contract.revision, { params: at('INS-132-003') })).status).toBe(404);
+  });
+
+  it('wait for those who can go on with them', async () => {
+    const waiting = async (email: string) =>
+      (await (await who(email)).call(contract.desk)).answer.waiting.map(({ why, row }) => `${row.number} ${why}`);
+    expect(await waiting('r.castellary@kigc.example')).toEqual(['INS-221-003 check']);
+    expect(await waiting('y.sandermo@brackwater.example')).toEqual(['INS-221-003 check', 'INS-132-002 check']);
+    expect(await waiting('a.holvenstein@kigc.example')).toEqual(['INS-132-003 approve']);
+    expect(await waiting('j.bakkarash@kigc.example')).toEqual(['INS-221-004 answer']);
+    expect(await waiting('w.tollarsson@kigc.example')).toEqual([]);
+  });
+
+  it('bar who changed a field, with its name and the day, and let the approver issue what is checked', async () => {
+    const castellary = await who('r.castellary@kigc.example');
+    const { why } = (await castellary.call(contract.check, { params: at('INS-132-002') })).answer;
+    expect(why).toMatch(/^You changed .* on \d{4}-\d\d-\d\d; nobody checks or approves his own work\.$/);
+    const holvenstein = await who('a.holvenstein@kigc.example');
+    const { answer } = await holvenstein.call(contract.approval, { params: at('INS-132-003') });
+    expect(answer).toMatchObject({ mayIssue: true, barred: [], nextLabel: '0' });
+    expect(answer.acceptances.length).toBeGreaterThan(0);
   });
 });

@@ -1,11 +1,7 @@
 import { NestFactory } from '@nestjs/core';
 import { AppModule } from '../app.module';
 import { loadConfig } from '../platform/config';
-import { KNEX, type Database } from '../platform/knex';
-import { DesignBasesService } from '../projects/design-bases.service';
-import { SheetsService } from '../sheets/sheets.service';
-import { SpecificationsService } from '../specifications/specifications.service';
-import { readAuthor } from './people';
+import { storytellersOf } from './acts';
 import { StoryClock } from './story-clock';
 import { tellStory } from './tell-story';
 
@@ -19,14 +15,7 @@ async function main(): Promise<void> {
     logger: ['error', 'warn'],
   });
   try {
-    const knex = app.get<Database>(KNEX);
-    const made = await tellStory({
-      clock,
-      bases: app.get(DesignBasesService),
-      specifications: app.get(SpecificationsService),
-      sheets: app.get(SheetsService),
-      author: (author) => readAuthor(author, knex),
-    });
+    const made = await tellStory(storytellersOf(app, clock));
     console.log(made.length > 0 ? `Demonstration: made ${made.join(', ')}` : 'Demonstration: all documents are there');
   } finally {
     await app.close();

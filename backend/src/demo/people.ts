@@ -1,10 +1,16 @@
 import type { Database } from '../platform/knex';
 import type { HeldGrant, SignedIn } from '../platform/person';
 
-/** People of the story who write documents, by the name before the @ of their address. */
+/** People of the story who act on documents, by the name before the @ of their address. */
 export const AUTHORS = {
   orvelle: 't.orvelle@kigc.example',
   bakkarash: 'j.bakkarash@kigc.example',
+  castellary: 'r.castellary@kigc.example',
+  sandermo: 'y.sandermo@brackwater.example',
+  holvenstein: 'a.holvenstein@kigc.example',
+  ulundimarsh: 'p.ulundimarsh@kigc.example',
+  brant: 'l.brant@kigc.example',
+  grebe: 'o.grebe@kigc.example',
 } as const;
 export type Author = keyof typeof AUTHORS;
 

@@ -58,6 +58,16 @@ export class IssueService {
   ): Promise<IssuedSheet> {
     requireMove(person, 'issue', await this.specifications.stored(person, address));
     await this.signatures.confirm(person, given.password, clientAddress);
+    return this.issueSigned(person, address, version, given);
+  }
+
+  /** What is signed already. */
+  async issueSigned(
+    person: SignedIn,
+    address: RevisionAddress,
+    version: number,
+    given: Omit<Given, 'password'>,
+  ): Promise<IssuedSheet> {
     const id = await this.knex.transaction(async (db) => {
       const revision = await this.specifications.stored(person, address, { db, forUpdate: true });
       requireMove(person, 'issue', revision);
