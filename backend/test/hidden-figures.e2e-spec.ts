@@ -55,6 +55,32 @@ describe('the figures of the author, before the checker has entered his own', ()
     expect(answer.cautions.length + answer.notAssessed.length).toBeGreaterThan(0);
   });
 
+  it('come by no route at all', async () => {
+    const { string } = submitted.evaluation!;
+    // Round figures stand in printed tables too.
+    const marks = [string!.creepageRequiredMm, ...string!.criteria.map(({ marginPercent }) => marginPercent)]
+      .filter((figure) => figure !== null && !Number.isInteger(figure))
+      .map((figure) => new RegExp(`(?<![\\d.])${String(figure)}(?![\\d.])`));
+    const readings = Object.entries<EndpointDefinition>(contract).filter(([, { method }]) => method === 'GET');
+    expect(readings.length).toBeGreaterThan(25);
+    const told = new Set<string>();
+    for (const [name, endpoint] of readings) {
+      const read = async (by: Actor) => {
+        const { response } = await by.client.call(endpoint, {
+          params: { ...story.at(submitted), id: submitted.id, key: 'x', verificationCode: 'x', revision: '1' },
+          ...(name === 'specificationTrail' || name === 'trail' ? { query: { limit: '200' } } : {}),
+        });
+        return response.text ?? '';
+      };
+      const seen = await read(story.checker);
+      for (const mark of marks) expect([name, mark.test(seen)]).toEqual([name, false]);
+      const open = await read(story.engineer);
+      if (marks.some((mark) => mark.test(open))) told.add(name);
+    }
+    // The marks do find the figures where they are shown.
+    expect([...told]).toEqual(expect.arrayContaining(['revision', 'specifications']));
+  });
+
   it('stand neither in a list nor in its order', async () => {
     const { site } = submittableInput();
     for (const altitudeM of [3000, 200, 1800]) await story.draft({ site: { ...site!, altitudeM } });
