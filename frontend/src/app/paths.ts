@@ -1,3 +1,6 @@
+const revisionAddress = (code: string, number: string, label: string) =>
+  `/projects/${encodeURIComponent(code)}/specifications/${encodeURIComponent(number)}/revisions/${encodeURIComponent(label)}`;
+
 /** Every address of the product once: the pattern that the router knows and the function that builds it. */
 export const paths = {
   desk: { pattern: '/', to: () => '/' },
@@ -11,6 +14,26 @@ export const paths = {
     pattern: '/projects/:code/specifications/:number',
     to: (code: string, number: string) =>
       `/projects/${encodeURIComponent(code)}/specifications/${encodeURIComponent(number)}`,
+  },
+  approval: {
+    pattern: '/projects/:code/specifications/:number/revisions/:label/approval',
+    to: (code: string, number: string, label: string) => `${revisionAddress(code, number, label)}/approval`,
+  },
+  sheets: { pattern: '/sheets', to: () => '/sheets' },
+  issuedSheet: { pattern: '/sheets/:id', to: (id: string) => `/sheets/${encodeURIComponent(id)}` },
+  concessions: { pattern: '/concessions', to: () => '/concessions' },
+  verify: {
+    pattern: '/verify/:verificationCode?',
+    to: (verificationCode?: string) =>
+      verificationCode ? `/verify/${encodeURIComponent(verificationCode)}` : '/verify',
+  },
+  revision: {
+    pattern: '/projects/:code/specifications/:number/revisions/:label',
+    to: revisionAddress,
+  },
+  check: {
+    pattern: '/projects/:code/specifications/:number/revisions/:label/check',
+    to: (code: string, number: string, label: string) => `${revisionAddress(code, number, label)}/check`,
   },
   catalogue: { pattern: '/catalogue', to: () => '/catalogue' },
   catalogueUnit: { pattern: '/catalogue/:code', to: (code: string) => `/catalogue/${encodeURIComponent(code)}` },

@@ -14,6 +14,7 @@ function Navigation() {
   const entries = [
     { to: paths.desk.to(), label: 'Desk', end: true },
     { to: paths.projects.to(), label: 'Projects' },
+    { to: paths.sheets.to(), label: 'Sheets' },
     { to: paths.catalogue.to(), label: 'Catalogue' },
     { to: paths.tables.to(), label: 'Tables' },
     ...(maySeeDrafts(person) ? [{ to: paths.trail.to(), label: 'Trail' }] : []),

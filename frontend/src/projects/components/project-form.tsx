@@ -9,7 +9,8 @@ import { ChoiceField } from '../../ui/forms/choice-field';
 import { LongTextField, TextField } from '../../ui/forms/text-fields';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { useSchemaForm, type SchemaForm } from '../../ui/forms/use-schema-form';
-import { KIND_CHOICES, PAPER_CHOICES, timeZoneChoices } from '../model/labels';
+import { timeZoneChoices } from '../../ui/time-zones';
+import { KIND_CHOICES, PAPER_CHOICES } from '../model/labels';
 
 interface ProjectValues {
   code?: string;

@@ -11,11 +11,12 @@ import { Page } from '../../ui/page/page';
 import { Sheet } from '../../ui/page/sheet';
 import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
+import { zoneText } from '../../ui/time-zones';
 import { CreateSpecificationForm } from '../components/create-specification-form';
 import { EditProjectForm } from '../components/project-form';
 import { SpecificationsTable } from '../components/specifications-table';
 import { TowerFamiliesTable } from '../components/tower-families-table';
-import { PROJECT_KIND_LABELS, voltageText, zoneText } from '../model/labels';
+import { PROJECT_KIND_LABELS, voltageText } from '../model/labels';
 
 function ProjectFacts({ project }: { project: Project }) {
   const drafts = maySeeDrafts(usePerson());

@@ -1,6 +1,7 @@
 import type { Evaluation, Severity } from '@bellgap/common/api';
 import { STANDING_CAUTIONS } from '@bellgap/common/schemas';
 import { CautionList, SEVERITY_ORDER } from '../../ui/caution';
+import { partWords } from '../../ui/part-words';
 import { LedgerBlock } from './ledger-rows';
 
 /** What the answer warns of, the gravest first. */
@@ -40,45 +41,6 @@ function countWords(severities: Severity[]): string {
     .filter(([, count]) => count > 0)
     .map(([severity, count]) => `${count} ${count === 1 ? SINGULAR[severity] : PLURAL[severity]}`)
     .join(', ');
-}
-
-const PARTS: Record<string, string> = {
-  string: 'String',
-  clearances: 'Clearances',
-  clearance: 'Clearances',
-  mechanical: 'Mechanical loads',
-  towerHead: 'Tower head and swing',
-  midSpan: 'Spacing at mid span',
-  bay: 'Substation bay',
-  system: 'System',
-  site: 'Site',
-};
-
-const DETAILS: Record<string, string> = {
-  voltageSharing: 'voltage along the string',
-  pollution: 'pollution',
-  lightning: 'lightning',
-  switching: 'switching',
-  'power-frequency': 'power frequency, wet',
-  minimum: 'minimum count',
-  extraUnits: 'extra units',
-  arcingDevices: 'arcing devices',
-  stringLengthWithFittings: 'length with fittings',
-  overvoltages: 'overvoltages',
-  safetySource: 'distances for people',
-};
-
-function partWords(part: string): string {
-  const [head = '', ...rest] = part.split('.');
-  const detail = rest.map(
-    (name) =>
-      DETAILS[name] ??
-      name
-        .replace(/([A-Z])/g, ' $1')
-        .replaceAll('-', ' ')
-        .toLowerCase(),
-  );
-  return [PARTS[head] ?? head, ...detail].join(', ');
 }
 
 /** What this answer does not cover, and why: never to be taken as passed. */

@@ -2,6 +2,7 @@ import { actionLabel, contract, recordLabel, type TrailEvent } from '@bellgap/co
 import { useMemo } from 'react';
 import { addressOf } from '../../api/client';
 import { holds, maySeeDrafts, usePerson } from '../../api/session';
+import { ChangeList, changesText } from '../../ui/changes';
 import { DataTable } from '../../ui/data-table/data-table';
 import type { Column } from '../../ui/data-table/columns';
 import { useListQuery } from '../../ui/data-table/use-list-query';
@@ -11,11 +12,9 @@ import { Page } from '../../ui/page/page';
 import { Sheet } from '../../ui/page/sheet';
 import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
-import { ChangeList } from '../components/change-list';
 import { RecordWords } from '../components/record-words';
 import { TrailFilters } from '../components/trail-filters';
 import { VerificationSheet } from '../components/verification-sheet';
-import { changesText } from '../model/words';
 import '../components/trail.css';
 
 const FILTERS = ['project', 'specification', 'entity', 'entityId', 'person', 'action', 'path', 'from', 'to'] as const;

@@ -1,5 +1,6 @@
 import { trailFieldLabel, type TrailChange } from '@bellgap/common/api';
-import { trailValueWords, wholeValue } from '../model/words';
+import './changes.css';
+import { trailValueWords, wholeValue } from './value-words';
 
 const SHOWN_AT_ONCE = 5;
 
@@ -32,7 +33,7 @@ export function ChangeList({ changes }: { changes: readonly TrailChange[] }) {
   const rest = changes.slice(SHOWN_AT_ONCE);
   return (
     <>
-      <ul className="trail-changes">
+      <ul className="changes">
         {changes.slice(0, SHOWN_AT_ONCE).map((change) => (
           <Change key={change.path} change={change} />
         ))}
@@ -40,7 +41,7 @@ export function ChangeList({ changes }: { changes: readonly TrailChange[] }) {
       {rest.length > 0 && (
         <details>
           <summary>{rest.length} more</summary>
-          <ul className="trail-changes">
+          <ul className="changes">
             {rest.map((change) => (
               <Change key={change.path} change={change} />
             ))}

@@ -1,0 +1,2 @@
+export { ChangeList } from './change-list';
+export { changesText, trailValueWords, wholeValue } from './value-words';

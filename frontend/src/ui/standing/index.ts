@@ -1,0 +1,1 @@
+export { StandingMark, StandingShape, type ShownStanding } from './standing-mark';
