@@ -23,6 +23,10 @@ export const routes: RouteObject[] = [
         lazy: async () => ({ Component: (await import('../account/pages/reset-page')).ResetPage }),
       },
       {
+        path: paths.verify.pattern,
+        lazy: async () => ({ Component: (await import('../verification/pages/verify-page')).VerifyPage }),
+      },
+      {
         element: <Layout />,
         children: [
           {
@@ -51,6 +55,24 @@ export const routes: RouteObject[] = [
                 lazy: async () => ({
                   Component: (await import('../specifications/pages/specification-page')).SpecificationPage,
                 }),
+              },
+              {
+                path: paths.approval.pattern,
+                lazy: async () => ({ Component: (await import('../approval/pages/approval-page')).ApprovalPage }),
+              },
+              {
+                path: paths.sheets.pattern,
+                lazy: async () => ({ Component: (await import('../register/pages/register-page')).RegisterPage }),
+              },
+              {
+                path: paths.issuedSheet.pattern,
+                lazy: async () => ({
+                  Component: (await import('../register/pages/issued-sheet-page')).IssuedSheetPage,
+                }),
+              },
+              {
+                path: paths.concessions.pattern,
+                lazy: async () => ({ Component: (await import('../register/pages/concessions-page')).ConcessionsPage }),
               },
               {
                 path: paths.catalogue.pattern,
