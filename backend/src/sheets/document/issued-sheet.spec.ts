@@ -7,6 +7,9 @@ import { layOutSheet } from './layout';
 import type { Element, Mark } from './layout/marks';
 import { renderSheet } from './render-sheet';
 
+// Pages are printed and scanned here, and other tests share the machine.
+jest.setTimeout(120_000);
+
 const PAPERS = ['A4', 'Letter'] as const;
 const on = (paper: 'A4' | 'Letter', content: SheetContent): SheetContent => ({
   ...content,

@@ -35,8 +35,12 @@ export function plain(value: number | null | undefined): string {
   return /^\d+(\.\d+)?$/.test(text) ? figure(value, decimals) : String(value);
 }
 
+/** A computed figure: whole where it is whole, else to one decimal. */
+export const short = (value: number | null | undefined): string =>
+  near(value, typeof value === 'number' && Number.isInteger(withoutDust(value)) ? 0 : 1);
+
 /** A difference with its sign; nothing has none. */
-export const signed = (value: number): string => (value > 0 ? `+${plain(value)}` : plain(value));
+export const signed = (value: number): string => (value > 0 ? `+${short(value)}` : short(value));
 
 /** A figure with its unit, or the words for a missing one. */
 export const withUnit = (text: string, unit: string): string =>

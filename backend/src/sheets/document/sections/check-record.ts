@@ -2,7 +2,19 @@ import { CHECK_CATEGORY_LABELS } from '@bellgap/common/api';
 import { CHECKLIST, CHECKLIST_ANSWERS, CHECK_VERDICTS } from '@bellgap/common/schemas';
 import { cell, figures, heading, paragraph, type Block, type Cell, type Pairs } from '../blocks';
 import type { SheetCheck, SheetContent } from '../content';
-import { citation, fieldWords, inputWords, near, plain, signed, siteTime, UNKNOWN, valueAt, withUnit } from '../words';
+import {
+  citation,
+  fieldWords,
+  inputWords,
+  near,
+  plain,
+  short,
+  signed,
+  siteTime,
+  UNKNOWN,
+  valueAt,
+  withUnit,
+} from '../words';
 
 type Difference = SheetCheck['differences'][number];
 
@@ -90,11 +102,11 @@ function differences(check: SheetCheck, content: SheetContent): Block[] {
       rows: check.differences.map((one) => ({
         cells: [
           cell(FIGURES[one.figure]),
-          figures(withUnit(plain(one.own), one.unit)),
+          figures(withUnit(short(one.own), one.unit)),
           cell(cardWords(one.card, content), { tone: 'soft' }),
-          figures(withUnit(plain(one.authors), one.unit)),
+          figures(withUnit(short(one.authors), one.unit)),
           differenceCell(one),
-          figures(one.band === null ? UNKNOWN : `±${plain(one.band)}`),
+          figures(one.band === null ? UNKNOWN : `±${short(one.band)}`),
           cell(standing(one), one.outside ? { face: 'semibold' } : {}),
         ],
       })),

@@ -47,7 +47,7 @@ export function clearances({ evaluation }: SheetContent): Block[] {
 
 /** Why a method that is not the chosen one has no figure. */
 function absenceWords({ method, why }: NonNullable<ClearancesResult['besideWhyNot']>[number]): string {
-  return `${CHOICE_LABELS.clearanceMethod[method]}, no figure beside: ${why.slice(0, 1).toLowerCase()}${why.slice(1)}`;
+  return `${CHOICE_LABELS.clearanceMethod[method]}, no figure beside: ${/^[A-Z][a-z]/.test(why) ? why.charAt(0).toLowerCase() + why.slice(1) : why}`;
 }
 
 function clearanceRow(row: ClearanceRow): Row {
@@ -59,7 +59,9 @@ function clearanceRow(row: ClearanceRow): Row {
       cell(row.governs ? `${method}, governs` : method),
       cell(STRESS_WORDS[row.stress] ?? row.stress.replaceAll('-', ' ')),
       cell(row.shape === null ? '–' : (SHAPE_WORDS[row.shape] ?? row.shape.replaceAll('-', ' '))),
-      figures(plain(row.withstandKv)),
+      figures(
+        row.withstandKv === null || Number.isInteger(row.withstandKv) ? plain(row.withstandKv) : up(row.withstandKv, 1),
+      ),
       figures(near(row.altitudeFactor, 3)),
       figures(value),
       cell(`${sourceWords(row.source)}${row.interpolated ? '; interpolated' : ''}`, {

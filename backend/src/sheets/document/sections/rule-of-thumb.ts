@@ -2,7 +2,7 @@ import type { Evaluation, RuleOfThumbRow } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { cell, figures, heading, paragraph, type Block, type Row } from '../blocks';
 import type { SheetContent } from '../content';
-import { near, plain, signed, sourceWords, withUnit } from '../words';
+import { plain, short, signed, sourceWords, withUnit } from '../words';
 
 const VERDICTS = { within: 'within the band', explain: 'to be explained', 'out-of-range': 'does not apply' } as const;
 
@@ -19,27 +19,25 @@ function cards(rows: RuleOfThumbRow[]): Block {
     kind: 'table',
     summary: 'Estimates by rules of thumb beside the figures of the sheet',
     columns: [
-      { head: 'rule', share: 3 },
-      { head: 'estimate', share: 1.35, align: 'right' },
-      { head: 'sheet', share: 1.35, align: 'right' },
-      { head: 'band', share: 0.9, align: 'right' },
+      { head: 'rule', share: 2.6 },
+      { head: 'estimate', share: 1.5, align: 'right' },
+      { head: 'sheet', share: 1.5, align: 'right' },
+      { head: 'band', share: 1.05, align: 'right' },
       { head: 'verdict', share: 1.9 },
       { head: 'source', share: 2.4 },
     ],
     rows: rows.map((row) => ({
       cells: [
         cell(row.rule),
-        figures(withUnit(digits(row.estimate), row.unit)),
-        figures(withUnit(digits(row.given), row.unit)),
-        figures(row.band === null ? '–' : `±${plain(row.band)}`),
+        figures(withUnit(short(row.estimate), row.unit)),
+        figures(withUnit(short(row.given), row.unit)),
+        figures(row.band === null ? '–' : `±${short(row.band)}`),
         cell(row.why ? `${VERDICTS[row.verdict]}: ${row.why}` : VERDICTS[row.verdict]),
         cell(sourceWords(row.source), { tone: 'soft' }),
       ],
     })),
   };
 }
-
-const digits = (value: number | null): string => near(value, value !== null && Number.isInteger(value) ? 0 : 1);
 
 const CAUSES: Record<string, string> = CHOICE_LABELS.bridgeCause;
 
