@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import type { InsulatorUnit } from '../engine/model';
-import { answer, discUnit, drawingCases, lineInput, suspensionCase } from './fixtures';
+import { answer, discUnit, drawingCases, lineInput, postUnit, suspensionCase } from './fixtures';
 import { allWords, boxesOverlap, drawString, outlineOf, textBox, type Drawing, type Primitive } from './index';
 
 const drawn = (drawing: Drawing | null): Drawing => {
@@ -44,6 +44,10 @@ const heights = (data: string): [number, number] => {
   const ys = [...data.matchAll(/-?[\d.]+ (-?[\d.]+)/g)].map((m) => Number(m[1]));
   return [Math.min(...ys), Math.max(...ys)];
 };
+
+/** Rise and run of a dimension, for an angle above the horizontal. */
+const directionOf = ({ from, to }: { from: { xMm: number; yMm: number }; to: { xMm: number; yMm: number } }) =>
+  [from.yMm - to.yMm, to.xMm - from.xMm] as const;
 
 describe('the string to scale', () => {
   const discs = (drawing: Drawing) =>
@@ -96,6 +100,72 @@ describe('the string to scale', () => {
     expect(Math.hypot(dx, dy)).toBeCloseTo(2890, 6);
     expect((Math.atan2(dx, dy) * 180) / Math.PI).toBeCloseTo(50, 6);
     expect(discs(drawing)).toHaveLength(34);
+  });
+
+  describe('a line post', () => {
+    const postAt = (postAngleDeg: number | null, chosen: Parameters<typeof lineInput>[0] = {}): Drawing => {
+      const unit = postUnit();
+      const evaluation = answer(unit, 1, { stringLengthWithFittingsMinMm: null, stringLengthWithFittingsMaxMm: null });
+      const input = lineInput({ postAngleDeg, hardwareLengthMm: 200, ...chosen });
+      return drawn(drawString(input, { insulator: unit }, evaluation));
+    };
+    const sectionOf = (drawing: Drawing) => {
+      const section = drawing.primitives.find((p) => p.about === 'string.sectionLengthMm');
+      if (section?.kind !== 'dimension') throw new Error('no section length');
+      return section;
+    };
+    const words = (drawing: Drawing) => allWords(drawing).map((w) => w.text);
+
+    it.each([0, 15, 30, 45, 60, 90])('leans %i degrees out of its structure, true to length', (postAngleDeg) => {
+      const drawing = postAt(postAngleDeg);
+      const { from, to, text } = sectionOf(drawing);
+      const [dx, dy] = [to.xMm - from.xMm, to.yMm - from.yMm];
+      expect(Math.hypot(dx, dy)).toBeCloseTo(960, 6);
+      expect((Math.atan2(-dy, dx) * 180) / Math.PI).toBeCloseTo(postAngleDeg, 6);
+      expect(text).toBe('960');
+      expect(words(drawing)).toContain(`${postAngleDeg}° above the horizontal`);
+      expect(discs(drawing)).toHaveLength(1);
+    });
+
+    it('has its conductor at the tip, one length of fittings and post away from the structure', () => {
+      const drawing = postAt(0);
+      const steel = drawing.primitives.find((p) => p.kind === 'path' && p.layer === 'structure');
+      const clamp = drawing.primitives.find((p) => p.kind === 'circle' && p.layer === 'live');
+      if (steel?.kind !== 'path' || clamp?.kind !== 'circle') throw new Error('no structure or no conductor');
+      const faceMm = Math.max(...[...steel.data.matchAll(/(-?[\d.]+) -?[\d.]+/g)].map((m) => Number(m[1])));
+      expect(clamp.centre.xMm - faceMm).toBeCloseTo(960 + 200, 1);
+      expect(clamp.centre.yMm).toBeCloseTo((heights(discs(drawing)[0]!)[0] + heights(discs(drawing)[0]!)[1]) / 2, 1);
+      const arc = drawing.primitives.find((p) => p.kind === 'arc' && p.layer === 'clearance');
+      expect(arc?.kind === 'arc' && arc.radiusMm - clamp.radiusMm).toBeCloseTo(1900, 6);
+      expect(arc?.kind === 'arc' && arc.centre).toEqual(clamp.centre);
+    });
+
+    it('is named a post, and never hangs or is pulled', () => {
+      const drawing = postAt(20, { arrangement: 'tension' });
+      expect(drawing.title).toBe('Line post, LP10-66, to scale');
+      expect(drawing.description).toContain(
+        'fixed at the structure, axis 20° above the horizontal, conductor at the tip',
+      );
+      expect((Math.atan2(...directionOf(sectionOf(drawing))) * 180) / Math.PI).toBeCloseTo(20, 6);
+    });
+
+    it('says that its angle was not given', () => {
+      expect(words(postAt(null))).toContain('angle of the post not given, 0° drawn');
+    });
+
+    it('keeps its words apart at every angle', () => {
+      for (let postAngleDeg = 0; postAngleDeg <= 90; postAngleDeg += 5) {
+        for (const spacingMm of [400, 960, 2200]) {
+          for (const arcingDevices of ['none', 'horns'] as const) {
+            const unit = postUnit({ spacingMm, diameterMm: 0.16 * spacingMm });
+            const input = lineInput({ postAngleDeg, arcingDevices, arcGapMm: 0.8 * spacingMm });
+            const drawing = drawn(drawString(input, { insulator: unit }, answer(unit, 1)));
+            const found = { postAngleDeg, spacingMm, arcingDevices, overlaps: overlaps(drawing) };
+            expect(found).toEqual({ ...found, overlaps: [] });
+          }
+        }
+      }
+    });
   });
 
   it('draws the share of the voltage as a bar beside each disc, the line end solid', () => {
@@ -199,6 +269,7 @@ describe('the string to scale', () => {
       parallelStrings: fc.option(fc.integer({ min: 1, max: 4 })),
       vAngleWindwardDeg: fc.option(fc.double({ min: 1, max: 89, noNaN: true })),
       vAngleLeewardDeg: fc.option(fc.double({ min: 1, max: 89, noNaN: true })),
+      postAngleDeg: fc.option(fc.double({ min: 0, max: 90, noNaN: true })),
     });
     const result = fc.record({
       units: fc.option(fc.integer({ min: 1, max: 60 })),

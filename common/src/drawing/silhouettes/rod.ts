@@ -17,6 +17,7 @@ const MOST_SHEDS = 300;
  */
 export function rodOutline(unit: InsulatorUnit, diameterMm: number): RodOutline {
   const length = unit.spacingMm;
+  const post = unit.kind === 'line-post';
   const composite = unit.kind === 'composite-rod';
   const radius = diameterMm / 2;
   const left = unit.dryArcMm === null ? 0 : (length - unit.dryArcMm) / 2;
@@ -48,6 +49,7 @@ export function rodOutline(unit: InsulatorUnit, diameterMm: number): RodOutline 
 
   const grip = composite ? shank * 1.25 : shank * 1.4;
   const eye = Math.min(grip * 0.8, composite ? 14 : 22);
+  if (post) return { ends: postEnds(length, end, 1.25 * shank), housing: mirrored(half), sheds };
   const upper: Segment[] = [
     move(0, 0),
     line(eye, 0),
@@ -65,4 +67,19 @@ export function rodOutline(unit: InsulatorUnit, diameterMm: number): RodOutline 
     line(0, length),
   ];
   return { ends: [...mirrored(upper), ...mirrored(lower)], housing: mirrored(half), sheds };
+}
+
+/** A post is bolted: a flange at its base, a plain cap at its tip. */
+function postEnds(length: number, end: number, grip: number): Segment[] {
+  const flange = 1.5 * grip;
+  const base: Segment[] = [
+    move(0, 0),
+    line(flange, 0),
+    line(flange, 0.16 * end),
+    line(grip, 0.16 * end),
+    line(grip, end),
+    line(0, end),
+  ];
+  const tip: Segment[] = [move(0, length - end), line(grip, length - end), line(grip, length), line(0, length)];
+  return [...mirrored(base), ...mirrored(tip)];
 }

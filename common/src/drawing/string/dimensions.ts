@@ -1,4 +1,5 @@
 import type { CriterionResult, Evaluation } from '../../engine/model';
+import { CAP_SHARE } from '../dimension';
 import type { DraftingTable } from '../drafting';
 import { figure } from '../figures';
 import { at, degrees, place, type Transform } from '../geometry';
@@ -67,10 +68,11 @@ function drawDiameter(table: DraftingTable, plan: StringPlan, frame: Transform):
   const about = 'insulator.diameterMm';
   table.add({ kind: 'line', layer: 'dimension', from, to, about });
   const outX = (to.xMm - from.xMm) / leader;
+  const endMm = to.yMm > from.yMm ? to.yMm + (0.3 + CAP_SHARE) * t : to.yMm - 0.3 * t;
   const words = `Ø ${figure(plan.diameterMm)}`;
   table.text(
     'dimension',
-    upright ? at(to.xMm, to.yMm - 0.3 * t) : at(to.xMm + outX * 0.3 * t, to.yMm + 0.35 * t),
+    upright ? at(to.xMm, endMm) : at(to.xMm + outX * 0.3 * t, to.yMm + 0.35 * t),
     words,
     upright ? 'middle' : outX < 0 ? 'end' : 'start',
     about,

@@ -5,6 +5,7 @@ import { figure } from '../figures';
 import type { Drawing } from '../primitives';
 import { assumptions, drawLegend } from './legend';
 import { contentSizeMm, layOutSuspension, layOutTension, layOutV } from './layouts';
+import { layOutPost } from './post';
 import { planString, type StringPlan } from './plan';
 import { sharesFromAttachment, shareWords } from './voltage-sharing';
 
@@ -31,13 +32,15 @@ export function drawString(
   const plan = planString(input, context.insulator, evaluation);
   if (!plan) return null;
   const table = new DraftingTable((contentSizeMm(plan) / TEXTS_IN_CONTENT) * (options.textScale ?? 1));
-  LAYOUTS[plan.arrangement](table, plan, evaluation);
+  const layOut = plan.postDeg === null ? LAYOUTS[plan.arrangement] : layOutPost;
+  layOut(table, plan, evaluation);
   drawLegend(table, plan);
   return table.finish(titleOf(plan), describe(plan, evaluation));
 }
 
 function titleOf(plan: StringPlan): string {
   const units = plan.discs || plan.count > 1 ? `${plan.count} × ${plan.unit.code}` : plan.unit.code;
+  if (plan.postDeg !== null) return `${CHOICE_LABELS.insulatorKind['line-post']}, ${units}, to scale`;
   return `${CHOICE_LABELS.arrangement[plan.arrangement]} string, ${units}, to scale`;
 }
 
@@ -49,9 +52,11 @@ function describe(plan: StringPlan, evaluation: Evaluation): string {
     plan.diameterKnown ? `diameter ${figure(plan.diameterMm)} mm` : 'diameter not known',
     `section length ${figure(plan.bottomMm - plan.topMm)} mm`,
   ];
+  if (plan.postDeg !== null)
+    parts.push(`fixed at the structure, axis ${figure(plan.postDeg)}° above the horizontal, conductor at the tip`);
   if (plan.acrossMm.length > 1)
     parts.push(
-      `${plan.acrossMm.length} strings in parallel${plan.arrangement === 'v-suspension' ? ' in each leg' : ''}`,
+      `${plan.acrossMm.length} ${plan.postDeg === null ? 'strings' : 'posts'} in parallel${plan.arrangement === 'v-suspension' ? ' in each leg' : ''}`,
     );
   if (plan.extra > 0) parts.push(`${plan.extra} of them extra units`);
   if (plan.arrangement === 'v-suspension')

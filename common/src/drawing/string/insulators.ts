@@ -71,7 +71,7 @@ export function drawFittings(table: DraftingTable, plan: StringPlan, frame: Tran
   drawDevices(table, plan, frame);
 }
 
-function drawDevices(table: DraftingTable, plan: StringPlan, frame: Transform): void {
+export function drawDevices(table: DraftingTable, plan: StringPlan, frame: Transform): void {
   if (plan.devices === 'none') return;
   const { outMm, upperMm, lowerMm } = deviceReach(plan);
   const about = 'string.dryArcWithDevicesMm';

@@ -15,12 +15,16 @@ const SUPPORT_WORDS = {
   open: 'support, surroundings not known',
 } as const;
 
-type Layout = (table: DraftingTable, plan: StringPlan, evaluation: Evaluation) => void;
+export type Layout = (table: DraftingTable, plan: StringPlan, evaluation: Evaluation) => void;
 
 /** The largest measure of the layout without its words: it sets the height of text. */
 export function contentSizeMm(plan: StringPlan): number {
   const clearance = (plan.clearanceMm ?? 0) + plan.liveRadiusMm;
   const across = 2 * plan.halfWidthMm + clearance;
+  if (plan.postDeg !== null) {
+    const reachMm = plan.liveMm * Math.cos(radians(plan.postDeg));
+    return Math.max(reachMm + 0.9 * clearance, plan.liveMm * Math.sin(radians(plan.postDeg)) + clearance);
+  }
   switch (plan.arrangement) {
     case 'tension':
       return Math.max(1.2 * plan.liveMm, across);

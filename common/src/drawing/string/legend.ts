@@ -29,6 +29,7 @@ export function assumptions(plan: StringPlan): string[] {
   if (!plan.diameterKnown) words.push('diameter not known, assumed');
   if (!plan.fittingsKnown) words.push('length of fittings not given');
   if (plan.arrangement === 'v-suspension' && !plan.anglesKnown) words.push('leg angles not given, 45° drawn');
+  if (plan.postDeg !== null && !plan.postAngleKnown) words.push('angle of the post not given, 0° drawn');
   if (plan.devices !== 'none' && plan.gapMm === null) words.push('gap of the devices not given');
   return words;
 }

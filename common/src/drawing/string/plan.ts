@@ -28,6 +28,9 @@ export interface StringPlan {
   windwardDeg: number;
   leewardDeg: number;
   anglesKnown: boolean;
+  /** Axis of a line post above the horizontal; null where strings hang or are pulled. */
+  postDeg: number | null;
+  postAngleKnown: boolean;
   devices: 'none' | 'horns' | 'rings';
   gapMm: number | null;
   withFittings: { minMm: number; maxMm: number } | null;
@@ -53,7 +56,9 @@ export function planString(
   const diameterKnown = usable(unit.diameterMm);
   const diameterMm = usable(unit.diameterMm) ? unit.diameterMm : assumedDiameter(unit);
   const fittingsKnown = typeof chosen.hardwareLengthMm === 'number' && chosen.hardwareLengthMm >= 0;
-  const fittingsMm = fittingsKnown ? chosen.hardwareLengthMm! : Math.min(420, 0.7 * sectionMm);
+  const isPost = unit.kind === 'line-post';
+  const assumedFittingsMm = isPost ? Math.min(200, 0.2 * sectionMm) : Math.min(420, 0.7 * sectionMm);
+  const fittingsMm = fittingsKnown ? chosen.hardwareLengthMm! : assumedFittingsMm;
   const topMm = 0.55 * fittingsMm;
   const parallel = usable(chosen.parallelStrings) ? Math.min(4, Math.max(1, Math.round(chosen.parallelStrings))) : 1;
   const pitchMm = diameterMm + Math.max(0.3 * diameterMm, 60);
@@ -66,7 +71,8 @@ export function planString(
     discs,
     count,
     extra: usable(answer.extraUnits) ? Math.min(count, Math.round(answer.extraUnits)) : 0,
-    arrangement: chosen.arrangement ?? 'suspension',
+    // A post stands as it is fixed, whatever arrangement is chosen for it.
+    arrangement: isPost ? 'suspension' : (chosen.arrangement ?? 'suspension'),
     surroundings: chosen.surroundings ?? 'open',
     diameterMm,
     diameterKnown,
@@ -81,6 +87,8 @@ export function planString(
     windwardDeg: chosen.vAngleWindwardDeg ?? ASSUMED_LEG_DEG,
     leewardDeg: chosen.vAngleLeewardDeg ?? ASSUMED_LEG_DEG,
     anglesKnown: usable(chosen.vAngleWindwardDeg) && usable(chosen.vAngleLeewardDeg),
+    postDeg: isPost ? Math.min(90, Math.max(0, chosen.postAngleDeg ?? 0)) : null,
+    postAngleKnown: typeof chosen.postAngleDeg === 'number',
     devices: chosen.arcingDevices ?? 'none',
     gapMm: usable(chosen.arcGapMm) ? Math.min(chosen.arcGapMm, 1.5 * sectionMm) : null,
     withFittings: usable(min) && usable(max) ? { minMm: min, maxMm: max } : null,

@@ -58,8 +58,11 @@ function noCountWhy(evaluation: Evaluation, input: SpecificationInput): string {
   return stop?.text ?? missingWords(input) ?? whyNot(evaluation, 'string') ?? 'No criterion could be assessed';
 }
 
-const unitsWord = (units: number, isRod: boolean): string =>
-  isRod ? (units === 1 ? 'rod' : 'rods') : units === 1 ? 'unit' : 'units';
+/** What is counted, in words: units of discs, rods or posts. */
+function unitsWord(units: number, unit: InsulatorUnit | null): string {
+  const one = unit?.kind === 'line-post' ? 'post' : isRod(unit) ? 'rod' : 'unit';
+  return units === 1 ? one : `${one}s`;
+}
 const isRod = (unit: InsulatorUnit | null): boolean => unit !== null && unit.kind !== 'cap-and-pin';
 
 function Count({
@@ -92,7 +95,7 @@ function Count({
   return (
     <div className="answer-main">
       <span className="answer-big">
-        <Figure value={units} name="string.units" label="Number of units" /> {unitsWord(units, isRod(unit))}
+        <Figure value={units} name="string.units" label="Number of units" /> {unitsWord(units, unit)}
         {unit && ` ${unit.code}`}
       </span>
       {unit && <small>{stringWords(input, unit)}</small>}
@@ -196,7 +199,7 @@ function Governing({ evaluation, unit }: { evaluation: Evaluation; unit: Insulat
 
 function shortCount({ string, clearances }: Evaluation, unit: InsulatorUnit | null): string {
   if (string?.units !== null && string?.units !== undefined)
-    return `${string.units} ${unitsWord(string.units, isRod(unit))}${unit ? ` ${unit.code}` : ''}`;
+    return `${string.units} ${unitsWord(string.units, unit)}${unit ? ` ${unit.code}` : ''}`;
   if (!string && clearances?.phaseToEarthMm) return `${formatNumber(clearances.phaseToEarthMm)} mm to earth`;
   return 'No count yet';
 }

@@ -15,7 +15,10 @@ export function MechanicalBlock({ evaluation }: { evaluation: Evaluation }) {
   const why = evaluation.notAssessed.find(({ part }) => part === 'mechanical')?.why;
   const bent = cases.some(({ post }) => post);
   return (
-    <LedgerBlock title="Mechanical loads" aside="of the whole set, and of one string">
+    <LedgerBlock
+      title="Mechanical loads"
+      aside={bent ? 'of the whole set, and of one post' : 'of the whole set, and of one string'}
+    >
       {why && <p className="zone-note">not assessed: {lowerFirst(why)}</p>}
       <TraceArea>
         {cases.length > 0 && (
@@ -34,7 +37,10 @@ export function MechanicalBlock({ evaluation }: { evaluation: Evaluation }) {
           </table>
         )}
         <dl className="ledger-list">
-          <LedgerRow label="Strength needed" note={governedBy === null ? undefined : `by ${governedBy}`}>
+          <LedgerRow
+            label={bent ? 'Bending strength needed' : 'Strength needed'}
+            note={governedBy === null ? undefined : `by ${governedBy}`}
+          >
             <Figure value={strengthRequiredKn} unit="kN" decimals={1} round="up" why="a case has no figure" />
           </LedgerRow>
           <LedgerRow label="Class needed" note={coupling === null ? undefined : `coupling ${coupling}`}>
@@ -100,7 +106,8 @@ function CaseRows({ result, index, governs }: { result: MechanicalCaseResult; in
             <Figure value={kilo(horizontalN)} unit="kN" decimals={1} />
             {loadOneStringMissingN !== null && (
               <>
-                , one string missing <Figure value={kilo(loadOneStringMissingN)} unit="kN" decimals={1} round="up" />
+                , one {post ? 'post' : 'string'} missing{' '}
+                <Figure value={kilo(loadOneStringMissingN)} unit="kN" decimals={1} round="up" />
               </>
             )}
             {legs && (

@@ -79,6 +79,7 @@ function caseListWords(cases: readonly LoadCaseInput[]): string {
 export function stringWords(input: SpecificationInput, unit: InsulatorUnit): string {
   const string = input.string;
   const words: string[] = [];
+  if (unit.kind === 'line-post') return postWords(string, unit);
   if (string?.arrangement) {
     const many = string.parallelStrings;
     const count = many === 1 ? 'single ' : many === 2 ? 'double ' : many === null ? '' : `${many}-fold `;
@@ -89,6 +90,21 @@ export function stringWords(input: SpecificationInput, unit: InsulatorUnit): str
   return words.join(', ');
 }
 
+const bendingWords = ({ cantileverStrengthKn: strengthKn }: InsulatorUnit): string =>
+  typeof strengthKn === 'number' ? `${strengthKn} kN in bending` : 'bending strength not known';
+
+/** A post in words: "30° above the horizontal, 10 kN in bending, clamp". */
+function postWords(string: SpecificationInput['string'], unit: InsulatorUnit): string {
+  const angle = string?.postAngleDeg;
+  const many = string?.parallelStrings ?? 1;
+  return [
+    many > 1 ? `${many} line posts in parallel` : 'line post',
+    ...(typeof angle === 'number' ? [`${angle}° above the horizontal`] : []),
+    bendingWords(unit),
+    ...(unit.coupling ? [unit.coupling] : []),
+  ].join(', ');
+}
+
 export function unitWords(unit: InsulatorUnit): string {
   const words: string[] = [];
   if (unit.material) words.push(CHOICE_LABELS.insulatorMaterial[unit.material].toLowerCase());
@@ -96,7 +112,7 @@ export function unitWords(unit: InsulatorUnit): string {
   words.push(
     unit.diameterMm === null ? `length ${unit.spacingMm} mm` : `${unit.diameterMm} × ${unit.spacingMm} mm`,
     `${unit.creepageMm} mm creepage`,
-    `${unit.failingLoadKn} kN`,
+    unit.kind === 'line-post' ? bendingWords(unit) : `${unit.failingLoadKn} kN`,
   );
   return words.join(', ');
 }

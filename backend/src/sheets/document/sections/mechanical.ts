@@ -41,7 +41,7 @@ export function mechanical({ input, evaluation }: SheetContent): Block[] {
               { head: 'vertical', share: 1.2, align: 'right' as const },
               { head: 'horizontal', share: 1.2, align: 'right' as const },
               { head: bent ? 'a post, bending' : 'a string', share: 1.2, align: 'right' as const },
-              { head: 'one string missing', share: 1.4, align: 'right' as const },
+              { head: bent ? 'one post missing' : 'one string missing', share: 1.4, align: 'right' as const },
               { head: 'factor needed', share: 1, align: 'right' as const },
               { head: 'given', share: 0.9, align: 'right' as const },
               { head: 'verdict', share: 1 },
@@ -53,7 +53,10 @@ export function mechanical({ input, evaluation }: SheetContent): Block[] {
       kind: 'pairs',
       labelShare: 0.45,
       rows: [
-        { label: 'Strength needed', value: withUnit(up(answer.strengthRequiredKn, 1), 'kN') },
+        {
+          label: bent ? 'Bending strength needed' : 'Strength needed',
+          value: withUnit(up(answer.strengthRequiredKn, 1), 'kN'),
+        },
         {
           label: 'Class needed',
           value: withUnit(up(answer.classRequiredKn), 'kN'),

@@ -36,8 +36,9 @@ export function requiredValues({ evaluation, context, input }: SheetContent): Bl
   };
   if (answer) {
     const count = [answer.unitsBeforeExtra, answer.extraUnits];
+    const isPost = context.insulator?.kind === 'line-post';
     add(
-      'Units in the string',
+      isPost ? 'Posts in series' : 'Units in the string',
       near(answer.units),
       count[1] ? `${near(count[0])} and ${near(count[1])} extra` : undefined,
       true,
@@ -69,7 +70,14 @@ export function requiredValues({ evaluation, context, input }: SheetContent): Bl
       add('Mass of the set', withUnit(near(answer.massPerSetKg, 1), 'kg'));
   }
   const unit = context.insulator;
-  if (unit) {
+  if (unit?.kind === 'line-post') {
+    add(
+      'Bending strength of a post',
+      unit.cantileverStrengthKn == null ? 'not stated' : `${plain(unit.cantileverStrengthKn)} kN`,
+      'load at its tip',
+    );
+    add('Fixing at the tip', unit.coupling ?? 'not stated');
+  } else if (unit) {
     add('Failing load of a unit', `${plain(unit.failingLoadKn)} kN`);
     add('Coupling', unit.coupling ?? 'not stated');
   }
