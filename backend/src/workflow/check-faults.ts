@@ -1,11 +1,10 @@
 import type { BodyOf, CheckRecord, FieldError, contract } from '@bellgap/common/api';
 import {
-  CHECKLIST,
   filledPaths,
   isClearanceCard,
   isCountCard,
   labelOf,
-  type ChecklistItem,
+  passFaults as passFaultsOf,
 } from '@bellgap/common/schemas';
 import type { StoredRevision } from '../specifications/specifications.service';
 import type { CheckSoFar, StoredCheck } from './check-records.repository';
@@ -48,38 +47,5 @@ export function soFarFaults(given: BodyOf<typeof contract.saveCheck>, { input }:
 }
 
 /** What stands in the way of a pass. */
-export function passFaults(record: StoredCheck & CheckSoFar, { input }: Checked): FieldError[] {
-  const faults: FieldError[] = [];
-  const agreed = new Map(record.ticks.map((tick) => [tick.path, tick.agreed]));
-  const open = filledPaths(input).filter((path) => !agreed.has(path));
-  if (open.length > 0) {
-    faults.push({ path: 'ticks', message: `Inputs: not looked at yet: ${open.map(nameOf).join(', ')}` });
-  }
-  record.ticks.forEach(({ path, agreed: isAgreed }, i) => {
-    if (!isAgreed) {
-      faults.push({ path: `ticks[${i}].agreed`, message: `${nameOf(path)}: you do not agree; return the revision` });
-    }
-  });
-  const answered = new Map(record.checklist.map((entry) => [entry.item, entry]));
-  const missing = (Object.keys(CHECKLIST) as ChecklistItem[]).filter((item) => !answered.has(item));
-  if (missing.length > 0) {
-    faults.push({ path: 'checklist', message: `Checklist: ${missing.length} of the points are not answered yet` });
-  }
-  record.checklist.forEach(({ answer, note }, i) => {
-    if (answer === 'no' && !note.trim()) {
-      faults.push({ path: `checklist[${i}].note`, message: 'Note: a point answered with no needs a note' });
-    }
-  });
-  if (!record.independent) {
-    faults.push({ path: 'independent', message: 'Independence: declare that you had no part in the work' });
-  }
-  if (differencesOf(record).some(({ outside }) => outside) && !record.differenceReason.trim()) {
-    faults.push({
-      path: 'differenceReason',
-      message: 'Reason for the difference: your figures are outside the band of the rule; say why that is right',
-    });
-  }
-  return faults;
-}
-
-const nameOf = (path: string): string => labelOf(path);
+export const passFaults = (record: StoredCheck & CheckSoFar, { input }: Checked): FieldError[] =>
+  passFaultsOf({ ...record, differences: differencesOf(record) }, input);

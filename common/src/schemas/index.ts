@@ -1,3 +1,4 @@
+export * from './check-pass';
 export * from './fields';
 export * from './parts';
 export * from './specification-input';

@@ -75,6 +75,16 @@ export const routes: RouteObject[] = [
                 lazy: async () => ({ Component: (await import('../register/pages/concessions-page')).ConcessionsPage }),
               },
               {
+                path: paths.revision.pattern,
+                lazy: async () => ({
+                  Component: (await import('../specifications/pages/specification-page')).SpecificationPage,
+                }),
+              },
+              {
+                path: paths.check.pattern,
+                lazy: async () => ({ Component: (await import('../checking/pages/check-page')).CheckPage }),
+              },
+              {
                 path: paths.catalogue.pattern,
                 lazy: async () => ({ Component: (await import('../catalogue/pages/catalogue-page')).CataloguePage }),
               },

@@ -76,7 +76,10 @@ export function ConflictDialog({ mine, theirs, origin, changedBy, changedAt, onR
           {differing.map((one) => (
             <fieldset key={one.key} className={`conflict-row is-${one.changedBy}`}>
               <legend>
-                {one.label} <small>{CHANGED[one.changedBy]}</small>
+                {one.label}{' '}
+                <small>
+                  {CHANGED[one.changedBy]}, before: {valueWords(pathOf(one.key), one.before)}
+                </small>
               </legend>
               <Radio.Group
                 aria-label={one.label}

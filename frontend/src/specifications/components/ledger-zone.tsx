@@ -9,7 +9,7 @@ import { CriteriaBlock } from './criteria-block';
 import { LengthsBlock } from './lengths-block';
 import { TestLevelsBlock, UnitsOutBlock } from './proof-blocks';
 import { MechanicalBlock } from './mechanical-block';
-import { RuleCards } from './rule-cards';
+import { RuleCardsBlock } from './rule-cards';
 import { VoltageBlock } from './voltage-block';
 
 interface Properties {
@@ -37,7 +37,7 @@ export const LedgerZone = memo(function LedgerZone({ answer, unit }: Properties)
       <ClearanceBlocks evaluation={evaluation} />
       <UnitsOutBlock evaluation={evaluation} />
       <TestLevelsBlock evaluation={evaluation} />
-      <RuleCards evaluation={evaluation} />
+      <RuleCardsBlock evaluation={evaluation} />
       <BridgeBlock evaluation={evaluation} />
       <NotAssessedBlock evaluation={evaluation} />
       <StandingCautions />

@@ -1,13 +1,12 @@
-import { contract, REVISION_STATE_LABELS, type Revision, type SpecificationInput } from '@bellgap/common/api';
+import { contract, type Revision, type SpecificationInput } from '@bellgap/common/api';
 import { useMutation } from '@tanstack/react-query';
 import { useCallback, useMemo, useState } from 'react';
-import { Link } from 'react-router-dom';
 import { ApiError, failureText } from '../../api/api-error';
 import { call } from '../../api/client';
-import { paths } from '../../app/paths';
 import { TraceSourceContext } from '../../ui/trace';
-import { FormContext, type SpecificationForm } from '../hooks/form-context';
+import { FormContext } from '../hooks/form-context';
 import { HighlightProvider } from '../hooks/highlight';
+import { useFormContext } from '../hooks/use-form-context';
 import { useLiveEvaluation, type Answer } from '../hooks/use-live-evaluation';
 import { useSaving } from '../hooks/use-saving';
 import { useSpecificationForm } from '../hooks/use-specification-form';
@@ -21,11 +20,16 @@ import { paramsOf } from '../queries/use-revision';
 import { AnswerBar } from './answer-bar';
 import { ConflictDialog } from './conflict-dialog';
 import { DrawingZone } from './drawing-zone';
+import { EditQuestion } from './edit-question';
 import { InputsZone } from './inputs-zone';
 import { LedgerZone } from './ledger-zone';
+import { MovesBar } from './moves';
 import { KeptNotice, NewerBasis } from './notices';
+import { PresenceNotice } from './presence-notice';
 import { SavingWords } from './saving-words';
 import { SheetActions } from './sheet-actions';
+import { SpecificationCrumbs } from './specification-crumbs';
+import { SpecificationRemarks } from './specification-remarks';
 import { TitleBlock } from './title-block';
 import { WhatIfAction } from './what-if';
 import './specification.css';
@@ -35,6 +39,8 @@ const NOT_SAVED = 'The draft has to be saved before it can rest on the newer bas
 interface Properties {
   /** The revision as it was fetched; the form begins from it. */
   first: ShownRevision;
+  /** Begins the page anew from a revision that has moved on. */
+  onMoved: (revision: Revision) => void;
 }
 
 /** Input of earlier visits that the server does not have. */
@@ -46,7 +52,7 @@ function offersOf(first: Revision, key: string) {
   );
 }
 
-export function SpecificationEditor({ first }: Properties) {
+export function SpecificationEditor({ first, onMoved }: Properties) {
   const [revision, setRevision] = useState<Revision>(first);
   const address = useMemo(
     () => ({ code: first.projectCode, number: first.number, label: first.label }),
@@ -65,6 +71,7 @@ export function SpecificationEditor({ first }: Properties) {
   const inputFaulty = ownFaults.some(({ path }) => path.startsWith('input'));
 
   const [begun] = useState<Answer>(() => ({ input, key: inputKey, evaluation: first.evaluation }));
+  const [firstKey] = useState(key);
   const live = useLiveEvaluation({ input, key: inputKey, readable: readable && !inputFaulty }, begun);
   // What a save gives back is taken over where it says something new; fields stay as they are drawn.
   const onSaved = useCallback(
@@ -72,12 +79,14 @@ export function SpecificationEditor({ first }: Properties) {
       setRevision((now) => (now.basis?.id === saved.basis?.id ? { ...saved, basis: now.basis } : saved)),
     [],
   );
+  const [isAgreed, agree] = useState(!first.editBarsSigning);
+  const [wantsBasis, wantBasis] = useState(false);
   const draft = { values, body, key, readable: readable && ownFaults.length === 0 };
   const { saving, save, rebase, compareWith, versionNow } = useSaving({
     first,
     address,
     draft,
-    enabled: !readOnly,
+    enabled: !readOnly && isAgreed,
     onSaved,
   });
   const [offers, setOffersShown] = useState(() => (readOnly ? [] : offersOf(first, key)));
@@ -93,39 +102,7 @@ export function SpecificationEditor({ first }: Properties) {
     [evaluation],
   );
   const leave = useCallback(() => void save(false), [save]);
-  const { change, setFigure, setChoice, setReason, setTitle, backToBasis } = setters;
-  const context = useMemo<SpecificationForm>(
-    () => ({
-      values,
-      basis,
-      unit,
-      readOnly,
-      faults,
-      marks,
-      leave,
-      change,
-      setFigure,
-      setChoice,
-      setReason,
-      setTitle,
-      backToBasis,
-    }),
-    [
-      values,
-      basis,
-      unit,
-      readOnly,
-      faults,
-      marks,
-      leave,
-      change,
-      setFigure,
-      setChoice,
-      setReason,
-      setTitle,
-      backToBasis,
-    ],
-  );
+  const context = useFormContext({ values, basis, unit, readOnly, faults, marks, leave, ...setters });
 
   /** Begins anew from a version of the server, with the form holding `next`. */
   const beginFrom = (current: Revision, next: FormValues) => {
@@ -156,6 +133,8 @@ export function SpecificationEditor({ first }: Properties) {
     if (offered.lockVersion !== versionNow()) compareWith(offered, revision);
   };
 
+  const isTouched = !readOnly && (key !== firstKey || revision.lockVersion !== first.lockVersion || !readable);
+  const isAsking = !readOnly && !isAgreed && (isTouched || wantsBasis);
   const { conflict } = saving;
   return (
     <FormContext value={context}>
@@ -163,24 +142,13 @@ export function SpecificationEditor({ first }: Properties) {
         <HighlightProvider>
           <div className="specification">
             <div className="specification-head">
-              <nav className="specification-crumbs" aria-label="Where this page stands">
-                <Link to={paths.project.to(revision.projectCode)}>
-                  {revision.projectCode} {revision.projectTitle}
-                </Link>
-                <span aria-hidden="true">/</span>
-                <h1>
-                  <b>{revision.number}</b> <span>{values.title}</span>
-                </h1>
-                <span aria-hidden="true">/</span>
-                <span>
-                  revision <b>{revision.label}</b>
-                </span>
-                <span className="state-mark">{REVISION_STATE_LABELS[revision.state]}</span>
-                <Link to={paths.trail.to({ project: revision.projectCode, specification: revision.number })}>
-                  Trail
-                </Link>
-                <SavingWords saving={saving} readable={draft.readable} readOnly={readOnly} onRetry={leave} />
-              </nav>
+              <SpecificationCrumbs revision={revision} title={values.title}>
+                {isAsking ? (
+                  <span className="saving is-open">not saved: waits for your answer</span>
+                ) : (
+                  <SavingWords saving={saving} readable={draft.readable} readOnly={readOnly} onRetry={leave} />
+                )}
+              </SpecificationCrumbs>
               <SheetActions
                 address={address}
                 lastSheet={first.lastSheet}
@@ -190,6 +158,26 @@ export function SpecificationEditor({ first }: Properties) {
                 {input.kind !== 'bay' && <WhatIfAction address={address} answer={live.answer} unit={unit} />}
               </SheetActions>
             </div>
+            <MovesBar
+              revision={revision}
+              address={address}
+              save={() => save(false)}
+              versionNow={versionNow}
+              onMoved={onMoved}
+            />
+            {first.state === 'draft' && <PresenceNotice address={address} editing={isTouched} />}
+            {isAsking && (
+              <EditQuestion
+                onEdit={() => {
+                  agree(true);
+                  if (wantsBasis) takeBasis.mutate();
+                }}
+                onLeave={() => {
+                  wantBasis(false);
+                  replace(formOf(first));
+                }}
+              />
+            )}
             {offered && (
               <KeptNotice
                 kept={offered}
@@ -203,7 +191,7 @@ export function SpecificationEditor({ first }: Properties) {
               readOnly={readOnly}
               isTaking={takeBasis.isPending}
               failure={takeBasis.error ? failureText(takeBasis.error) : null}
-              onTakeOver={() => takeBasis.mutate()}
+              onTakeOver={() => (isAgreed ? takeBasis.mutate() : wantBasis(true))}
             />
             <AnswerBar answer={live.answer} state={live.state} message={live.message} unit={unit} />
             <div className="zones">
@@ -213,6 +201,7 @@ export function SpecificationEditor({ first }: Properties) {
             </div>
             <TitleBlock revision={revision} />
           </div>
+          <SpecificationRemarks revision={revision} address={address} lines={first.evaluation.trace} />
           {conflict && (
             <ConflictDialog
               mine={asStored(values, unit)}

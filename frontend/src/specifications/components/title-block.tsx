@@ -1,6 +1,7 @@
 import type { Revision } from '@bellgap/common/api';
 import { Input } from 'antd';
 import { memo } from 'react';
+import { RevisionStateMark } from '../../ui/revision-state';
 import { useForm } from '../hooks/form-context';
 import { faultAt } from '../model/faults';
 
@@ -41,7 +42,9 @@ export const TitleBlock = memo(function TitleBlock({ revision }: { revision: Rev
       </div>
       <div>
         <dt>revision</dt>
-        <dd className="bg-num">{revision.label}</dd>
+        <dd>
+          <span className="bg-num">{revision.label}</span> <RevisionStateMark state={revision.state} />
+        </dd>
       </div>
       <Signature label="drawn" by={revision.drafted} />
       <Signature label="checked" by={revision.checked} />

@@ -30,6 +30,8 @@ export interface Difference {
   label: string;
   mine: unknown;
   theirs: unknown;
+  /** What both began from. */
+  before: unknown;
   /** Who changed it since both had the same: both is a true conflict. */
   changedBy: 'me' | 'them' | 'both';
 }
@@ -55,6 +57,7 @@ export function differences(mine: FormValues, theirs: FormValues, origin: FormVa
         label: labelOf(key),
         mine: a.get(key) ?? null,
         theirs: b.get(key) ?? null,
+        before: o.get(key) ?? null,
         changedBy: mineMoved && theirsMoved ? 'both' : mineMoved ? 'me' : 'them',
       };
     });

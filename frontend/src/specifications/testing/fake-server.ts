@@ -1,4 +1,12 @@
-import type { Evaluation, RevisionNote, SpecificationInput, Sweep, WhatIf } from '@bellgap/common/api';
+import type {
+  AnswerOf,
+  contract,
+  Evaluation,
+  RevisionNote,
+  SpecificationInput,
+  Sweep,
+  WhatIf,
+} from '@bellgap/common/api';
 import { suspensionCase, discUnit } from '@bellgap/common/drawing/fixtures';
 import type { ShownRevision } from '../model/shown-revision';
 import { aDesignBasis, aPerson } from '../../testing/builders';
@@ -84,9 +92,12 @@ export class FakeServer {
   whatIf: WhatIf = { cases: [] };
   sweep: Sweep = { cells: [] };
   notes: RevisionNote[] = [];
+  others: AnswerOf<typeof contract.presence>['others'] = [];
+  /** What a move gives back; null refuses it. */
+  refuseMove: (() => Answered) | null = null;
 
   saves(): Asked[] {
-    return this.asked.filter(({ method }) => method === 'PUT');
+    return this.asked.filter(({ method, path }) => method === 'PUT' && !path.endsWith('/presence'));
   }
   evaluations(): Asked[] {
     return this.asked.filter(({ path }) => path.endsWith('/evaluations'));
@@ -128,6 +139,10 @@ export class FakeServer {
     }
     if (path === '/evaluations/what-if') return { status: 200, body: this.whatIf };
     if (path === '/evaluations/sweep') return { status: 200, body: this.sweep };
+    if (path.endsWith('/presence')) return { status: 200, body: { others: this.others } };
+    if (path.endsWith('/remarks')) return { status: 200, body: { items: [], open: 0, mayRaise: false } };
+    if (path.endsWith('/submissions')) return this.refuseMove?.() ?? this.move({ state: 'in_check', moves: [] });
+    if (path.endsWith('/recalls')) return this.refuseMove?.() ?? this.move({ state: 'draft' });
     if (path.includes('/notes')) return this.answerNotes(method, path, body as Partial<RevisionNote>);
     if (method === 'PUT') return this.refuseSave?.() ?? this.take(body as Partial<ShownRevision>);
     if (path.endsWith('/basis')) {
@@ -150,6 +165,11 @@ export class FakeServer {
     const note = { id: 'note-1', writtenBy: 'Tamsin Orvelle', writtenAt: '2026-03-12T10:00:00Z', own: true, ...body };
     this.notes = [note as RevisionNote, ...this.notes];
     return { status: 201, body: note };
+  }
+
+  private move(next: Partial<ShownRevision>): Answered {
+    this.revision = { ...this.revision, ...next, lockVersion: this.revision.lockVersion + 1 };
+    return { status: 201, body: this.revision };
   }
 
   private take(body: Partial<ShownRevision>): Answered {

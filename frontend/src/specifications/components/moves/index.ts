@@ -1,0 +1,1 @@
+export { MovesBar } from './moves-bar';

@@ -1,0 +1,1 @@
+export { RevisionStateMark } from './state-mark';

@@ -1,0 +1,2 @@
+export { BridgeTable } from './bridge-table';
+export { RuleCards } from './rule-cards';
