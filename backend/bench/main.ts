@@ -4,6 +4,7 @@ import { report } from './harness';
 import { httpFigures } from './http.bench';
 import { pageFigures } from './page.bench';
 import { stopProduct } from './product';
+import { registerFigures } from './register.bench';
 import { sheetFigures } from './sheet.bench';
 import { startFigures } from './start.bench';
 import { trailFigures } from './trail.bench';
@@ -17,6 +18,7 @@ const FIGURES = [
   ...pageFigures,
   ...startFigures,
   ...trailFigures,
+  ...registerFigures,
 ] as const;
 
 function sayWhatElseRuns(): void {
