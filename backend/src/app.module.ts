@@ -1,6 +1,7 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
+import { BasisMovesModule } from './basis-moves/basis-moves.module';
 import { CatalogueModule } from './catalogue/catalogue.module';
 import { CompanySettingsModule } from './company-settings/company-settings.module';
 import { DeskModule } from './desk/desk.module';
@@ -36,6 +37,7 @@ export class AppModule {
         UsersModule,
         CompanySettingsModule,
         ProjectsModule,
+        BasisMovesModule,
         ReferenceModule,
         KnownAnswersModule,
         CatalogueModule,

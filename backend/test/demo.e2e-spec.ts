@@ -96,6 +96,22 @@ describe('the documents of the demonstration', () => {
     expect(answer).toMatchObject({ state, labels });
   });
 
+  it('rest on bases that three people have brought to issue', async () => {
+    const standing = async (code: string) => {
+      const { current, earlier } = (await orvelle.call(contract.designBasis, { params: { code } })).answer;
+      return [current!, ...earlier].map(({ revision, state, moves }) => [revision, state, moves.map(({ by }) => by)]);
+    };
+    const three = ['Tamsin Orvelle', 'Ruben Castellary', 'Amara Holvenstein'];
+    expect(await standing('KL221')).toEqual([
+      [2, 'issued', three],
+      [1, 'draft', []],
+    ]);
+    expect(await standing('KL132')).toEqual([
+      [2, 'issued', three],
+      [1, 'superseded', three],
+    ]);
+  });
+
   it('stand in the register, and the print of the former issue is told from the one in force', async () => {
     const brant = await who('l.brant@kigc.example');
     const { items } = (await brant.call(contract.sheets, { query: { sort: 'number' } })).answer;

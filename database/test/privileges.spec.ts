@@ -58,20 +58,25 @@ describe('the role of the product', () => {
       expect([table, await codeOf(`truncate table ${table} cascade`)]).toEqual([table, DENIED]);
   });
 
-  it.each(['audit_events', 'audit_seals', 'sheet_files', 'company_settings', 'table_confirmations', 'design_bases'])(
-    'may add to %s and read it, but neither change nor remove its rows',
-    async (table) => {
-      const { rows } = await database.knex.raw<{ rows: { privilege: string }[] }>(
-        `select privilege from unnest(array['SELECT', 'INSERT', 'UPDATE', 'DELETE', 'TRUNCATE', 'REFERENCES', 'TRIGGER']) privilege
+  it.each([
+    'audit_events',
+    'audit_seals',
+    'sheet_files',
+    'company_settings',
+    'table_confirmations',
+    'design_bases',
+    'design_basis_moves',
+  ])('may add to %s and read it, but neither change nor remove its rows', async (table) => {
+    const { rows } = await database.knex.raw<{ rows: { privilege: string }[] }>(
+      `select privilege from unnest(array['SELECT', 'INSERT', 'UPDATE', 'DELETE', 'TRUNCATE', 'REFERENCES', 'TRIGGER']) privilege
          where has_table_privilege(current_user, ?, privilege)`,
-        [table],
-      );
-      expect(rows.map(({ privilege }) => privilege).sort()).toEqual(['INSERT', 'SELECT']);
-      const column = Object.keys(await database.owner(table).columnInfo()).find((name) => name !== 'id');
-      expect(await codeOf(`update ${table} set ${column} = ${column}`)).toBe(DENIED);
-      expect(await codeOf(`delete from ${table}`)).toBe(DENIED);
-    },
-  );
+      [table],
+    );
+    expect(rows.map(({ privilege }) => privilege).sort()).toEqual(['INSERT', 'SELECT']);
+    const column = Object.keys(await database.owner(table).columnInfo()).find((name) => name !== 'id');
+    expect(await codeOf(`update ${table} set ${column} = ${column}`)).toBe(DENIED);
+    expect(await codeOf(`delete from ${table}`)).toBe(DENIED);
+  });
 
   it.each(['users', 'role_grants', 'projects', 'specifications', 'revisions', 'insulators'])(
     'never deletes from %s',

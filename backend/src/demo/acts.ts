@@ -1,6 +1,7 @@
 import type { Check, SpecificationInput } from '@bellgap/common/api';
 import { CHECKLIST, filledPaths, isClearanceCard, isCountCard, type ChecklistItem } from '@bellgap/common/schemas';
 import type { INestApplicationContext } from '@nestjs/common';
+import { BasisMovesService } from '../basis-moves/basis-moves.service';
 import { KNEX, type Database } from '../platform/knex';
 import type { SignedIn } from '../platform/person';
 import { DesignBasesService } from '../projects/design-bases.service';
@@ -21,6 +22,7 @@ export interface Storytellers {
   clock: StoryClock;
   author: (author: Author) => Promise<SignedIn>;
   bases: DesignBasesService;
+  basisMoves: BasisMovesService;
   specifications: SpecificationsService;
   sheets: SheetsService;
   submissions: SubmissionsService;
@@ -38,6 +40,7 @@ export function storytellersOf(app: INestApplicationContext, clock: StoryClock):
     clock,
     author: (author) => readAuthor(author, knex),
     bases: app.get(DesignBasesService),
+    basisMoves: app.get(BasisMovesService),
     specifications: app.get(SpecificationsService),
     sheets: app.get(SheetsService),
     submissions: app.get(SubmissionsService),

@@ -18,6 +18,8 @@ const GONE_ON = 'Somebody has gone on with this revision in the meantime; open i
 const REFUSALS: Record<string, () => DomainError> = {
   revisions_own_work: () => forbidden(OWN_WORK),
   revisions_three_people_check: () => forbidden(OWN_WORK),
+  design_basis_moves_order: () => wrongState(GONE_ON),
+  design_basis_moves_own_work: () => forbidden(OWN_WORK),
   revisions_content_kept: () => wrongState('The content of a revision changes only while it is a draft.'),
   revisions_state_order: () => wrongState(GONE_ON),
   revisions_issued_kept: () => wrongState(GONE_ON),

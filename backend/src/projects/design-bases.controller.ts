@@ -1,5 +1,5 @@
 import { Body, Controller, Param } from '@nestjs/common';
-import { contract, type AnswerOf, type BodyOf, type DesignBasis } from '@bellgap/common/api';
+import { contract, type AnswerOf, type BodyOf, type StandingBasis } from '@bellgap/common/api';
 import { CurrentPerson, type SignedIn } from '../platform/person';
 import { IfMatch, Route } from '../platform/route';
 import { Versioned } from '../platform/versions';
@@ -25,7 +25,7 @@ export class DesignBasesController {
     @Param('code') code: string,
     @IfMatch() version: number,
     @Body() body: BodyOf<typeof contract.saveDesignBasis>,
-  ): Promise<Versioned<DesignBasis>> {
+  ): Promise<Versioned<StandingBasis>> {
     const basis = await this.bases.save(person, code, version, body);
     return new Versioned(basis, basis.revision);
   }

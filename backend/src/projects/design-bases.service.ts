@@ -1,20 +1,40 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
-import type { AnswerOf, BodyOf, CompanySettings, DesignBasis, SpecificationInput, contract } from '@bellgap/common/api';
+import type {
+  AnswerOf,
+  BasisMove,
+  BodyOf,
+  CompanySettings,
+  DesignBasis,
+  SpecificationInput,
+  StandingBasis,
+  contract,
+} from '@bellgap/common/api';
 import { inputFaults } from '@bellgap/common/engine';
 import { AuditService, changesBetween } from '../audit/audit.service';
 import { CompanySettingsService } from '../company-settings/company-settings.service';
 import { Clock } from '../platform/clock';
-import { forbidden, invalid, newerVersion } from '../platform/domain-error';
+import { forbidden, invalid, newerVersion, notFound, wrongState } from '../platform/domain-error';
 import { KNEX } from '../platform/knex';
 import { mayWriteDrafts, requireDraftReader, type SignedIn } from '../platform/person';
-import { DesignBasesRepository } from './design-bases.repository';
+import { orderRefusal, personRefusal, standingOf } from './basis-standing';
+import { DesignBasesRepository, type StoredBasis } from './design-bases.repository';
+import type { ProjectRecord } from './projects.repository';
 import { ProjectsService } from './projects.service';
+
+export type { StoredBasis } from './design-bases.repository';
 
 type Given = BodyOf<typeof contract.saveDesignBasis>;
 type System = DesignBasis['system'];
 
-/** The design basis of a line or yard: each save is a new revision, the highest one is inherited. */
+/** A revision of a basis in its project, among all the others, the newest first. */
+export interface BasisInProject {
+  project: ProjectRecord;
+  stored: StoredBasis;
+  all: StoredBasis[];
+}
+
+/** The design basis of a line or yard: each save is a new revision, the issued one is inherited. */
 @Injectable()
 export class DesignBasesService {
   constructor(
@@ -29,17 +49,45 @@ export class DesignBasesService {
   async history(person: SignedIn, code: string): Promise<AnswerOf<typeof contract.designBasis>> {
     const project = await this.projects.known(person, code);
     requireDraftReader(person, project.id, 'design basis');
-    const [current = null, ...earlier] = await this.bases.ofProject(project.id);
+    const all = await this.bases.ofProject(project.id);
+    const [current = null, ...earlier] = all.map((stored) => standingOf(person, stored, all, project));
     return { current, earlier };
   }
 
-  async save(person: SignedIn, code: string, madeFrom: number, given: Given): Promise<DesignBasis> {
-    return this.knex.transaction(async (db) => {
+  async get(person: SignedIn, code: string, revision: number): Promise<StandingBasis> {
+    const { project, stored, all } = await this.find(person, code, revision);
+    return standingOf(person, stored, all, project);
+  }
+
+  /** With a transaction, the project is locked, so that one moves after the other. */
+  async find(person: SignedIn, code: string, revision: number, db?: Knex.Transaction): Promise<BasisInProject> {
+    const project = await this.projects.known(person, code, db, { forUpdate: db !== undefined });
+    requireDraftReader(person, project.id, 'design basis');
+    const all = await this.bases.ofProject(project.id, db);
+    const stored = all.find(({ basis }) => basis.revision === revision);
+    if (!stored) throw notFound('revision of the design basis');
+    return { project, stored, all };
+  }
+
+  /** Refuses a move: 409 from a wrong state, 403 to who may not make it. */
+  requireMove(person: SignedIn, move: BasisMove, { project, stored, all }: BasisInProject): void {
+    const order = orderRefusal(move, stored, all);
+    if (order !== null) throw wrongState(order);
+    const why = personRefusal(person, move, stored, project);
+    if (why !== null) throw forbidden(why);
+  }
+
+  recordMove(db: Knex.Transaction, move: { basisId: string; move: BasisMove; by: string; at: Date; note: string }) {
+    return this.bases.insertMove(move, db);
+  }
+
+  async save(person: SignedIn, code: string, madeFrom: number, given: Given): Promise<StandingBasis> {
+    const revision = await this.knex.transaction(async (db) => {
       const project = await this.projects.known(person, code, db, { forUpdate: true });
       if (!mayWriteDrafts(person, project.id)) throw forbidden();
-      const before = await this.bases.newest(project.id, db);
-      const revision = before?.revision ?? 0;
-      if (revision !== madeFrom) {
+      const before = (await this.bases.ofProject(project.id, db))[0]?.basis ?? null;
+      const newest = before?.revision ?? 0;
+      if (newest !== madeFrom) {
         throw newerVersion({
           current: before,
           changedBy: before?.createdBy ?? null,
@@ -53,20 +101,21 @@ export class DesignBasesService {
         worksheet: (given.worksheet ?? null) as DesignBasis['worksheet'],
       };
       const changes = changesBetween(before ? contentOf(before) : {}, content);
-      if (before && Object.keys(changes).length === 0) return before;
-      const next = { ...content, projectId: project.id, revision: revision + 1, by: person.id, at: this.clock.now() };
+      if (before && Object.keys(changes).length === 0) return before.revision;
+      const next = { ...content, projectId: project.id, revision: newest + 1, by: person.id, at: this.clock.now() };
       await this.bases.insert(next, db);
       await this.audit.record(db, {
         actorId: person.id,
         action: 'design-basis.revised',
         entity: 'design-basis',
-        entityId: `${project.id} ${next.revision}`,
+        entityId: entityIdOf(project.id, next.revision),
         projectId: project.id,
         changes,
         reason: given.note || null,
       });
-      return (await this.bases.newest(project.id, db))!;
+      return next.revision;
     });
+    return this.get(person, code, revision);
   }
 
   private async refuseUnreadable({ basis, system }: Given, db: Knex): Promise<void> {
@@ -77,6 +126,9 @@ export class DesignBasesService {
     if (faults.length > 0) throw invalid(faults);
   }
 }
+
+/** By what the trail names a revision of a basis. */
+export const entityIdOf = (projectId: string, revision: number): string => `${projectId} ${revision}`;
 
 function contentOf({ number, basis, system, rules, worksheet, note }: DesignBasis) {
   return { number, basis, system, rules, worksheet, note };

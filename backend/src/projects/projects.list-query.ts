@@ -29,8 +29,9 @@ const SORTS = {
   updatedAt: { column: 'p.updated_at', type: 'timestamptz' },
 } as const;
 
-const NEWEST_BASIS = `left join lateral (
-  select b.number, b.revision, b.system from design_bases b where b.project_id = p.id order by b.revision desc limit 1
+const BASIS_IN_FORCE = `left join lateral (
+  select b.number, b.revision, b.system from design_bases b
+  where b.project_id = p.id and b.revision = basis_in_force(p.id)
 ) basis on true`;
 
 const COUNTS = [
@@ -71,7 +72,7 @@ export class ProjectsListQuery {
   private select(db: Knex, person: SignedIn): Knex.QueryBuilder {
     const query = db('projects as p')
       .leftJoin('users as by', 'by.id', 'p.updated_by')
-      .joinRaw(NEWEST_BASIS)
+      .joinRaw(BASIS_IN_FORCE)
       .select(
         'p.id',
         'p.code',

@@ -6,6 +6,7 @@ import {
   type DesignBasis,
   type Project,
   type QueryOf,
+  type RevisionState,
   type contract,
 } from '@bellgap/common/api';
 import { AuditService, changesBetween } from '../audit/audit.service';
@@ -54,8 +55,14 @@ export class ProjectsService {
     return (await this.projects.findByCode(code, db))?.id ?? null;
   }
 
-  async newestBasis(projectId: string, db?: Knex): Promise<DesignBasis | null> {
-    return this.bases.newest(projectId, db);
+  /** What specifications rest on: the issued revision of the basis; where none is issued, the one saved last. */
+  async basisInForce(projectId: string, db?: Knex): Promise<DesignBasis | null> {
+    return this.bases.inForce(projectId, db);
+  }
+
+  /** Where a revision of a basis stands. */
+  async basisState(basisId: string, db?: Knex): Promise<RevisionState | null> {
+    return this.bases.stateOf(basisId, db);
   }
 
   async create(person: SignedIn, given: BodyOf<typeof contract.createProject>): Promise<Project> {

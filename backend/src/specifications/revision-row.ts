@@ -212,14 +212,12 @@ function workflowColumns(db: Knex): Knex.Raw[] {
   ].map((column) => db.raw(column));
 }
 
-/** Number of the newest revision of the design basis of the project `s.project_id`. */
+/** The revision of the design basis in force in the project `s.project_id`: the issued one, else the newest. */
 export function newestBasisRevision(db: Knex): Knex.Raw {
-  return db.raw(
-    '(select max(n.revision) from design_bases as n where n.project_id = s.project_id) as newest_basis_revision',
-  );
+  return db.raw('basis_in_force(s.project_id) as newest_basis_revision');
 }
 
-/** The newest revision of the basis where it is newer than the one that is pinned, else null. */
+/** The revision of the basis in force where it is newer than the one that is pinned, else null. */
 export function newerBasisRevision(pinned: number | null, newest: number | null): number | null {
   return newest !== null && newest > (pinned ?? 0) ? newest : null;
 }

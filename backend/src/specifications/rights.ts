@@ -1,4 +1,5 @@
 import {
+  REVISION_STATE_WORDS,
   STATES_SHOWN,
   TRANSITIONS,
   coversCategory,
@@ -56,7 +57,7 @@ export const OWN_COUNT_FIRST = 'Enter your own count first: until then the figur
 export function moveRefusal(person: Asker, name: TransitionName, revision: StoredRevision): string | null {
   const { projectId, submitted, checked } = revision;
   if (!(TRANSITIONS[name].from as readonly RevisionState[]).includes(revision.state)) {
-    return `This revision is ${STATE_WORDS[revision.state]}.`;
+    return `This revision is ${REVISION_STATE_WORDS[revision.state]}.`;
   }
   switch (name) {
     case 'submit':
@@ -111,12 +112,3 @@ export function ownWork(
 
 /** Changes that are more than a field. */
 const WHOLE_CHANGES: Record<string, string> = { input: 'the input', context: 'what the figures rest on' };
-
-const STATE_WORDS: Record<RevisionState, string> = {
-  draft: 'a draft',
-  in_check: 'in check',
-  checked: 'checked and waits for approval',
-  issued: 'issued',
-  superseded: 'superseded',
-  withdrawn: 'withdrawn',
-};

@@ -91,11 +91,9 @@ export class SpecificationsListQuery {
     return ((await query) as ListRow[]).map((row) => toItem(row, person));
   }
 
-  /** Drafts that are pinned to a revision of the basis that is no longer the newest. */
+  /** Drafts that are pinned to a revision of the basis older than the one in force. */
   async outdatedDrafts(person: SignedIn, projects: 'all' | string[]): Promise<SpecificationRow[]> {
-    const query = this.drafts(projects).whereRaw(
-      'exists (select 1 from design_bases as n where n.project_id = s.project_id and n.revision > b.revision)',
-    );
+    const query = this.drafts(projects).whereRaw('basis_in_force(s.project_id) > b.revision');
     return ((await query) as ListRow[]).map((row) => toItem(row, person));
   }
 

@@ -142,7 +142,7 @@ export class SpecificationsService {
     const project = await this.projects.known(person, projectCode);
     if (!mayWriteDrafts(person, project.id)) throw forbidden();
     await this.knex.transaction(async (db) => {
-      const basis = await this.projects.newestBasis(project.id, db);
+      const basis = await this.projects.basisInForce(project.id, db);
       if (!basis) {
         throw invalidAt('projectCode', `${project.code} has no design basis yet; enter its voltages and level first`);
       }
@@ -186,10 +186,10 @@ export class SpecificationsService {
     return this.get(person, address);
   }
 
-  /** Pins the newest revision of the design basis and takes its values, save those that are overridden. */
+  /** Pins the revision of the design basis in force and takes its values, save those that are overridden. */
   async takeBasis(person: SignedIn, address: RevisionAddress, version: number): Promise<Revision> {
     await this.change(person, address, version, async ({ projectId, title, input, overrides, projectCode }, db) => {
-      const basis = await this.projects.newestBasis(projectId, db);
+      const basis = await this.projects.basisInForce(projectId, db);
       if (!basis) throw wrongState(`${projectCode} has no design basis.`);
       return { title, ...(await this.evaluated(takeBasisOver(input, basis, overrides), overrides, basis.id, db)) };
     });

@@ -1,10 +1,11 @@
 import { Injectable } from '@nestjs/common';
-import { nextNumber, recheckCaution, type Approval } from '@bellgap/common/api';
+import { REVISION_STATE_WORDS, nextNumber, recheckCaution, type Approval } from '@bellgap/common/api';
 import { Clock } from '../platform/clock';
 import { notFound } from '../platform/domain-error';
 import type { Database } from '../platform/knex';
 import { mayReadDrafts, type SignedIn } from '../platform/person';
 import { siteDay } from '../platform/site-day';
+import { ProjectsService } from '../projects/projects.service';
 import {
   SpecificationsService,
   figuresHidden,
@@ -21,6 +22,7 @@ import { LaterChangesService } from './later-changes.service';
 export class ApprovalService {
   constructor(
     private readonly clock: Clock,
+    private readonly projects: ProjectsService,
     private readonly specifications: SpecificationsService,
     private readonly laterChanges: LaterChangesService,
   ) {}
@@ -28,10 +30,11 @@ export class ApprovalService {
   async of(person: SignedIn, address: RevisionAddress): Promise<Approval> {
     const revision = await this.specifications.stored(person, address);
     if (!mayReadDrafts(person, revision.projectId)) throw notFound('specification');
-    const [labels, inForce, laterChanges] = await Promise.all([
+    const [labels, inForce, laterChanges, onDraftBasis] = await Promise.all([
       this.specifications.labelsOf(revision.specificationId),
       this.inForce(person, revision),
       this.laterChanges.of(revision),
+      this.basisNotIssued(revision),
     ]);
     const refusal = moveRefusal(person, 'issue', revision);
     const hidden = figuresHidden(person, revision);
@@ -46,7 +49,7 @@ export class ApprovalService {
         units: inForce.evaluation.string?.units ?? null,
         contentCode: inForce.contentCode,
       },
-      ...(hidden ? NO_FIGURES : this.figures(revision)),
+      ...(hidden ? NO_FIGURES : this.figures(revision, onDraftBasis)),
       overrides: revision.overrides,
       laterChanges,
       openRemarks: revision.openRemarks,
@@ -61,14 +64,22 @@ export class ApprovalService {
     return this.specifications.stored(person, { projectCode, number, label }, db && { db, forUpdate: true });
   }
 
-  private figures(revision: StoredRevision) {
+  /** The pinned revision of the design basis, where nobody has issued it. */
+  private async basisNotIssued({ basis }: StoredRevision): Promise<Approval['assumed']> {
+    const state = basis && (await this.projects.basisState(basis.id));
+    if (!basis || !state || state === 'issued' || state === 'superseded') return [];
+    const text = `Design basis ${basis.number} revision ${basis.revision} is ${REVISION_STATE_WORDS[state]}.`;
+    return [{ path: null, text }];
+  }
+
+  private figures(revision: StoredRevision, onDraftBasis: Approval['assumed']) {
     const { evaluation, context, input, siteTimeZone } = revision;
     const recheck = recheckCaution(input, siteDay(this.clock.now(), siteTimeZone));
     return {
       acceptances: mattersOf(evaluation, 'acceptance'),
       fails: mattersOf(evaluation, 'fail'),
       cautions: [...(recheck ? [recheck] : []), ...mattersOf(evaluation, 'caution')],
-      assumed: assumedOf(revision),
+      assumed: [...onDraftBasis, ...assumedOf(revision)],
       disputed: disputedOf(evaluation, context),
       notAssessed: evaluation.notAssessed,
     };

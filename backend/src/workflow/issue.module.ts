@@ -3,6 +3,7 @@ import { AuthModule } from '../auth/auth.module';
 import { CatalogueModule } from '../catalogue/catalogue.module';
 import { CompanySettingsModule } from '../company-settings/company-settings.module';
 import { MailModule } from '../mail/mail.module';
+import { ProjectsModule } from '../projects/projects.module';
 import { RegisterModule } from '../register/register.module';
 import { SheetsModule } from '../sheets/sheets.module';
 import { SpecificationsModule } from '../specifications/specifications.module';
@@ -27,6 +28,7 @@ import { WorkflowModule } from './workflow.module';
     CatalogueModule,
     CompanySettingsModule,
     MailModule,
+    ProjectsModule,
     RegisterModule,
     SheetsModule,
     SpecificationsModule,

@@ -12,6 +12,7 @@ import { companySettingsSchema } from '../schemas/company-settings';
 import { PAPERS, PROJECT_KINDS, basisRulesSchema } from '../schemas/projects';
 import { overrideSchema } from '../schemas/specifications';
 import { day, engineValue, flag, instant, nullableNumber, nullableText, number, words } from './answer-parts';
+import { BASIS_MOVE_NAMES } from './basis-moves';
 import { ROLES } from './roles';
 import { REVISION_STATES } from './states';
 import { concessionAnswer, moveAnswer, registerRowAnswer } from './workflow-answers';
@@ -138,10 +139,42 @@ export const designBasisAnswer = yup
   .noUnknown();
 export type DesignBasis = yup.InferType<typeof designBasisAnswer>;
 
+/** A revision of the design basis with where it stands and how it came there. */
+export const standingBasisAnswer = designBasisAnswer
+  .shape({
+    state: yup
+      .string()
+      .oneOf([...REVISION_STATES])
+      .required(),
+    /** What was done with it, in order; the days are those of the site. */
+    moves: yup
+      .array()
+      .of(
+        yup
+          .object({ move: yup.string().oneOf(BASIS_MOVE_NAMES).required(), by: words(), on: day(), note: words() })
+          .noUnknown()
+          .required(),
+      )
+      .required(),
+    /** Every move from this state, and why the asker may not make it. */
+    allowed: yup
+      .array()
+      .of(
+        yup
+          .object({ name: yup.string().oneOf(BASIS_MOVE_NAMES).required(), allowed: flag(), why: nullableText() })
+          .noUnknown()
+          .required(),
+      )
+      .required(),
+  })
+  .noUnknown();
+export type StandingBasis = yup.InferType<typeof standingBasisAnswer>;
+
 export const designBasisHistoryAnswer = yup
   .object({
-    current: designBasisAnswer.nullable().defined().default(undefined),
-    earlier: yup.array().of(designBasisAnswer.required()).required(),
+    /** The one saved last. */
+    current: standingBasisAnswer.nullable().defined().default(undefined),
+    earlier: yup.array().of(standingBasisAnswer.required()).required(),
   })
   .noUnknown()
   .required();

@@ -17,7 +17,6 @@ import {
   conductorAnswer,
   currentSessionAnswer,
   deskAnswer,
-  designBasisAnswer,
   designBasisHistoryAnswer,
   evaluationAnswer,
   grantAnswer,
@@ -29,11 +28,13 @@ import {
   sessionAnswer,
   sheetAnswer,
   specificationRowAnswer,
+  standingBasisAnswer,
   towerFamilyAnswer,
   userAnswer,
 } from './answers';
 import { accountEndpoints } from './account-endpoints';
 import { listOf } from './answer-parts';
+import { basisEndpoints } from './basis-endpoints';
 import { endpoint } from './endpoint';
 import { listQuery, sortable } from './list-query';
 import { methodEndpoints } from './method-endpoints';
@@ -255,7 +256,7 @@ export const contract = {
     summary: 'Set a new revision of the design basis',
     access: DRAFT_WRITERS,
     body: designBasisSchema,
-    answer: designBasisAnswer.required(),
+    answer: standingBasisAnswer.required(),
     success: 200,
     ifMatch: true,
   }),
@@ -439,6 +440,7 @@ export const contract = {
 
   // from draft to issued, and what is issued
   ...workflowEndpoints,
+  ...basisEndpoints,
 
   // who did what, when and why
   ...trailEndpoints,

@@ -1,4 +1,5 @@
 export * from './answers';
+export * from './basis-moves';
 export * from './contract';
 export * from './endpoint';
 export * from './errors';

@@ -10,3 +10,13 @@ export const REVISION_STATE_LABELS: Record<RevisionState, string> = {
   superseded: 'Superseded',
   withdrawn: 'Withdrawn',
 };
+
+/** How a sentence says it: "this revision is ...". */
+export const REVISION_STATE_WORDS: Record<RevisionState, string> = {
+  draft: 'a draft',
+  in_check: 'in check',
+  checked: 'checked and waits for approval',
+  issued: 'issued',
+  superseded: 'superseded',
+  withdrawn: 'withdrawn',
+};

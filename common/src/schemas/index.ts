@@ -3,6 +3,7 @@ export * from './fields';
 export * from './parts';
 export * from './specification-input';
 export * from './company-settings';
+export * from './basis-moves';
 export * from './method';
 export * from './people';
 export * from './projects';

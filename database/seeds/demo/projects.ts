@@ -7,7 +7,6 @@ interface DemoBasis {
   highestVoltageKv: number;
   note: string;
   day: string;
-  state: 'issued' | 'superseded';
 }
 
 interface DemoProject {
@@ -41,12 +40,11 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     faultCurrentKa: 31.5,
     rules: { unitsOutForLiveWork: 2, maximumStringKinds: 6 },
     bases: [
-      { highestVoltageKv: 220, note: 'First issue', day: '2025-06-02', state: 'superseded' },
+      { highestVoltageKv: 220, note: 'First issue', day: '2025-06-02' },
       {
         highestVoltageKv: 245,
         note: 'Highest voltage is 245 kV; 220 kV was entered by mistake',
         day: '2025-06-30',
-        state: 'issued',
       },
     ],
   },
@@ -61,7 +59,7 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     powerFrequencyKv: 275,
     faultCurrentKa: 31.5,
     rules: { unitsOutForLiveWork: 1, maximumStringKinds: 5 },
-    bases: [{ highestVoltageKv: 145, note: 'First issue', day: '2025-07-14', state: 'issued' }],
+    bases: [{ highestVoltageKv: 145, note: 'First issue', day: '2025-07-14' }],
   },
   {
     code: 'OND220',
@@ -74,7 +72,7 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     powerFrequencyKv: 460,
     faultCurrentKa: 40,
     rules: { unitsOutForLiveWork: null, maximumStringKinds: null },
-    bases: [{ highestVoltageKv: 245, note: 'First issue', day: '2025-08-04', state: 'issued' }],
+    bases: [{ highestVoltageKv: 245, note: 'First issue', day: '2025-08-04' }],
   },
   {
     code: 'OND132',
@@ -87,7 +85,7 @@ const DEMO_PROJECTS: readonly DemoProject[] = [
     powerFrequencyKv: 275,
     faultCurrentKa: 31.5,
     rules: { unitsOutForLiveWork: null, maximumStringKinds: null },
-    bases: [{ highestVoltageKv: 145, note: 'First issue', day: '2025-08-04', state: 'issued' }],
+    bases: [{ highestVoltageKv: 145, note: 'First issue', day: '2025-08-04' }],
   },
 ];
 
@@ -154,7 +152,6 @@ function toBasisRow(project: DemoProject, basis: DemoBasis, revision: number, to
     system: JSON.stringify(system),
     rules: JSON.stringify(project.rules),
     note: basis.note,
-    state: basis.state,
     created_by: demoUserId(project.author),
     created_at: `${storyDay(basis.day, today)}T06:00:00Z`,
   };

@@ -1,4 +1,4 @@
-import type { DesignBasis, Person, Project, SpecificationRow } from '@bellgap/common/api';
+import type { DesignBasis, Person, Project, SpecificationRow, StandingBasis } from '@bellgap/common/api';
 
 /** Answers of the server for tests, with fixed values that a test overrides. */
 
@@ -49,6 +49,14 @@ export const aDesignBasis = (given: Partial<DesignBasis> = {}): DesignBasis => (
   note: 'The highest voltage is 245 kV',
   createdAt: '2026-02-02T09:00:00Z',
   createdBy: 'Tamsin Orvelle',
+  ...given,
+});
+
+export const aStandingBasis = (given: Partial<StandingBasis> = {}): StandingBasis => ({
+  ...aDesignBasis(),
+  state: 'draft',
+  moves: [],
+  allowed: [],
   ...given,
 });
 

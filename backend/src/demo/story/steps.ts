@@ -1,4 +1,4 @@
-import type { SpecificationInput } from '@bellgap/common/api';
+import type { BasisMove, SpecificationInput } from '@bellgap/common/api';
 import type { Override } from '../../specifications/inheritance';
 import type { Author } from '../people';
 
@@ -46,4 +46,11 @@ export interface StoryBasis extends Act {
   revision: number;
   faultCurrentKa: number;
   note: string;
+}
+
+/** A revision of a design basis on its way to issue. */
+export interface StoryBasisWay {
+  projectCode: string;
+  revision: number;
+  moves: (Act & { move: BasisMove; note: string })[];
 }

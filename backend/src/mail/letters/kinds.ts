@@ -1,7 +1,9 @@
 import type { Role } from '@bellgap/common/api';
 
-/** What a letter about a revision says of it. */
+/** What a letter about a revision of a specification or of a design basis says of it. */
 export interface RevisionNews {
+  /** A specification where it is left out. */
+  record?: 'design-basis';
   number: string;
   title: string;
   /** Label of the revision that the letter is about: a letter while it is worked on, a number once issued. */

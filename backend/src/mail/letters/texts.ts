@@ -39,7 +39,7 @@ export const LETTER_TEXTS: { [K in LetterKind]: Text<K> } = {
       subject: 'waits for your check',
       says: `${news.byName} has submitted a revision that waits for your check.`,
       action: 'Open the check',
-      closing: 'Please make your own estimate before you look at the figures of the author.',
+      closing: news.record ? undefined : 'Please make your own estimate before you look at the figures of the author.',
     }),
 
   'waits-for-approval': (news, around) =>
@@ -52,15 +52,24 @@ export const LETTER_TEXTS: { [K in LetterKind]: Text<K> } = {
   returned: (news, around) =>
     aboutRevision(news, around, {
       subject: 'was returned to you',
-      says: `${news.byName} has returned your revision. It is a draft again, with the remarks beside it.`,
+      says: `${news.byName} has returned your revision. It is a draft again, ${
+        news.record ? 'for the reason below' : 'with the remarks beside it'
+      }.`,
       action: 'Open the draft',
     }),
 
   issued: (news, around) =>
     aboutRevision(news, around, {
       subject: 'is issued',
-      says: `${news.byName} has issued this revision. Its sheet is the one in force.`,
-      action: 'Open the sheet',
+      ...(news.record
+        ? {
+            says: `${news.byName} has issued this revision. Drafts that rest on an older one are marked.`,
+            action: 'Open the design basis',
+          }
+        : {
+            says: `${news.byName} has issued this revision. Its sheet is the one in force.`,
+            action: 'Open the sheet',
+          }),
     }),
 
   'superseded-you-hold-a-copy': (news, around) =>
@@ -110,13 +119,13 @@ export const LETTER_TEXTS: { [K in LetterKind]: Text<K> } = {
 function aboutRevision(
   news: RevisionNews,
   { pageOf }: LetterSurroundings,
-  words: { subject: string; says: string; action: string; closing?: string },
+  words: { subject: string; says: string; action: string; closing?: string | undefined },
 ): LetterContent {
   return {
     subject: `${news.number} revision ${news.label} ${words.subject}`,
     paragraphs: [words.says],
     facts: [
-      ['Specification', `${news.number}, revision ${news.label}`],
+      [news.record ? 'Design basis' : 'Specification', `${news.number}, revision ${news.label}`],
       ['Title', news.title],
       ['Project', news.projectCode],
       ...(news.dueOn ? [['Due', news.dueOn] as [string, string]] : []),

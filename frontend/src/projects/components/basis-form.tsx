@@ -1,4 +1,4 @@
-import { contract, type AnswerOf, type BodyOf, type DesignBasis } from '@bellgap/common/api';
+import { contract, type AnswerOf, type BodyOf, type StandingBasis } from '@bellgap/common/api';
 import { CHOICE_LABELS, designBasisSchema, fieldOf, type FieldPath } from '@bellgap/common/schemas';
 import { useQueryClient } from '@tanstack/react-query';
 import { Button } from 'antd';
@@ -87,7 +87,7 @@ function BasisFields({ form }: { form: Form }) {
 
 interface BasisFormProps {
   code: string;
-  current: DesignBasis | null;
+  current: StandingBasis | null;
   saved(): void;
   cancel?: (() => void) | undefined;
 }

@@ -1,6 +1,6 @@
-import { contract, type DesignBasis, type InsulationLevelRow } from '@bellgap/common/api';
+import { contract, type StandingBasis, type InsulationLevelRow } from '@bellgap/common/api';
 import { screen } from '@testing-library/react';
-import { aDesignBasis, aPerson, aProject } from '../../testing/builders';
+import { aStandingBasis, aPerson, aProject } from '../../testing/builders';
 import { FakeServer, Refusal } from '../../testing/fake-server';
 import { openPage } from '../../testing/open-page';
 
@@ -19,8 +19,8 @@ const aLevel = (highestVoltageKv: number, lightningKv: number, powerFrequencyKv:
 const LEVELS = [aLevel(145, 650, 275), aLevel(245, 950, 395), aLevel(245, 1050, 460)];
 
 interface History {
-  current: DesignBasis | null;
-  earlier: DesignBasis[];
+  current: StandingBasis | null;
+  earlier: StandingBasis[];
 }
 
 /** A server whose design basis is the one that stands in `kept`. */
@@ -42,7 +42,7 @@ describe('design basis', () => {
   it('begins with nothing chosen and sends the level as one row', async () => {
     const kept: History = { current: null, earlier: [] };
     const server = serverWith(kept).on(contract.saveDesignBasis, () => {
-      kept.current = aDesignBasis({ revision: 1 });
+      kept.current = aStandingBasis({ revision: 1 });
       return kept.current;
     });
     const { user } = openPage('/projects/KL221/basis');
@@ -75,7 +75,7 @@ describe('design basis', () => {
   });
 
   it('refuses a highest voltage below the nominal one beside the field', async () => {
-    const server = serverWith({ current: aDesignBasis(), earlier: [] });
+    const server = serverWith({ current: aStandingBasis(), earlier: [] });
     const { user } = openPage('/projects/KL221/basis');
     await user.click(await screen.findByText('Revise'));
     await user.clear(screen.getByLabelText(/^Highest voltage/));
@@ -86,13 +86,13 @@ describe('design basis', () => {
   });
 
   it('keeps what was typed where somebody saved meanwhile, and saves from the newer revision next', async () => {
-    const kept: History = { current: aDesignBasis(), earlier: [] };
+    const kept: History = { current: aStandingBasis(), earlier: [] };
     serverWith(kept).on(contract.saveDesignBasis, ({ headers }) => {
       if (headers['If-Match'] === '"3"') {
-        kept.current = aDesignBasis({ id: 'basis-4', revision: 4, note: 'mine' });
+        kept.current = aStandingBasis({ id: 'basis-4', revision: 4, note: 'mine' });
         return kept.current;
       }
-      kept.current = aDesignBasis({ id: 'basis-3', revision: 3, note: 'theirs' });
+      kept.current = aStandingBasis({ id: 'basis-3', revision: 3, note: 'theirs' });
       return new Refusal('newer-version', 'newer', [], { changedBy: 'Jorin Bakkarash' });
     });
     const { user } = openPage('/projects/KL221/basis');

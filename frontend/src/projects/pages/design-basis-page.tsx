@@ -1,4 +1,4 @@
-import { contract, type AnswerOf, type DesignBasis, type Project } from '@bellgap/common/api';
+import { contract, type AnswerOf, type Project, type StandingBasis } from '@bellgap/common/api';
 import { useQuery } from '@tanstack/react-query';
 import { Button } from 'antd';
 import { useState } from 'react';
@@ -10,14 +10,16 @@ import { Ledger } from '../../ui/ledger';
 import { Moment } from '../../ui/moment';
 import { Page } from '../../ui/page/page';
 import { Sheet } from '../../ui/page/sheet';
+import { RevisionStateMark } from '../../ui/revision-state';
 import { EmptyState } from '../../ui/states/empty-state';
 import { QueryState } from '../../ui/states/query-state';
 import { BasisForm } from '../components/basis-form';
 import { BasisHistory } from '../components/basis-history';
+import { BasisMoves, BasisSignatures } from '../components/basis-moves';
 import { StoredWorksheet } from '../components/worksheet';
 import { basisRows } from '../model/basis-rows';
 
-function BasisInForce({ basis }: { basis: DesignBasis }) {
+function BasisFigures({ basis }: { basis: StandingBasis }) {
   return (
     <>
       <div className="basis-in-force">
@@ -38,7 +40,8 @@ interface BasisViewProps {
 function BasisView({ project, history }: BasisViewProps) {
   const { current } = history;
   const [editing, setEditing] = useState(false);
-  const { code, mayEdit } = project;
+  const { code, mayEdit, siteTimeZone } = project;
+  const inForce = [current, ...history.earlier].find((basis) => basis?.state === 'issued');
   const revise = mayEdit && !editing && (
     <Button type="primary" onClick={() => setEditing(true)}>
       {current ? 'Revise' : 'Set the design basis'}
@@ -64,12 +67,21 @@ function BasisView({ project, history }: BasisViewProps) {
           title={`${current.number} revision ${current.revision}`}
           note={
             <>
-              in force since <Moment at={current.createdAt} />
+              <RevisionStateMark state={current.state} /> saved <Moment at={current.createdAt} />
               {current.createdBy && `, by ${current.createdBy}`}
             </>
           }
         >
-          <BasisInForce basis={current} />
+          {current.state !== 'issued' && (
+            <p>
+              {inForce
+                ? `In force is revision ${inForce.revision}, the one issued; specifications rest on it until this one is issued.`
+                : 'No revision is in force by issue; specifications rest on the newest one saved.'}
+            </p>
+          )}
+          <BasisFigures basis={current} />
+          <BasisSignatures basis={current} zone={siteTimeZone} />
+          <BasisMoves code={code} basis={current} />
         </Sheet>
       ) : (
         <EmptyState title="No design basis yet" act={revise}>
@@ -78,7 +90,7 @@ function BasisView({ project, history }: BasisViewProps) {
             : 'An engineer of this project sets it.'}
         </EmptyState>
       )}
-      {current && <BasisHistory current={current} earlier={history.earlier} />}
+      {current && <BasisHistory code={code} zone={siteTimeZone} current={current} earlier={history.earlier} />}
     </Page>
   );
 }

@@ -1,13 +1,13 @@
-import { contract, type DesignBasis, type WorksheetInput } from '@bellgap/common/api';
+import { contract, type StandingBasis, type WorksheetInput } from '@bellgap/common/api';
 import { aWorksheet, insulationLevelsFor, insulationLevelWorksheet } from '@bellgap/common/testing';
 import { fireEvent, screen, waitFor, within } from '@testing-library/react';
-import { aDesignBasis, aPerson, aProject } from '../../testing/builders';
+import { aStandingBasis, aPerson, aProject } from '../../testing/builders';
 import { FakeServer, Refusal } from '../../testing/fake-server';
 import { openPage } from '../../testing/open-page';
 
 interface History {
-  current: DesignBasis | null;
-  earlier: DesignBasis[];
+  current: StandingBasis | null;
+  earlier: StandingBasis[];
 }
 
 /** The server answers the worksheet by the engine itself, so that the page shows the figures of the method. */
@@ -35,7 +35,7 @@ const requirement = (words: string): string[] =>
 describe('the insulation level worksheet on the design basis', () => {
   /** IEC 60071-2:1996, annex H.1 (from memory, not verified): 395/950 kV, and 2.35 m at the line entrance. */
   it('shows the 245 kV example as it was kept, with every step', async () => {
-    serverWith({ current: aDesignBasis({ worksheet: aWorksheet() }), earlier: [] });
+    serverWith({ current: aStandingBasis({ worksheet: aWorksheet() }), earlier: [] });
     const { user } = openPage('/projects/KL221/basis');
     await user.click(await screen.findByText('Insulation level worksheet'));
     expect(await screen.findByText('power frequency 395 kV rms, lightning 950 kV peak')).toBeInTheDocument();
@@ -57,9 +57,9 @@ describe('the insulation level worksheet on the design basis', () => {
   });
 
   it('is closed where none is kept, answers while it is filled in, and gives its level to the basis', async () => {
-    const kept: History = { current: aDesignBasis(), earlier: [] };
+    const kept: History = { current: aStandingBasis(), earlier: [] };
     const server = serverWith(kept).on(contract.saveDesignBasis, () => {
-      kept.current = aDesignBasis({ revision: 3 });
+      kept.current = aStandingBasis({ revision: 3 });
       return kept.current;
     });
     const { user } = openPage('/projects/KL221/basis');
@@ -78,7 +78,10 @@ describe('the insulation level worksheet on the design basis', () => {
 
   it('takes the level with the altitude up to which it holds', async () => {
     const worksheet = aWorksheet({ altitudeM: 2310 });
-    const kept: History = { current: aDesignBasis({ worksheet, system: { ...aDesignBasis().system } }), earlier: [] };
+    const kept: History = {
+      current: aStandingBasis({ worksheet, system: { ...aStandingBasis().system } }),
+      earlier: [],
+    };
     const server = serverWith(kept).on(contract.saveDesignBasis, () => kept.current);
     const { user } = openPage('/projects/KL221/basis');
     await user.click(await screen.findByText('Revise'));
@@ -95,7 +98,7 @@ describe('the insulation level worksheet on the design basis', () => {
   });
 
   it('says beside the field what cannot be, from the form and from the server, and keeps what was typed', async () => {
-    const server = serverWith({ current: aDesignBasis({ worksheet: aWorksheet() }), earlier: [] });
+    const server = serverWith({ current: aStandingBasis({ worksheet: aWorksheet() }), earlier: [] });
     server.on(contract.insulationLevelWorksheet, ({ body }) =>
       (body as WorksheetInput).altitudeM === 1200
         ? new Refusal('validation', 'refused', [{ path: 'altitudeM', message: 'Altitude: not that one' }])
@@ -116,7 +119,7 @@ describe('the insulation level worksheet on the design basis', () => {
   });
 
   it('shows the answer to the newest question only', async () => {
-    const server = serverWith({ current: aDesignBasis({ worksheet: aWorksheet() }), earlier: [] });
+    const server = serverWith({ current: aStandingBasis({ worksheet: aWorksheet() }), earlier: [] });
     let freeOld = (): void => undefined;
     server.on(contract.insulationLevelWorksheet, async ({ body }) => {
       const input = body as WorksheetInput;
