@@ -1,5 +1,7 @@
 import type { Evaluation, TraceLine } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
+import { Button } from 'antd';
+import { useState } from 'react';
 import { CautionList } from '../../ui/caution';
 import { formatNumber } from '../../ui/figure';
 import { Ledger } from '../../ui/ledger';
@@ -87,12 +89,21 @@ const topicOf = ({ id }: TraceLine): string => {
 /** Every step: the figure beside its formula and its clause. */
 export function CalculationSheet({ lines }: { lines: readonly TraceLine[] }) {
   const topics = [...new Set(lines.map(topicOf))];
+  const [isOpen, setOpen] = useState(false);
   return (
-    <Sheet title="Calculation" note="every figure beside its formula and clause">
+    <Sheet
+      title="Calculation"
+      note="every figure beside its formula and clause"
+      acts={
+        <Button size="small" onClick={() => setOpen(!isOpen)}>
+          {isOpen ? 'Close all' : 'Open all'}
+        </Button>
+      }
+    >
       {topics.map((topic) => {
         const own = lines.filter((line) => topicOf(line) === topic);
         return (
-          <details key={topic} open className="calculation-topic">
+          <details key={`${topic} ${isOpen}`} open={isOpen} className="calculation-topic">
             <summary>
               {topic} <span className="soft">{own.length === 1 ? '1 step' : `${own.length} steps`}</span>
             </summary>

@@ -1,5 +1,5 @@
 import type { SpecificationInput } from '@bellgap/common/api';
-import { filledPaths } from '@bellgap/common/schemas';
+import { FIELDS, filledPaths } from '@bellgap/common/schemas';
 import { getIn } from 'formik';
 import { trailValueWords } from '../../ui/changes';
 import { fieldWords } from '../../ui/remarks';
@@ -25,9 +25,20 @@ const GROUPS: [head: RegExp, name: string][] = [
 
 const groupOf = (path: string): string => GROUPS.find(([head]) => head.test(path))?.[1] ?? 'Further inputs';
 
+const FORM_ORDER = Object.keys(FIELDS);
+
+/** Place of a field in the form; rows of a list stay together, and what the form does not know comes last. */
+function placeOf(path: string): number {
+  const place = FORM_ORDER.indexOf(path.replace(/\[\d+\]/g, ''));
+  return place < 0 ? FORM_ORDER.length : place;
+}
+
+const rowOf = (path: string): number => Number(/\[(\d+)\]/.exec(path)?.[1] ?? -1);
+
 /** Every input that is filled in, by group, in the order of the form. */
 export function inputGroups(input: SpecificationInput): InputGroup[] {
-  const rows = filledPaths(input).map((path) => ({
+  const paths = filledPaths(input).sort((a, b) => rowOf(a) - rowOf(b) || placeOf(a) - placeOf(b));
+  const rows = paths.map((path) => ({
     path,
     label: fieldWords(path),
     value: trailValueWords(path.replace(/\[(\d+)\]/g, '.$1'), getIn(input, path)),

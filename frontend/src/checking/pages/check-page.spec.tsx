@@ -5,6 +5,7 @@ import { screen, waitFor, within } from '@testing-library/react';
 import { aDesignBasis, aPerson } from '../../testing/builders';
 import { FakeServer, Refusal } from '../../testing/fake-server';
 import { openPage } from '../../testing/open-page';
+import { inputGroups } from '../model/inputs';
 
 const ADDRESS = '/projects/KL221/specifications/INS-221-003/revisions/A/check';
 const { input, evaluation } = suspensionCase;
@@ -175,7 +176,7 @@ describe('a check under way', () => {
     expect(fields[1]).toHaveFocus();
     await user.keyboard('{Enter}');
     expect(fields[2]).toHaveFocus();
-    const [first, second] = filledPaths(input);
+    const [first, second] = inputGroups(input).flatMap(({ rows }) => rows.map(({ path }) => path));
     await waitFor(() =>
       expect(lastSave()?.body).toMatchObject({
         ticks: [
@@ -196,9 +197,12 @@ describe('a check under way', () => {
     const { user } = openPage(ADDRESS);
     await user.type(await screen.findByLabelText('All of Site, seen in'), 'Pollution report');
     await user.keyboard('{Enter}');
+    const paths = inputGroups(input)
+      .find(({ name }) => name === 'Site')!
+      .rows.map(({ path }) => path);
     await waitFor(() => {
       const { ticks } = lastSave()!.body as { ticks: CheckRecord['ticks'] };
-      expect(ticks.map(({ path }) => path)).toEqual(filledPaths(input).filter((path) => path.startsWith('site.')));
+      expect(ticks.map(({ path }) => path)).toEqual(paths);
       expect(new Set(ticks.map(({ seenIn }) => seenIn))).toEqual(new Set(['Pollution report']));
     });
   });
@@ -215,7 +219,7 @@ describe('a check under way', () => {
 
   it('brings together what was saved in another window, and nothing of either is lost', async () => {
     running();
-    const [first = '', second = ''] = filledPaths(input);
+    const [first = '', second = ''] = inputGroups(input).flatMap(({ rows }) => rows.map(({ path }) => path));
     let isRefused = false;
     server.on(contract.saveCheck, ({ body }) => {
       if (!isRefused) {

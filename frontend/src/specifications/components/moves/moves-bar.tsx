@@ -48,10 +48,14 @@ export function MovesBar({ revision, address, save, versionNow, onMoved }: Prope
         )}
         <span className="moves-acts">
           {moves.submit?.allowed && form !== 'submit' && (
-            <Button onClick={() => setForm('submit')}>{moves.submit.label}</Button>
+            <Button size="small" onClick={() => setForm('submit')}>
+              {moves.submit.label}
+            </Button>
           )}
           {moves.recall?.allowed && form !== 'recall' && (
-            <Button onClick={() => setForm('recall')}>{moves.recall.label}</Button>
+            <Button size="small" onClick={() => setForm('recall')}>
+              {moves.recall.label}
+            </Button>
           )}
           {moves.check && <Link to={paths.check.to(code, number, label)}>Check page</Link>}
           {moves.approve && (
@@ -120,7 +124,7 @@ function NextRevision({ revision, address }: { revision: Revision; address: Revi
   if (!mayWriteDrafts(person)) return <span className="soft">The next revision is begun by engineers.</span>;
   return (
     <>
-      <Button loading={next.isPending} onClick={() => next.mutate()}>
+      <Button size="small" loading={next.isPending} onClick={() => next.mutate()}>
         Begin next revision
       </Button>
       {next.error && (
