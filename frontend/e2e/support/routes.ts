@@ -9,6 +9,8 @@ export interface Stop {
   name: string;
   route: RouteName;
   path: string;
+  /** Links to follow from there, by the beginning of their addresses: what has no address that is known beforehand. */
+  follow?: readonly string[];
   /** Roles that may open it; absent means everybody who is signed in. */
   roles?: readonly Role[];
 }
@@ -36,9 +38,43 @@ export const SIGNED_IN_STOPS: readonly Stop[] = [
   specification('KL221', 'INS-221-003'),
   specification('KL221', 'INS-221-004'),
   specification('KL221', 'INS-221-005'),
+  {
+    name: 'revision',
+    route: 'revision',
+    path: paths.revision.to('KL221', 'INS-221-003', 'A'),
+    roles: ENGINEERING,
+  },
+  { name: 'check', route: 'check', path: paths.check.to('KL221', 'INS-221-003', 'A'), roles: ENGINEERING },
   specification('KL132', 'INS-132-001'),
   specification('KL132', 'INS-132-002'),
   specification('KL132', 'INS-132-003'),
+  {
+    name: 'approval',
+    route: 'approval',
+    path: paths.approval.to('KL132', 'INS-132-003', 'latest'),
+    roles: ENGINEERING,
+  },
+  { name: 'sheets', route: 'sheets', path: paths.sheets.to() },
+  { name: 'sheet', route: 'issuedSheet', path: `${paths.sheets.to()}?standing=current`, follow: ['/sheets/'] },
+  {
+    name: 'sheet-superseded',
+    route: 'issuedSheet',
+    path: `${paths.sheets.to()}?standing=superseded`,
+    follow: ['/sheets/'],
+  },
+  { name: 'concessions', route: 'concessions', path: paths.concessions.to(), roles: ENGINEERING },
+  {
+    name: 'verify-current',
+    route: 'verify',
+    path: `${paths.sheets.to()}?standing=current`,
+    follow: ['/sheets/', '/verify/'],
+  },
+  {
+    name: 'verify-superseded',
+    route: 'verify',
+    path: `${paths.sheets.to()}?standing=superseded`,
+    follow: ['/sheets/', '/verify/'],
+  },
   { name: 'catalogue', route: 'catalogue', path: paths.catalogue.to() },
   { name: 'catalogue-unit', route: 'catalogueUnit', path: paths.catalogueUnit.to('U160BL') },
   { name: 'catalogue-rod', route: 'catalogueUnit', path: paths.catalogueUnit.to('C120-132') },
@@ -55,6 +91,8 @@ export const SIGNED_IN_STOPS: readonly Stop[] = [
 export const SIGNED_OUT_STOPS: readonly Stop[] = [
   { name: 'sign-in', route: 'signIn', path: paths.signIn.to() },
   { name: 'invitation', route: 'invitation', path: `${paths.invitation.to()}#not-a-real-token` },
+  { name: 'verify', route: 'verify', path: paths.verify.to() },
+  { name: 'verify-unknown', route: 'verify', path: paths.verify.to('7K2M-94QX-HV3N-C8TA') },
   { name: 'reset-request', route: 'reset', path: paths.reset.to() },
   { name: 'reset', route: 'reset', path: `${paths.reset.to()}#not-a-real-token` },
 ];

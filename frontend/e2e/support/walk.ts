@@ -65,6 +65,11 @@ async function visit(page: Page, complaints: Complaints, stop: Stop, options: Wa
   complaints.take();
   await page.goto(url + stop.path);
   await settle(page);
+  for (const start of stop.follow ?? []) {
+    const address = await page.locator(`main a[href^="${start}"]`).first().getAttribute('href', { timeout: 5000 });
+    await page.goto(url + address);
+    await settle(page);
+  }
   const faults: string[] = [];
   const isNew = await lookedAt.isNew(page, `${stop.name} ${viewport.widthPx}`);
   for (const theme of themes) {

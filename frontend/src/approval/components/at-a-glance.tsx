@@ -9,7 +9,7 @@ export function AtAGlance({ approval }: { approval: Approval }) {
         {glancesOf(approval).map(({ anchor, label, count, asks }) => {
           const words = (
             <>
-              <b className="num">{count}</b> {label}
+              {label} <b className="num">{count}</b>
             </>
           );
           return (

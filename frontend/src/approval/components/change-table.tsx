@@ -1,3 +1,4 @@
+import '../../ui/data-table/data-table.css';
 import { trailValueWords, wholeValue } from '../../ui/changes';
 
 export interface ShownChange {

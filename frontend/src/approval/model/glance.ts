@@ -11,7 +11,7 @@ export interface Glance {
 
 export function glancesOf(approval: Approval): Glance[] {
   return [
-    { anchor: 'new', label: approval.inForce ? 'changed' : 'first issue', count: approval.changes.length },
+    ...(approval.inForce ? [{ anchor: 'new', label: 'changed', count: approval.changes.length }] : []),
     { anchor: 'acceptances', label: 'outside limits', count: approval.acceptances.length, asks: true },
     { anchor: 'fails', label: 'failing', count: approval.fails.length, asks: true },
     { anchor: 'later', label: 'newer since', count: approval.laterChanges.length, asks: true },

@@ -42,7 +42,8 @@ function NothingWaits() {
   ];
   return (
     <EmptyState title="Nothing waits for you">
-      Here comes {comes.join('; ')}. {mayWriteDrafts(person) ? 'Go on with a draft below, or see ' : 'Meanwhile see '}
+      Here you find {comes.join('; ')}.{' '}
+      {mayWriteDrafts(person) ? 'Go on with a draft below, or see ' : 'Meanwhile see '}
       the <Link to={paths.projects.to()}>projects</Link> and the <Link to={paths.sheets.to()}>issued sheets</Link>.
     </EmptyState>
   );

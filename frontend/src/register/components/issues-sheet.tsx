@@ -1,6 +1,7 @@
 import type { IssuedSheet } from '@bellgap/common/api';
 import { Link } from 'react-router-dom';
 import { paths } from '../../app/paths';
+import '../../ui/data-table/data-table.css';
 import { Moment } from '../../ui/moment';
 import { Sheet } from '../../ui/page/sheet';
 import { StandingMark } from '../../ui/standing';
