@@ -16,6 +16,7 @@ import { keyOf } from '../../api/queries';
 import { SchemaFormView } from '../../ui/forms/schema-form';
 import { LongTextField, PasswordField } from '../../ui/forms/text-fields';
 import { useSchemaForm } from '../../ui/forms/use-schema-form';
+import './basis-moves.css';
 
 /** What follows from a move, said before it is made. */
 const CONSEQUENCES: Record<BasisMove, string> = {
@@ -23,7 +24,7 @@ const CONSEQUENCES: Record<BasisMove, string> = {
   check: 'You sign that you have checked it yourself. An approver issues it.',
   return: 'It becomes a draft again; who wrote it is told why.',
   issue: 'It becomes the one in force: new specifications rest on it, and drafts on an older revision are marked.',
-  withdraw: 'It ceases to be in force, with none in its place. It cannot be undone.',
+  withdraw: 'It ceases to be in force, and none is issued in its place until the next. It cannot be undone.',
 };
 
 /** The words of the move from where the basis stands, out of the one table of transitions. */
@@ -64,7 +65,7 @@ export function BasisMoveForm({ code, basis, move, done }: BasisMoveFormProps) {
       submitLabel={moveLabel(move, basis)}
       acts={<Button onClick={done}>Cancel</Button>}
     >
-      <p className="soft">{CONSEQUENCES[move]}</p>
+      <p className="soft basis-move-words">{CONSEQUENCES[move]}</p>
       <LongTextField form={form} path="note" label={basisMoveNeedsNote(move) ? 'Reason' : 'Note, if any'} rows={2} />
       {signs && <PasswordField form={form} path="password" label="Password" autoComplete="current-password" />}
     </SchemaFormView>
