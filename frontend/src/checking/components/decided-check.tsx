@@ -1,4 +1,4 @@
-import { CHECK_CATEGORY_LABELS, type CheckRecord } from '@bellgap/common/api';
+import { CHECK_CATEGORY_LABELS, type Check, type CheckRecord } from '@bellgap/common/api';
 import { CHECKLIST, CHECKLIST_ANSWERS, CHECK_VERDICTS } from '@bellgap/common/schemas';
 import { Ledger } from '../../ui/ledger';
 import { Moment } from '../../ui/moment';
@@ -7,7 +7,7 @@ import { fieldWords } from '../../ui/remarks';
 import { Differences } from './differences';
 
 /** A check that is decided, as it stays in the record. */
-export function DecidedCheck({ record }: { record: CheckRecord }) {
+export function DecidedCheck({ record, cards }: { record: CheckRecord; cards: Check['cards'] }) {
   const { checker, label, verdict, verdictNote, decidedAt, decidedOn, ticks, checklist, ownFigures } = record;
   return (
     <Sheet
@@ -15,7 +15,7 @@ export function DecidedCheck({ record }: { record: CheckRecord }) {
       note={verdict && `${CHECK_VERDICTS[verdict]}${decidedOn ? `, signed ${decidedOn}` : ''}`}
     >
       {verdictNote && <p className="check-note">{verdictNote}</p>}
-      <Differences differences={record.differences} />
+      <Differences differences={record.differences} rules={cards} who={checker} />
       {record.differenceReason && <p className="check-note">Reason for the difference: {record.differenceReason}</p>}
       {ownFigures.note && <p className="check-note">How the figures came about: {ownFigures.note}</p>}
       <Ledger

@@ -1,12 +1,14 @@
-import type { CheckRecord, Evaluation } from '@bellgap/common/api';
+import type { CheckRecord } from '@bellgap/common/api';
 import { formatFull, formatNumber } from '../../ui/figure';
 
 const FIGURES = { units: 'Count of units', clearance: 'Clearance to earth' } as const;
 
 interface Properties {
   differences: CheckRecord['differences'];
-  /** Rules by their id, where the answer names them. */
-  rows?: Evaluation['ruleOfThumb']['rows'];
+  /** Rules by their id. */
+  rules: readonly { id: string; rule: string }[];
+  /** Who counted, as the heading of his figures. */
+  who: string;
 }
 
 const figure = (value: number | null, unit: string): string => (value === null ? '—' : `${formatFull(value)} ${unit}`);
@@ -20,19 +22,19 @@ function differenceWords({ difference, differencePercent, unit }: CheckRecord['d
 
 function verdictWords({ own, authors, outside }: CheckRecord['differences'][number]): string {
   if (own === null) return 'left out; see the note';
-  if (authors === null) return '△ the sheet has no such figure: give the reason';
-  return outside ? '△ outside the band: give the reason' : '✓ within the band';
+  if (authors === null) return '△ the sheet has no such figure';
+  return outside ? '△ outside the band' : '✓ within the band';
 }
 
 /** The own figures beside those of the sheet: difference in units and in per cent, against the band of the rule. */
-export function Differences({ differences, rows = [] }: Properties) {
+export function Differences({ differences, rules, who }: Properties) {
   return (
     <div className="check-table-frame">
       <table className="check-table">
         <thead>
           <tr>
             <th scope="col">figure</th>
-            <th scope="col">yours</th>
+            <th scope="col">{who}</th>
             <th scope="col">sheet</th>
             <th scope="col">difference</th>
             <th scope="col">band</th>
@@ -44,7 +46,7 @@ export function Differences({ differences, rows = [] }: Properties) {
             <tr key={one.figure} className={one.outside ? 'is-outside' : undefined}>
               <th scope="row">
                 {FIGURES[one.figure]}
-                {one.card && <small>{rows.find(({ id }) => id === one.card)?.rule ?? one.card}</small>}
+                {one.card && <small>{rules.find(({ id }) => id === one.card)?.rule ?? one.card}</small>}
               </th>
               <td className="num">{figure(one.own, one.unit)}</td>
               <td className="num">{figure(one.authors, one.unit)}</td>

@@ -79,7 +79,7 @@ function OwnFigures({
 }) {
   return (
     <Sheet title="1 Your own figures" note="beside those of the sheet">
-      <Differences differences={record.differences} rows={evaluation.ruleOfThumb.rows} />
+      <Differences differences={record.differences} rules={evaluation.ruleOfThumb.rows} who="yours" />
       {record.ownFigures.note && <p className="check-note">How you came to them: {record.ownFigures.note}</p>}
       {children}
     </Sheet>

@@ -1,5 +1,4 @@
-import type { Check, Evaluation, Revision } from '@bellgap/common/api';
-import { CHECK_CATEGORY_LABELS } from '@bellgap/common/api';
+import { CHECK_CATEGORY_LABELS, type Check, type Evaluation, type Revision } from '@bellgap/common/api';
 import { useMemo } from 'react';
 import { Link, useParams } from 'react-router-dom';
 import { paths } from '../../app/paths';
@@ -127,6 +126,6 @@ function Steps({ revision, check, address }: StepsProperties) {
   );
 }
 
-function DecidedChecks({ check: { decided } }: { check: Check }) {
-  return decided.map((record) => <DecidedCheck key={record.id} record={record} />);
+function DecidedChecks({ check: { decided, cards } }: { check: Check }) {
+  return decided.map((record) => <DecidedCheck key={record.id} record={record} cards={cards} />);
 }
