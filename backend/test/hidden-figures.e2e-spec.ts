@@ -1,4 +1,4 @@
-import { contract, type EndpointDefinition, type Revision } from '@bellgap/common/api';
+import { contract, type TrailEvent, type EndpointDefinition, type Revision } from '@bellgap/common/api';
 import { TestApp } from './support/test-app';
 import { WorkflowStory, submittableInput, type Actor } from './support/workflow-story';
 
@@ -118,7 +118,8 @@ describe('the figures of the author, before the checker has entered his own', ()
 
   it('are veiled in the trail', async () => {
     const params = { code: story.code, number: submitted.number };
-    const read = async (by: Actor) => (await by.client.call(contract.specificationTrail, { params })).answer.items;
+    const read = async (by: Actor): Promise<TrailEvent[]> =>
+      (await by.client.call(contract.specificationTrail, { params })).answer.items;
     const veiled = await read(story.checker);
     const saved = veiled.find(({ action }) => action === 'revision.saved')!;
     const change = (path: string) => saved.changes.find((one) => one.path === path);
@@ -149,10 +150,10 @@ describe('the figures of the author, before the checker has entered his own', ()
   });
 
   it('are hidden again of what he has not counted: the draft after a return, and what is submitted next', async () => {
-    const mine = (await call(story.checker, contract.check)).answer as { mine: { lockVersion: number } };
+    const { mine } = (await story.checker.client.call(contract.check, { params: story.at(submitted) })).answer;
     const decided = await story.checker.client.call(contract.decideCheck, {
       params: story.at(submitted),
-      version: mine.mine.lockVersion,
+      version: mine!.lockVersion,
       body: { verdict: 'return', note: 'Not yet', password: story.checker.person.password },
     });
     expect(decided.status).toBe(201);

@@ -39,7 +39,7 @@ describe('specifications', () => {
         input: { kind: 'line', basis: 'iec', system: SYSTEM_220, site: null },
       });
       expect(begun.input.string).toBeUndefined();
-      expect(begun.evaluation.string).toBeNull();
+      expect(begun.evaluation!.string).toBeNull();
     });
 
     it('refuses a number that is taken, and says so at the field', async () => {
@@ -69,8 +69,8 @@ describe('specifications', () => {
       expect(saved.status).toBe(200);
       expect(saved.headers.etag).toBe('"2"');
       expect(saved.answer).toMatchObject({ lockVersion: 2, title: 'Suspension strings', savedBy: 'Edda Rowan' });
-      expect(saved.answer.evaluation.string?.units).toBeGreaterThan(0);
-      expect(saved.answer.evaluation.trace.length).toBeGreaterThan(0);
+      expect(saved.answer.evaluation!.string?.units).toBeGreaterThan(0);
+      expect(saved.answer.evaluation!.trace.length).toBeGreaterThan(0);
       expect(saved.answer.context.insulator).toMatchObject({ code: 'U160BL', version: 1 });
 
       const { answer, headers } = await engineer.call(revision, { params: at('S-10', 'A') });
@@ -83,7 +83,7 @@ describe('specifications', () => {
       const input: SpecificationInput = { ...lineInput(), site: { altitudeM: null, pollution: null }, string: null };
       const { answer } = await engineer.call(saveRevision, { params: at('S-11'), version: 1, body: draft(input) });
       expect(answer.input.site).toEqual({ altitudeM: null, pollution: null });
-      expect(answer.evaluation.string).toBeNull();
+      expect(answer.evaluation!.string).toBeNull();
     });
 
     it('makes no new version where nothing has changed', async () => {
@@ -170,9 +170,9 @@ describe('specifications', () => {
       const codes = ({ cautions }: { cautions: { code: string }[] }) => cautions.map(({ code }) => code);
       const bare = await save(1, '');
       expect(bare.status).toBe(200);
-      expect(codes(bare.answer.evaluation)).toContain('override-without-reason');
+      expect(codes(bare.answer.evaluation!)).toContain('override-without-reason');
       const reasoned = await save(2, 'Mid-line fault level after the network study');
-      expect(codes(reasoned.answer.evaluation)).not.toContain('override-without-reason');
+      expect(codes(reasoned.answer.evaluation!)).not.toContain('override-without-reason');
       expect(reasoned.answer.overrides).toEqual([
         { path: 'system.faultCurrentKa', reason: 'Mid-line fault level after the network study' },
       ]);
@@ -269,10 +269,10 @@ describe('specifications', () => {
         body: draft(lineInput({ site: { ...lineInput().site!, altitudeM: 6000 } })),
       });
       expect(status).toBe(200);
-      expect(answer.evaluation.cautions).toContainEqual(
+      expect(answer.evaluation!.cautions).toContainEqual(
         expect.objectContaining({ severity: 'stop', field: 'site.altitudeM' }),
       );
-      expect(answer.evaluation.string?.units ?? null).toBeNull();
+      expect(answer.evaluation!.string?.units ?? null).toBeNull();
     });
   });
 

@@ -154,7 +154,7 @@ describe('tables and formulas', () => {
     expect(saved.context.confirmations).toEqual([
       { key: USCD_D, outcome: 'disputed', edition: '2008', page: '14', on: '2026-03-02', by: 'Wen Tollarsson' },
     ]);
-    expect(saved.evaluation.trace.map(({ source }) => source.status)).toContain('disputed');
+    expect(saved.evaluation!.trace.map(({ source }) => source.status)).toContain('disputed');
   });
 
   it.each([

@@ -1,4 +1,11 @@
-import { contract, type Check, type Revision, type Role, type SpecificationInput } from '@bellgap/common/api';
+import {
+  contract,
+  type BodyOf,
+  type Check,
+  type Revision,
+  type Role,
+  type SpecificationInput,
+} from '@bellgap/common/api';
 import { CHECKLIST, filledPaths, type ChecklistItem } from '@bellgap/common/schemas';
 import { begin, lineInput, makeLine } from './line-project';
 import type { TestPerson } from './people';
@@ -177,10 +184,10 @@ export class WorkflowStory {
   }
 }
 
-export function wholeCheck(input: SpecificationInput) {
+export function wholeCheck(input: SpecificationInput): BodyOf<typeof contract.saveCheck> {
   return {
     ticks: filledPaths(input).map((path) => ({ path, seenIn: 'Design basis', agreed: true })),
-    checklist: (Object.keys(CHECKLIST) as ChecklistItem[]).map((item) => ({ item, answer: 'yes' as const, note: '' })),
+    checklist: (Object.keys(CHECKLIST) as ChecklistItem[]).map((item) => ({ item, answer: 'yes', note: '' })),
     differenceReason: '',
     independent: true,
   };
