@@ -42,7 +42,6 @@ export const REGISTER_COLUMNS: Column<RegisterRow>[] = [
       </Link>
     ),
   },
-  { key: 'kind', title: 'Kind', value: (row) => labelIn(CHOICE_LABELS.kind, row.kind) },
   { key: 'units', title: 'Units', value: (row) => row.units, figure: true, sortable: true },
   {
     key: 'insulatorCode',
@@ -50,6 +49,14 @@ export const REGISTER_COLUMNS: Column<RegisterRow>[] = [
     value: (row) => row.insulatorCode,
     render: (row) => <span className="num">{row.insulatorCode ?? '—'}</span>,
   },
+  {
+    key: 'issuedAt',
+    title: 'Issued',
+    value: (row) => row.issuedAt,
+    render: (row) => <Moment at={row.issuedAt} />,
+    sortable: true,
+  },
+  { key: 'issuedBy', title: 'By', value: (row) => row.issuedBy },
   { key: 'governedBy', title: 'Governed by', value: (row) => labelIn(CHOICE_LABELS.criterion, row.governedBy) },
   { key: 'highestVoltageKv', title: 'Um, kV', value: (row) => row.highestVoltageKv, figure: true, sortable: true },
   { key: 'altitudeM', title: 'Altitude, m', value: (row) => row.altitudeM, figure: true, sortable: true },
@@ -63,14 +70,7 @@ export const REGISTER_COLUMNS: Column<RegisterRow>[] = [
   },
   { key: 'acceptances', title: 'Acceptances', value: (row) => row.acceptances, figure: true },
   { key: 'concessions', title: 'Concessions', value: (row) => row.concessions, figure: true },
-  {
-    key: 'issuedAt',
-    title: 'Issued',
-    value: (row) => row.issuedAt,
-    render: (row) => <Moment at={row.issuedAt} />,
-    sortable: true,
-  },
-  { key: 'issuedBy', title: 'By', value: (row) => row.issuedBy },
+  { key: 'kind', title: 'Kind', value: (row) => labelIn(CHOICE_LABELS.kind, row.kind) },
 ];
 
 /** Where room is short: what it is, whether it is in force, since when. */
