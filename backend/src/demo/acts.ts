@@ -9,6 +9,7 @@ import { RegisterService } from '../register/register.service';
 import { SheetsService } from '../sheets/sheets.service';
 import { SpecificationsService, type RevisionAddress } from '../specifications/specifications.service';
 import { withValueAt } from '../specifications/values';
+import { SealingService } from '../trail/sealing.service';
 import { ApprovalService } from '../workflow/approval.service';
 import { ChecksService } from '../workflow/checks.service';
 import { IssueService } from '../workflow/issue.service';
@@ -31,6 +32,7 @@ export interface Storytellers {
   approvals: ApprovalService;
   issues: IssueService;
   register: RegisterService;
+  sealing: SealingService;
 }
 
 /** The services that make the documents, out of a running application whose clock is that of the story. */
@@ -49,6 +51,7 @@ export function storytellersOf(app: INestApplicationContext, clock: StoryClock):
     approvals: app.get(ApprovalService),
     issues: app.get(IssueService),
     register: app.get(RegisterService),
+    sealing: app.get(SealingService),
   };
 }
 
@@ -77,6 +80,8 @@ export async function perform(document: StoryDocument, act: StoryAct, tellers: S
     case 'check':
       return check(person, address, act, tellers);
     case 'issue':
+      // The running product seals every few seconds; each sheet carries the last seal.
+      await tellers.sealing.seal();
       return issue(person, address, act, tellers);
     case 'take-copy': {
       const { sheetId } = await specifications.get(person, address);
