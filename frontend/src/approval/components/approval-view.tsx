@@ -30,6 +30,12 @@ const signed = (by: Revision['drafted']) =>
     <span className="soft">not yet</span>
   );
 
+/** What is ordered by the sheet. */
+function unitsOf({ evaluation, input }: Revision): string {
+  const units = evaluation?.string?.units ?? null;
+  return units === null ? '—' : `${units} × ${input.string?.insulatorCode ?? '—'}`;
+}
+
 function Barred({ barred }: { barred: readonly string[] }) {
   if (barred.length === 0) return null;
   return (
@@ -64,6 +70,7 @@ export function ApprovalView({ approval, revision, refresh, issued, returned }: 
         facts={[
           ['Revision', <span className="num">{label}</span>],
           ['To be issued as', <span className="num">{approval.nextLabel}</span>],
+          ['Units', <span className="num">{unitsOf(revision)}</span>],
           ['Drawn', signed(drafted)],
           ['Checked', signed(checked)],
           ['Check category', submitted ? (CHECK_CATEGORY_LABELS[submitted.checkCategory] ?? '') : '—'],

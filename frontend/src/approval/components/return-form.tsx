@@ -18,7 +18,7 @@ export function ReturnForm({ revision, returned }: { revision: Revision; returne
     },
   });
   return (
-    <SchemaFormView form={form} label={TRANSITIONS.refuse.label} submitLabel={TRANSITIONS.refuse.label}>
+    <SchemaFormView form={form} label={TRANSITIONS.refuse.label} submitLabel={TRANSITIONS.refuse.label} secondary>
       <LongTextField form={form} path="reason" label="Reason" hint="The engineer reads it on his desk and by e-mail" />
     </SchemaFormView>
   );

@@ -1,5 +1,6 @@
 import { CHECK_CATEGORY_LABELS, type Check, type CheckRecord } from '@bellgap/common/api';
 import { CHECKLIST, CHECKLIST_ANSWERS, CHECK_VERDICTS } from '@bellgap/common/schemas';
+import { dayText } from '../../ui/days';
 import { Ledger } from '../../ui/ledger';
 import { Moment } from '../../ui/moment';
 import { Sheet } from '../../ui/page/sheet';
@@ -12,7 +13,7 @@ export function DecidedCheck({ record, cards }: { record: CheckRecord; cards: Ch
   return (
     <Sheet
       title={`Check of revision ${label} by ${checker}`}
-      note={verdict && `${CHECK_VERDICTS[verdict]}${decidedOn ? `, signed ${decidedOn}` : ''}`}
+      note={verdict && `${CHECK_VERDICTS[verdict]}${decidedOn ? `, signed ${dayText(decidedOn)}` : ''}`}
     >
       {verdictNote && <p className="check-note">{verdictNote}</p>}
       <Differences differences={record.differences} rules={cards} who={checker} />

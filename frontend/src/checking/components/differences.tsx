@@ -1,5 +1,5 @@
 import type { CheckRecord } from '@bellgap/common/api';
-import { formatFull, formatNumber } from '../../ui/figure';
+import { formatNumber } from '../../ui/figure';
 
 const FIGURES = { units: 'Count of units', clearance: 'Clearance to earth' } as const;
 
@@ -11,13 +11,19 @@ interface Properties {
   who: string;
 }
 
-const figure = (value: number | null, unit: string): string => (value === null ? '—' : `${formatFull(value)} ${unit}`);
+const decimalsOf = (value: number): number => (Number.isInteger(value) ? 0 : Number.isInteger(value * 10) ? 1 : 2);
+const plain = (value: number): string => formatNumber(value, { decimals: decimalsOf(value) });
+const figure = (value: number | null, unit: string): string => (value === null ? '—' : `${plain(value)} ${unit}`);
+
+/** A band in millimetres is told no finer than a millimetre. */
+const bandWords = (band: number | null, unit: string): string =>
+  band === null ? '—' : `± ${figure(unit === 'mm' ? Math.round(band) : Math.round(band * 100) / 100, unit)}`;
 
 function differenceWords({ difference, differencePercent, unit }: CheckRecord['differences'][number]): string {
   if (difference === null) return '—';
   const percent =
     differencePercent === null ? '' : ` (${formatNumber(differencePercent, { decimals: 1, signed: true })} %)`;
-  return `${difference > 0 ? '+' : difference < 0 ? '−' : ''}${formatFull(Math.abs(difference))} ${unit}${percent}`;
+  return `${difference > 0 ? '+' : difference < 0 ? '−' : ''}${plain(Math.abs(difference))} ${unit}${percent}`;
 }
 
 function verdictWords({ own, authors, outside }: CheckRecord['differences'][number]): string {
@@ -48,13 +54,19 @@ export function Differences({ differences, rules, who }: Properties) {
                 {FIGURES[one.figure]}
                 {one.card && <small>{rules.find(({ id }) => id === one.card)?.rule ?? one.card}</small>}
               </th>
-              <td className="num">{figure(one.own, one.unit)}</td>
-              <td className="num">{figure(one.authors, one.unit)}</td>
-              <td className="num">{differenceWords(one)}</td>
-              <td className="num">
-                {one.band === null ? '—' : `± ${figure(Math.round(one.band * 100) / 100, one.unit)}`}
+              <td className="num" data-head={who}>
+                {figure(one.own, one.unit)}
               </td>
-              <td>{verdictWords(one)}</td>
+              <td className="num" data-head="sheet">
+                {figure(one.authors, one.unit)}
+              </td>
+              <td className="num" data-head="difference">
+                {differenceWords(one)}
+              </td>
+              <td className="num" data-head="band">
+                {bandWords(one.band, one.unit)}
+              </td>
+              <td data-head="verdict">{verdictWords(one)}</td>
             </tr>
           ))}
         </tbody>

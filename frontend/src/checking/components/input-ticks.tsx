@@ -149,7 +149,7 @@ const TickRow = memo(function TickRow({ row, tick, detail, change, onEnter, read
   return (
     <li id={inputAnchor(path)} className={`tick is-${state}`}>
       <div className="tick-what">
-        <span>{label}</span> <b className="num">{value}</b>
+        <span>{label}</span> <b className={/^[-−\d]/.test(value) ? 'num' : undefined}>{value}</b>
         {detail && (
           <small>
             {detail.failingLoadKn} kN, {detail.creepageMm} mm creepage, spacing {detail.spacingMm} mm

@@ -2,6 +2,7 @@ import { CHECK_CATEGORY_LABELS, type Check, type Evaluation, type Revision } fro
 import { useMemo } from 'react';
 import { Link, useParams } from 'react-router-dom';
 import { paths } from '../../app/paths';
+import { dayText } from '../../ui/days';
 import { Page } from '../../ui/page/page';
 import { Sheet } from '../../ui/page/sheet';
 import { RemarksPanel } from '../../ui/remarks';
@@ -58,9 +59,9 @@ function Standing({ revision }: { revision: Revision }) {
       {submitted && (
         <>
           {' '}
-          · submitted by {submitted.name} on {submitted.on}, category{' '}
+          · submitted by {submitted.name} on {dayText(submitted.on)}, category{' '}
           {CHECK_CATEGORY_LABELS[submitted.checkCategory] ?? submitted.checkCategory}
-          {submitted.dueOn !== null && `, wanted by ${submitted.dueOn}`}
+          {submitted.dueOn !== null && `, wanted by ${dayText(submitted.dueOn)}`}
           {submitted.note && (
             <>
               {' '}

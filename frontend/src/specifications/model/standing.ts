@@ -1,4 +1,5 @@
 import { CHECK_CATEGORY_LABELS, TRANSITIONS, type Revision, type TransitionName } from '@bellgap/common/api';
+import { dayText } from '../../ui/days';
 
 export interface ShownMove {
   /** What it is called where it cannot be made. */
@@ -31,15 +32,15 @@ export function readOnlyWords(revision: Revision): string | null {
     case 'in_check': {
       if (!submitted) return 'In check: nothing is changed until it is returned or taken back.';
       const { name, on, dueOn, checkCategory } = submitted;
-      const wanted = dueOn === null ? '' : `, wanted by ${dueOn}`;
-      return `Submitted for check by ${name} on ${on}, category ${CHECK_CATEGORY_LABELS[checkCategory] ?? checkCategory}${wanted}. Nothing is changed until it is returned or taken back.`;
+      const wanted = dueOn === null ? '' : `, wanted by ${dayText(dueOn)}`;
+      return `Submitted for check by ${name} on ${dayText(on)}, category ${CHECK_CATEGORY_LABELS[checkCategory] ?? checkCategory}${wanted}. Nothing is changed until it is returned or taken back.`;
     }
     case 'checked': {
-      const by = checked ? ` by ${checked.name} on ${checked.on}` : '';
+      const by = checked ? ` by ${checked.name} on ${dayText(checked.on)}` : '';
       return `Checked${by}; waits for approval. What was checked is what is issued, so nothing is changed now.`;
     }
     case 'issued': {
-      const by = approved ? ` by ${approved.name} on ${approved.on}` : '';
+      const by = approved ? ` by ${approved.name} on ${dayText(approved.on)}` : '';
       return `Issued${by}. What is issued never changes; a change is made in the next revision.`;
     }
     case 'superseded':

@@ -83,7 +83,7 @@ describe('from draft to check', () => {
         { name: 'return', allowed: false, why: 'Only checkers of this project check.' },
       ],
     });
-    expect(await screen.findByText(/Submitted for check by Tamsin Orvelle on 2026-03-12/)).toBeInTheDocument();
+    expect(await screen.findByText(/Submitted for check by Tamsin Orvelle on 12 Mar 2026/)).toBeInTheDocument();
     expect(screen.getByText('Check it: Only checkers of this project check.')).toBeInTheDocument();
     await user.click(screen.getByText('Take back'));
     await user.type(screen.getByLabelText('Reason'), 'The class is wrong');

@@ -12,12 +12,14 @@ interface SchemaFormViewProps<Values extends FormikValues> {
   /** What the form is about, where no heading says it. */
   label?: string;
   submitDisabled?: boolean;
+  /** Beside another form whose act is the one that is meant first. */
+  secondary?: boolean;
   children: ReactNode;
 }
 
 /** The frame of a form: fields, what went wrong as a whole, and the acts at its foot. */
 export function SchemaFormView<Values extends FormikValues>(props: SchemaFormViewProps<Values>) {
-  const { form, submitLabel, acts, label, submitDisabled, children } = props;
+  const { form, submitLabel, acts, label, submitDisabled, secondary, children } = props;
   const { formik, attach, failure } = form;
   return (
     <form
@@ -34,7 +36,12 @@ export function SchemaFormView<Values extends FormikValues>(props: SchemaFormVie
       {children}
       {failure && <Alert type="error" showIcon title={failure} role="alert" className="schema-form-failure" />}
       <div className="schema-form-acts">
-        <Button type="primary" htmlType="submit" loading={formik.isSubmitting} disabled={submitDisabled ?? false}>
+        <Button
+          type={secondary ? 'default' : 'primary'}
+          htmlType="submit"
+          loading={formik.isSubmitting}
+          disabled={submitDisabled ?? false}
+        >
           {submitLabel}
         </Button>
         {acts}

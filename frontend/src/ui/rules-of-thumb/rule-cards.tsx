@@ -1,5 +1,5 @@
 import type { RuleOfThumbRow } from '@bellgap/common/api';
-import { formatFull } from '../figure';
+import { formatFull, formatNumber } from '../figure';
 import { SourceWords } from '../trace';
 import './rule-cards.css';
 
@@ -20,7 +20,9 @@ export function RuleCards({ rows }: { rows: readonly RuleOfThumbRow[] }) {
   );
 }
 
-const short = (value: number): string => formatFull(Math.round(value * 100) / 100);
+/** An estimate is told no finer than it is meant: millimetres whole, all else to a hundredth at most. */
+const short = (value: number, unit: string): string =>
+  unit === 'mm' ? formatNumber(value) : formatFull(Math.round(value * 100) / 100);
 
 function RuleCard({ row }: { row: RuleOfThumbRow }) {
   const { rule, estimate, given, unit, band, why, verdict, source } = row;
@@ -39,12 +41,12 @@ function RuleCard({ row }: { row: RuleOfThumbRow }) {
         ) : (
           <>
             <span className="bg-num">
-              {estimate === null ? '—' : short(estimate)}
-              {band !== null && ` ± ${short(band)}`} {unit}
+              {estimate === null ? '—' : short(estimate, unit)}
+              {band !== null && ` ± ${short(band, unit)}`} {unit}
             </span>
             <span>
               {'sheet '}
-              <span className="bg-num">{given === null ? '—' : short(given)}</span>
+              <span className="bg-num">{given === null ? '—' : short(given, unit)}</span>
             </span>
             <span className={`verdict is-${verdict}`}>{VERDICTS[verdict]}</span>
           </>
