@@ -11,11 +11,9 @@ export interface AuditEvent {
   entityId: string;
   projectId?: string | null;
   /** By path: the value before and the value after. */
-  changes?: Changes;
+  changes?: Record<string, { from?: unknown; to?: unknown }>;
   reason?: string | null;
 }
-
-export type Changes = Record<string, { from?: unknown; to?: unknown }>;
 
 /** Writes the trail, always in the transaction of its cause. */
 @Injectable()
@@ -34,25 +32,4 @@ export class AuditService {
       reason: event.reason ?? null,
     });
   }
-}
-
-/** What differs between two values of the same shape, down to the fields that differ. */
-export function changesBetween(before: object, after: object): Changes {
-  const changes: Changes = {};
-  collect(before, after, '', changes);
-  return changes;
-}
-
-function collect(before: unknown, after: unknown, path: string, changes: Changes): void {
-  if (isRecord(before) && isRecord(after)) {
-    for (const key of new Set([...Object.keys(before), ...Object.keys(after)])) {
-      collect(before[key], after[key], path ? `${path}.${key}` : key, changes);
-    }
-  } else if (JSON.stringify(before ?? null) !== JSON.stringify(after ?? null)) {
-    changes[path] = { from: before ?? null, to: after ?? null };
-  }
-}
-
-function isRecord(value: unknown): value is Record<string, unknown> {
-  return typeof value === 'object' && value !== null && !Array.isArray(value) && !(value instanceof Date);
 }

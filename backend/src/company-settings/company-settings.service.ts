@@ -1,7 +1,8 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
 import type { BodyOf, contract } from '@bellgap/common/api';
-import { AuditService, changesBetween } from '../audit/audit.service';
+import { AuditService } from '../audit/audit.service';
+import { changesBetween } from '../platform/values';
 import { Clock } from '../platform/clock';
 import { newerVersion } from '../platform/domain-error';
 import { KNEX } from '../platform/knex';

@@ -8,7 +8,7 @@ import { DesignBasesService } from '../projects/design-bases.service';
 import { RegisterService } from '../register/register.service';
 import { SheetsService } from '../sheets/sheets.service';
 import { SpecificationsService, type RevisionAddress } from '../specifications/specifications.service';
-import { withValueAt } from '../specifications/values';
+import { withValueAt } from '../platform/values';
 import { SealingService } from '../trail/sealing.service';
 import { ApprovalService } from '../workflow/approval.service';
 import { ChecksService } from '../workflow/checks.service';

@@ -11,7 +11,8 @@ import type {
   contract,
 } from '@bellgap/common/api';
 import { inputFaults } from '@bellgap/common/engine';
-import { AuditService, changesBetween } from '../audit/audit.service';
+import { AuditService } from '../audit/audit.service';
+import { changesBetween } from '../platform/values';
 import { CompanySettingsService } from '../company-settings/company-settings.service';
 import { Clock } from '../platform/clock';
 import { forbidden, invalid, newerVersion, notFound, wrongState } from '../platform/domain-error';

@@ -9,7 +9,8 @@ import {
   type RevisionState,
   type contract,
 } from '@bellgap/common/api';
-import { AuditService, changesBetween } from '../audit/audit.service';
+import { AuditService } from '../audit/audit.service';
+import { changesBetween } from '../platform/values';
 import { Clock } from '../platform/clock';
 import { forbidden, invalidAt, newerVersion, notFound } from '../platform/domain-error';
 import { KNEX } from '../platform/knex';

@@ -2,7 +2,7 @@ import type { DesignBasis, FieldError, SpecificationInput, SpecificationKind } f
 import type { Caution } from '@bellgap/common/api';
 import { CHOICE_LABELS, fieldOf, INHERITED_PATHS } from '@bellgap/common/schemas';
 import type { InheritedPath } from '@bellgap/common/schemas';
-import { isPart, sameValue, valueAt, withValueAt } from './values';
+import { isPart, sameValue, valueAt, withValueAt } from '../platform/values';
 
 export interface Override {
   path: string;

@@ -16,12 +16,11 @@ import type { RevisionMove } from './revision-moves';
 import type { StoredRevision } from './revision-row';
 import { RevisionsRepository, type RevisionAddress, type RevisionContent } from './revisions.repository';
 import { SpecificationsListQuery } from './specifications.list-query';
-import { changesBetween, sameValue } from './values';
+import { changesBetween, sameValue } from '../platform/values';
 
 export type { RevisionAddress, RevisionMove, StoredRevision };
 export { listColumnsOf } from './list-columns';
 export { OWN_COUNT_FIRST, figuresHidden, isAuthor, isChecker, maySee, moveRefusal, ownWork } from './rights';
-export { changesBetween } from './values';
 
 const FIRST_LABEL = 'A';
 

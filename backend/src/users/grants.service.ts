@@ -1,7 +1,8 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Knex } from 'knex';
 import type { BodyOf, Role, contract } from '@bellgap/common/api';
-import { AuditService, changesBetween } from '../audit/audit.service';
+import { AuditService } from '../audit/audit.service';
+import { changesBetween } from '../platform/values';
 import { SessionsService } from '../auth/sessions.service';
 import { MailService } from '../mail/mail.service';
 import { Clock } from '../platform/clock';

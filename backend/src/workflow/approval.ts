@@ -1,7 +1,8 @@
 import type { Approval, Caution, EvaluationContext, TraceLine } from '@bellgap/common/api';
 import { ALL_FORMULAS, ALL_TABLES } from '@bellgap/common/engine';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
-import { changesBetween, type StoredRevision } from '../specifications/specifications.service';
+import { changesBetween } from '../platform/values';
+import type { StoredRevision } from '../specifications/specifications.service';
 
 type Content = Pick<StoredRevision, 'title' | 'input' | 'overrides'>;
 type Matter = Approval['acceptances'][number];

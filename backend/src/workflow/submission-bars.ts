@@ -1,6 +1,6 @@
 import type { FieldError } from '@bellgap/common/api';
 import { labelOf, submissionFaults } from '@bellgap/common/schemas';
-import { changesBetween } from '../audit/audit.service';
+import { changesBetween } from '../platform/values';
 import { canonicalJson } from '../platform/canonical-json';
 import type { StoredRevision } from '../specifications/specifications.service';
 
