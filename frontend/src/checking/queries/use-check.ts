@@ -24,19 +24,21 @@ export function useCheckedRevision(params: CheckAddress) {
   return { ...query, data: query.data as Revision | undefined } as typeof query;
 }
 
-/** Takes an answer as the check that stands, and asks anew for what follows from it. */
+/**
+ * Takes an answer as the check that stands, and asks anew for what follows from it. The revision first: it says whether
+ * figures and remarks may still be shown, and what may not be shown is not asked for.
+ */
 export function useTakeCheck(params: CheckAddress) {
   const client = useQueryClient();
   const { code, number, label } = params;
   return useCallback(
     async (check: Check, changesRevision: boolean) => {
+      if (changesRevision) {
+        await client.invalidateQueries({ queryKey: [contract.revision.path] });
+        for (const endpoint of [contract.remarks, contract.specifications, contract.desk, contract.approval])
+          void client.invalidateQueries({ queryKey: [endpoint.path], refetchType: 'none' });
+      }
       client.setQueryData(keyOf(contract.check, { params: { code, number, label } }), check);
-      if (!changesRevision) return;
-      await Promise.all(
-        [contract.revision, contract.remarks, contract.specifications, contract.desk, contract.approval].map(
-          (endpoint) => client.invalidateQueries({ queryKey: [endpoint.path] }),
-        ),
-      );
     },
     [client, code, number, label],
   );

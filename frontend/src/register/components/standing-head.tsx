@@ -21,7 +21,7 @@ function Since({ sheet }: { sheet: IssuedSheet }) {
         </>
       )}
       {standingBy && ` by ${standingBy}`}
-      {standingReason && `: ${standingReason}`}.{' '}
+      {standingReason && `: ${standingReason.replace(/[.\s]+$/, '')}`}.{' '}
       {successor ? (
         <>
           Use <Link to={paths.issuedSheet.to(successor.id)}>revision {successor.label}</Link> instead.

@@ -15,7 +15,7 @@ export function ConcessionEnd({ concession: { validUntil, daysLeft } }: { conces
   const tone = daysLeft < 0 ? ' is-ended' : daysLeft <= SOON_DAYS ? ' is-ending' : '';
   return (
     <>
-      <span className="num">{dayText(validUntil)}</span>{' '}
+      <span className="num">{dayText(validUntil)}</span>,{' '}
       <span className={`concession-end${tone}`}>{endWords(daysLeft)}</span>
     </>
   );
