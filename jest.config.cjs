@@ -30,7 +30,7 @@ const withDatabase = {
 };
 module.exports = {
   // Enough for a busy machine; what is slow on a quiet one shows in the times.
-  testTimeout: 30_000,
+  testTimeout: 120_000,
   projects: [
     { ...base, displayName: 'common', rootDir: 'common' },
     { ...base, ...withDatabase, displayName: 'database', rootDir: 'database' },

@@ -152,6 +152,14 @@ describe('tables and formulas', () => {
       },
     });
     expect(saved.context.confirmations).toEqual([
+      {
+        key: 'c37.32:bus-clearances:145/650',
+        outcome: 'confirmed',
+        edition: '1996',
+        page: '9',
+        on: '2026-03-02',
+        by: 'Wen Tollarsson',
+      },
       { key: USCD_D, outcome: 'disputed', edition: '2008', page: '14', on: '2026-03-02', by: 'Wen Tollarsson' },
     ]);
     expect(saved.evaluation!.trace.map(({ source }) => source.status)).toContain('disputed');
