@@ -1,5 +1,5 @@
 import '@testing-library/jest-dom';
 import { configure } from '@testing-library/react';
 
-configure({ asyncUtilTimeout: 5000 });
+configure({ asyncUtilTimeout: 20_000 });
 jest.setTimeout(30_000);
