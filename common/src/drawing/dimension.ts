@@ -36,7 +36,8 @@ export function layOutDimension(dimension: DimensionPrimitive, textHeightMm: num
     const lean = at(along.xMm + left.xMm, along.yMm + left.yMm);
     lines.push([go(head, lean, -stroke), go(head, lean, stroke)]);
   }
-  return { lines, words: wordsOf(dimension, start, end, along, at(left.xMm * side, left.yMm * side), textHeightMm) };
+  const words = wordsOf(dimension, start, end, along, at(left.xMm * side, left.yMm * side), textHeightMm);
+  return { lines, words: dimension.wordsAt ? { ...words, at: dimension.wordsAt } : words };
 }
 
 function wordsOf(

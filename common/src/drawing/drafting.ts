@@ -1,5 +1,6 @@
 import { layOutDimension } from './dimension';
 import { at, pathData, place, placeAngles, placeSegments, shift, type Segment, type Transform } from './geometry';
+import { settle } from './settle';
 import { textBox } from './text-box';
 import type { Drawing, Layer, PathPrimitive, Point, Primitive, TextPrimitive } from './primitives';
 
@@ -9,8 +10,11 @@ export type Draft = Exclude<Primitive, PathPrimitive> | (Omit<PathPrimitive, 'da
 function moved(t: Transform, draft: Draft): Draft {
   switch (draft.kind) {
     case 'line':
-    case 'dimension':
       return { ...draft, from: place(t, draft.from), to: place(t, draft.to) };
+    case 'dimension': {
+      const wordsAt = draft.wordsAt && place(t, draft.wordsAt);
+      return { ...draft, from: place(t, draft.from), to: place(t, draft.to), ...(wordsAt ? { wordsAt } : {}) };
+    }
     case 'polyline':
       return { ...draft, points: draft.points.map((p) => place(t, p)) };
     case 'path':
@@ -66,6 +70,8 @@ export interface Bounds {
   bottom: number;
 }
 
+const nothing = (): Bounds => ({ left: Infinity, top: Infinity, right: -Infinity, bottom: -Infinity });
+
 function widen(box: Bounds, { xMm, yMm }: Point): void {
   if (xMm < box.left) box.left = xMm;
   if (xMm > box.right) box.right = xMm;
@@ -75,8 +81,8 @@ function widen(box: Bounds, { xMm, yMm }: Point): void {
 
 /** Collects primitives in any place, and hands them over moved to the origin with a margin. */
 export class DraftingTable {
-  private readonly drafts: Draft[] = [];
-  private readonly box: Bounds = { left: Infinity, top: Infinity, right: -Infinity, bottom: -Infinity };
+  private drafts: Draft[] = [];
+  private box: Bounds = nothing();
 
   constructor(readonly textHeightMm: number) {}
 
@@ -117,6 +123,13 @@ export class DraftingTable {
     const offsetMm = leftward < 0 ? -Math.abs(shiftXMm) : Math.abs(shiftXMm);
     const { about, layer = 'dimension', beside = false } = options;
     this.add({ kind: 'dimension', layer, from: p, to: q, offsetMm, text, about, ...(beside ? { beside } : {}) });
+  }
+
+  /** Moves words that stand on each other or on a body; what is drawn after it keeps clear by itself. */
+  settleWords(): void {
+    this.drafts = settle(this.drafts, this.textHeightMm);
+    this.box = nothing();
+    for (const draft of this.drafts) for (const point of reach(draft, this.textHeightMm)) widen(this.box, point);
   }
 
   bounds(): Readonly<Bounds> {

@@ -96,6 +96,8 @@ export interface DimensionPrimitive extends Drawn {
   offsetMm: number;
   text: string;
   beside?: boolean;
+  /** Where the words stand when their usual place is taken, with the same anchor and angle. */
+  wordsAt?: Point;
 }
 
 export type Primitive =

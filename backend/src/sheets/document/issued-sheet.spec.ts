@@ -1,4 +1,4 @@
-import { drawingCases, suspensionCase } from '@bellgap/common/drawing/fixtures';
+import { drawingCases, suspensionCase, wordsInTheWay } from '@bellgap/common/drawing/fixtures';
 import { CHOICE_LABELS, filledPaths } from '@bellgap/common/schemas';
 import type { SheetContent } from './content';
 import { draftContent, issuedContent, pagesOf, scanned, structureOf } from './fixtures';
@@ -156,6 +156,38 @@ describe('an issued sheet', () => {
     expect(structure).toMatch(
       /Accepted, conceded, not waited for.*Concession.*Check record.*Remarks and answers.*Revisions/,
     );
+  });
+
+  it.each(drawingCases)('has room on its first page for the drawing and all required values: $name', (drawingCase) => {
+    for (const paper of PAPERS) {
+      for (const content of [draftContent(drawingCase), issuedContent(drawingCase)]) {
+        const sheet = layOutSheet(on(paper, content));
+        const first = flat(sheet.elements.filter(({ page }) => page === 0));
+        const drawing = first.flatMap(({ marks }) => marks).find((mark) => mark.kind === 'drawing');
+        if (drawing?.kind !== 'drawing') throw new Error(`no drawing on ${paper}`);
+        expect({ paper, state: content.state, inTheWay: wordsInTheWay(drawing.drawing) }).toEqual({
+          paper,
+          state: content.state,
+          inTheWay: [],
+        });
+        const words = first.map(({ marks }) => marks.map((mark) => (mark.kind === 'text' ? mark.text : '')).join(' '));
+        for (const label of ['Creepage needed', 'Dry arc needed', 'Distance to earth', 'Between phases'])
+          expect(words).toContain(label);
+      }
+    }
+  });
+
+  it('draws a tension set and a V at a scale that can be read', () => {
+    const scaleOf = (name: string, paper: (typeof PAPERS)[number]): number => {
+      const drawingCase = drawingCases.find((one) => one.name === name)!;
+      const marks = flat(layOutSheet(on(paper, issuedContent(drawingCase))).elements).flatMap((item) => item.marks);
+      const drawing = marks.find((mark) => mark.kind === 'drawing');
+      return drawing?.kind === 'drawing' ? Math.round(72 / 25.4 / drawing.pointsPerMm) : Infinity;
+    };
+    expect(scaleOf('tension set of two strings with horns', 'A4')).toBeLessThanOrEqual(50);
+    expect(scaleOf('tension set of two strings with horns', 'Letter')).toBeLessThanOrEqual(50);
+    expect(scaleOf('V string with horns', 'A4')).toBeLessThanOrEqual(60);
+    expect(scaleOf('V string with horns', 'Letter')).toBeLessThanOrEqual(75);
   });
 
   it.each(drawingCases)('keeps every word above the foot: $name', (drawingCase) => {

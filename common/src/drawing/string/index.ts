@@ -34,6 +34,7 @@ export function drawString(
   const table = new DraftingTable((contentSizeMm(plan) / TEXTS_IN_CONTENT) * (options.textScale ?? 1));
   const layOut = plan.postDeg === null ? LAYOUTS[plan.arrangement] : layOutPost;
   layOut(table, plan, evaluation);
+  table.settleWords();
   drawLegend(table, plan);
   return table.finish(titleOf(plan), describe(plan, evaluation));
 }

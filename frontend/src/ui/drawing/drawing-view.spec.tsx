@@ -1,5 +1,5 @@
 import { fireEvent, render, screen } from '@testing-library/react';
-import { allWords, drawString, type Drawing } from '@bellgap/common/drawing';
+import { allWords, boxesOverlap, drawString, textBox, type Drawing } from '@bellgap/common/drawing';
 import { drawingCases, suspensionCase } from '@bellgap/common/drawing/fixtures';
 import { DrawingView } from './drawing-view';
 
@@ -23,6 +23,27 @@ describe('the drawing on the screen', () => {
     expect([...container.querySelectorAll('text')].map((t) => t.textContent)).toEqual(
       allWords(drawing).map((w) => w.text),
     );
+  });
+
+  it.each(drawingCases)('places no words on others: $name', (drawingCase) => {
+    const drawing = drawingOf(drawingCase);
+    const { container } = render(<DrawingView drawing={drawing} />);
+    const boxes = [...container.querySelectorAll('text')].map((text) => {
+      const number = (name: string): number => Number(text.getAttribute(name));
+      const words = {
+        kind: 'text',
+        layer: 'note',
+        text: text.textContent,
+        at: { xMm: number('x'), yMm: number('y') },
+        anchor: text.getAttribute('text-anchor') as 'start' | 'middle' | 'end',
+        angleDeg: Number(/rotate\((-?[\d.]+)/.exec(text.getAttribute('transform') ?? '')?.[1] ?? 0),
+      } as const;
+      return { text: words.text, box: textBox(words, drawing.textHeightMm) };
+    });
+    const found = boxes.flatMap(({ text, box }, i) =>
+      boxes.slice(i + 1).flatMap((other) => (boxesOverlap(box, other.box) ? [`${text} | ${other.text}`] : [])),
+    );
+    expect(found).toEqual([]);
   });
 
   it('tells which figure the pointer is on, and marks the one it is told', () => {

@@ -15,14 +15,12 @@ import type { PageGeometry } from './page';
 
 const PT_PER_MM = 72 / 25.4;
 /** Usual scales of drawings, one to so many. */
-const SCALES = [1, 2, 5, 10, 15, 20, 25, 30, 40, 50, 75, 100, 150, 200, 500] as const;
+const SCALES = [1, 2, 5, 10, 15, 20, 25, 30, 40, 50, 60, 75, 100, 125, 150, 200, 500] as const;
 const TEXT_PT = 6.8;
 const GUTTER = 14;
 /** From this proportion on a drawing stands above the values, not beside them. */
 const WIDE = 1.15;
-const LEAST_SHARE = 0.3;
-const PAIR_PT = 14;
-const COLUMN_HEAD_PT = 34;
+const BELOW_DRAWING = 6;
 const DRAWING_SHARE = 0.57;
 
 interface Fitted {
@@ -31,19 +29,32 @@ interface Fitted {
 }
 
 /** The largest usual scale at which the drawing, with its words at a readable size, fits into a box. */
-function fitDrawing(content: SheetContent, plainDrawing: Drawing, widthPt: number, heightPt: number): Fitted | null {
-  const draw = (textScale: number): Drawing | null =>
-    drawString(content.input, content.context, content.evaluation, { textScale });
-  const [widthMm, heightMm] = [widthPt / PT_PER_MM, heightPt / PT_PER_MM];
-  const least = Math.max((0.7 * plainDrawing.widthMm) / widthMm, (0.7 * plainDrawing.heightMm) / heightMm);
-  for (const scale of SCALES) {
-    if (scale < least) continue;
+function fitterOf({ input, context, evaluation }: SheetContent, plainDrawing: Drawing) {
+  const drawn = new Map<number, Drawing | null>();
+  const drawAt = (scale: number): Drawing | null => {
     const textScale = ((TEXT_PT / PT_PER_MM) * scale) / plainDrawing.textHeightMm;
-    const drawing = draw(textScale);
-    if (drawing && drawing.widthMm <= scale * widthMm && drawing.heightMm <= scale * heightMm)
-      return { drawing, scale };
-  }
-  return null;
+    if (!drawn.has(scale)) drawn.set(scale, drawString(input, context, evaluation, { textScale }));
+    return drawn.get(scale) ?? null;
+  };
+  return (widthPt: number, heightPt: number): Fitted | null => {
+    const [widthMm, heightMm] = [widthPt / PT_PER_MM, heightPt / PT_PER_MM];
+    const least = Math.max((0.6 * plainDrawing.widthMm) / widthMm, (0.6 * plainDrawing.heightMm) / heightMm);
+    for (const scale of SCALES) {
+      if (scale < least) continue;
+      const drawing = drawAt(scale);
+      if (drawing && drawing.widthMm <= scale * widthMm && drawing.heightMm <= scale * heightMm)
+        return { drawing, scale };
+    }
+    return null;
+  };
+}
+
+/** Height that blocks take in a column of a width. */
+function measured(blocks: Block[], width: number): number {
+  const scratch: Paper = { artifacts: [{ behind: [], before: [] }], elements: [] };
+  const flow = new Flow(scratch, { x: 0, width, top: 0, bottom: Infinity }, 0, null);
+  flow.place(blocks);
+  return flow.y;
 }
 
 /** Head, drawing beside or above the values, title block; gives back the blocks that found no room. */
@@ -63,31 +74,35 @@ export function layOutFirstPage(paper: Paper, geometry: PageGeometry, content: S
     const left = new Flow(paper, { x, width, top, bottom: region.bottom }, 0, null).place(blocks);
     rest.push(...continued(blocks, left));
   };
-  if (drawing && drawing.widthMm > WIDE * drawing.heightMm) {
-    const half = (region.width - GUTTER) / 2;
-    const columnHeight = COLUMN_HEAD_PT + PAIR_PT * Math.max(pairsIn(values), pairsIn(circumstances));
-    const fitted = fitDrawing(
-      content,
-      drawing,
-      region.width,
-      Math.max(flow.room - columnHeight, LEAST_SHARE * flow.room),
-    );
-    if (fitted) scale = placeDrawing(paper, fitted, region.x, flow.y, region.width, false);
-    const top = flow.y + (fitted ? heightOf(fitted) : 0) + 6;
+  const half = (region.width - GUTTER) / 2;
+  const width = DRAWING_SHARE * region.width;
+  const fitIn = drawing && fitterOf(content, drawing);
+  const columnHeight = Math.max(measured(values, half), measured(circumstances, half));
+  const above = fitIn?.(region.width, flow.room - columnHeight - BELOW_DRAWING) ?? null;
+  const beside = fitIn?.(width, flow.room) ?? null;
+  const keepsAll = measured([...values, ...circumstances], region.width - width - GUTTER) <= flow.room;
+  if (drawing && above && isBetterAbove(above, beside, keepsAll, drawing.widthMm > WIDE * drawing.heightMm)) {
+    scale = placeDrawing(paper, above, region.x, flow.y, region.width, false);
+    const top = flow.y + heightOf(above) + BELOW_DRAWING;
     column(region.x, half, top, values);
     column(region.x + half + GUTTER, half, top, circumstances);
     rest.push(...byCriterion);
   } else {
-    const width = DRAWING_SHARE * region.width;
-    const fitted = drawing && fitDrawing(content, drawing, width, flow.room);
-    if (fitted) scale = placeDrawing(paper, fitted, region.x, flow.y, width, true);
-    const left = fitted ? width + GUTTER : 0;
+    if (beside) scale = placeDrawing(paper, beside, region.x, flow.y, width, true);
+    const left = beside ? width + GUTTER : 0;
     column(region.x + left, region.width - left, flow.y, [...values, ...circumstances]);
-    if (fitted) column(region.x, width, flow.y + heightOf(fitted) + 4, byCriterion);
+    if (beside) column(region.x, width, flow.y + heightOf(beside) + 4, byCriterion);
     else rest.push(...byCriterion);
   }
   layOutTitleBlock(paper, geometry, content, scale);
   return rest;
+}
+
+/** The larger scale wins, then the place that keeps all conditions on the page, then the form of the drawing. */
+function isBetterAbove(above: Fitted, beside: Fitted | null, besideKeepsAll: boolean, isWide: boolean): boolean {
+  if (!beside) return true;
+  if (above.scale !== beside.scale) return above.scale < beside.scale;
+  return isWide || !besideKeepsAll;
 }
 
 /** What is cut off from its heading gets one of its own on the next page. */
@@ -97,9 +112,6 @@ function continued(blocks: Block[], left: Block[]): Block[] {
   const above = blocks.slice(0, cut).findLast((block) => block.kind === 'heading');
   return above ? [heading(2, `${above.text}, continued`), ...left] : left;
 }
-
-const pairsIn = (blocks: Block[]): number =>
-  blocks.reduce((sum, block) => sum + (block.kind === 'pairs' ? block.rows.length : 0), 0);
 
 const heightOf = ({ drawing, scale }: Fitted): number => (drawing.heightMm / scale) * PT_PER_MM;
 
