@@ -1,4 +1,4 @@
-import type { CriterionResult, Evaluation } from '@bellgap/common/api';
+import type { CriterionResult, Evaluation, InsulatorUnit } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { Figure } from '../../ui/figure';
 import { TraceArea } from '../../ui/trace';
@@ -8,13 +8,14 @@ import { LedgerBlock } from './ledger-rows';
 
 interface Properties {
   evaluation: Evaluation;
-  isRod: boolean;
+  kind: InsulatorUnit['kind'] | null;
 }
 
-/** Units, or for rods the margin, by each criterion; what governs stands out in colour, weight and words. */
-export function CriteriaBlock({ evaluation, isRod }: Properties) {
+/** Units, or for rods and posts the margin, by each criterion; what governs stands out in colour, weight and words. */
+export function CriteriaBlock({ evaluation, kind }: Properties) {
   const { string } = evaluation;
-  const title = isRod ? 'Rod by criterion' : 'Units by criterion';
+  const isRod = kind !== null && kind !== 'cap-and-pin';
+  const title = kind === 'line-post' ? 'Post by criterion' : isRod ? 'Rod by criterion' : 'Units by criterion';
   if (!string) {
     return (
       <LedgerBlock title={title}>

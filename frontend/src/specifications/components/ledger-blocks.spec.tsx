@@ -2,12 +2,31 @@ import { render, screen, within } from '@testing-library/react';
 import { anEvaluation } from '../testing/fake-server';
 import { BridgeBlock } from './bridge-block';
 import { ClearanceBlocks } from './clearance-blocks';
+import { CriteriaBlock } from './criteria-block';
+import { LengthsBlock } from './lengths-block';
 import { MechanicalBlock } from './mechanical-block';
 import { SafetyBlock } from './safety-block';
 import { VoltageBlock } from './voltage-block';
 
 const ruleOfThumb = (given: Partial<ReturnType<typeof anEvaluation>['ruleOfThumb']>) => ({
   ruleOfThumb: { rows: [], bridge: null, bridgeWhyNot: null, ...given },
+});
+
+describe('the titles of the ledger', () => {
+  it.each([
+    ['line-post', 'Post by criterion', 'The post'],
+    ['composite-rod', 'Rod by criterion', 'The string'],
+    ['cap-and-pin', 'Units by criterion', 'The string'],
+  ] as const)('name what is chosen: %s', (kind, criteria, lengths) => {
+    render(
+      <>
+        <CriteriaBlock evaluation={anEvaluation(1)} kind={kind} />
+        <LengthsBlock evaluation={anEvaluation(1)} kind={kind} />
+      </>,
+    );
+    const names = screen.getAllByRole('heading').map((item) => item.textContent?.trim());
+    expect(names).toEqual([criteria, lengths]);
+  });
 });
 
 describe('from the rule to the count', () => {

@@ -25,10 +25,10 @@ export const LedgerZone = memo(function LedgerZone({ answer, unit }: Properties)
     <section className="zone zone-ledger" aria-label="Results">
       {isLine && (
         <>
-          <CriteriaBlock evaluation={evaluation} isRod={unit !== null && unit.kind !== 'cap-and-pin'} />
+          <CriteriaBlock evaluation={evaluation} kind={unit?.kind ?? null} />
           <CautionsBlock evaluation={evaluation} />
           <CreepageBlock evaluation={evaluation} input={input} />
-          <LengthsBlock evaluation={evaluation} />
+          <LengthsBlock evaluation={evaluation} kind={unit?.kind ?? null} />
           <MechanicalBlock evaluation={evaluation} />
           <VoltageBlock evaluation={evaluation} />
         </>

@@ -1,18 +1,23 @@
-import type { Evaluation } from '@bellgap/common/api';
+import type { Evaluation, InsulatorUnit } from '@bellgap/common/api';
 import { CHOICE_LABELS } from '@bellgap/common/schemas';
 import { Figure } from '../../ui/figure';
 import { TraceArea } from '../../ui/trace';
 import { whyNot } from '../model/words';
 import { LedgerBlock, LedgerRow } from './ledger-rows';
 
-/** Lengths, arcing distances and mass of the string. */
-export function LengthsBlock({ evaluation }: { evaluation: Evaluation }) {
+interface Properties {
+  evaluation: Evaluation;
+  kind: InsulatorUnit['kind'] | null;
+}
+
+/** Lengths, arcing distances and mass of the string or post. */
+export function LengthsBlock({ evaluation, kind }: Properties) {
   const { string } = evaluation;
   if (!string) return null;
   const { coordination } = string;
   const whyLength = whyNot(evaluation, 'string.stringLengthWithFittings', 'string.stringLengthWithFittingsMaxMm');
   return (
-    <LedgerBlock title="The string">
+    <LedgerBlock title={kind === 'line-post' ? 'The post' : 'The string'}>
       <TraceArea>
         <dl className="ledger-list">
           <LedgerRow label="Section length" about="string.sectionLengthMm">
