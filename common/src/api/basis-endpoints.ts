@@ -1,5 +1,5 @@
 import { basisMoveSchema } from '../schemas/basis-moves';
-import { standingBasisAnswer } from './answers';
+import { standingBasisAnswer } from './project-answers';
 import { endpoint } from './endpoint';
 
 /** Endpoints of the way of a design basis from draft to issued. */

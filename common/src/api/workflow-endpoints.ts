@@ -11,7 +11,7 @@ import {
   withReasonSchema,
   withdrawSchema,
 } from '../schemas/workflow';
-import { revisionAnswer } from './answers';
+import { revisionAnswer } from './specification-answers';
 import { endpoint } from './endpoint';
 import { listQuery, sortable } from './list-query';
 import { DRAFT_READERS, DRAFT_WRITERS } from './roles';
