@@ -1,8 +1,8 @@
-import { contract, DRAFT_READERS, DRAFT_WRITERS, type Person, type Role } from '@bellgap/common/api';
+import { peopleEndpoints, DRAFT_READERS, DRAFT_WRITERS, type Person, type Role } from '@bellgap/common/api';
 import { useQuery } from '@tanstack/react-query';
 import { queryOf } from './queries';
 
-export const sessionQuery = { ...queryOf(contract.currentSession), staleTime: Infinity };
+export const sessionQuery = { ...queryOf(peopleEndpoints.currentSession), staleTime: Infinity };
 
 /** Who is signed in, once that is known; pages inside the frame always have a person. */
 export function useSession() {

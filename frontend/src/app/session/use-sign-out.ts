@@ -1,4 +1,4 @@
-import { contract } from '@bellgap/common/api';
+import { peopleEndpoints } from '@bellgap/common/api';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { useNavigate } from 'react-router-dom';
 import { call } from '../../api/client';
@@ -9,7 +9,7 @@ export function useSignOut() {
   const queryClient = useQueryClient();
   const navigate = useNavigate();
   return useMutation({
-    mutationFn: () => call(contract.signOut),
+    mutationFn: () => call(peopleEndpoints.signOut),
     // Also a session that has already ended is signed out.
     onSettled: async () => {
       await navigate(paths.signIn.to());

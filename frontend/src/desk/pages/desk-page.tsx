@@ -1,4 +1,4 @@
-import { contract, type Desk, type SpecificationRow } from '@bellgap/common/api';
+import { specificationEndpoints, type Desk, type SpecificationRow } from '@bellgap/common/api';
 import { useQuery } from '@tanstack/react-query';
 import { Link } from 'react-router-dom';
 import { queryOf } from '../../api/queries';
@@ -116,7 +116,7 @@ function IssuedSheets({ issued, expected }: { issued: Desk['issued']; expected: 
 
 export function DeskPage() {
   const drafts = maySeeDrafts(usePerson());
-  const query = useQuery(queryOf(contract.desk));
+  const query = useQuery(queryOf(specificationEndpoints.desk));
   return (
     <Page title="Desk" lead={drafts ? 'What waits for you' : 'What was issued of late'}>
       <QueryState query={query} what="Your desk">

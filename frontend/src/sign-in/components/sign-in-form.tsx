@@ -1,4 +1,4 @@
-import { contract, type BodyOf, type Person } from '@bellgap/common/api';
+import { peopleEndpoints, type BodyOf, type Person } from '@bellgap/common/api';
 import { signInSchema } from '@bellgap/common/schemas';
 import { call } from '../../api/client';
 import { PasswordField, TextField } from '../../ui/forms/text-fields';
@@ -14,8 +14,8 @@ export function SignInForm({ email = '', signedIn }: SignInFormProps) {
   const form = useSchemaForm({
     schema: signInSchema,
     initialValues: { email, password: '' },
-    submit: async (body: BodyOf<typeof contract.signIn>) => {
-      const { user } = await call(contract.signIn, { body });
+    submit: async (body: BodyOf<typeof peopleEndpoints.signIn>) => {
+      const { user } = await call(peopleEndpoints.signIn, { body });
       if (user) await signedIn(user);
     },
   });
